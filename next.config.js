@@ -1,0 +1,18 @@
+/** @type {import('next').NextConfig} */
+const config = {
+  distDir: process.env.NEXT_DIST_DIR ?? '.next',
+  poweredByHeader: false,
+  reactStrictMode: true,
+  serverExternalPackages: ['graphile-worker', 'pg', '@node-rs/argon2'],
+  headers: async () => [
+    {
+      source: '/:path*',
+      headers: [
+        { key: 'X-Content-Type-Options', value: 'nosniff' },
+        { key: 'Referrer-Policy', value: 'strict-origin-when-cross-origin' },
+        { key: 'Permissions-Policy', value: 'camera=(self), geolocation=(self)' },
+      ],
+    },
+  ],
+};
+export default config;
