@@ -1,11 +1,13 @@
 // Brings a database up to date, an empty one included; run it before every start (`npm run db:migrate`). It needs
 // MIGRATE_DATABASE_URL (the owner) and QUEUE_DATABASE_URL (the job queue's role), prepared by scripts/setup/*.sql.
 import { existsSync } from 'node:fs';
-import { pathToFileURL } from 'node:url';
+import { fileURLToPath, pathToFileURL } from 'node:url';
 import { drizzle } from 'drizzle-orm/node-postgres';
 import { migrate } from 'drizzle-orm/node-postgres/migrator';
 import { Logger, runMigrations } from 'graphile-worker';
 import { Pool } from 'pg';
+
+const MIGRATIONS = fileURLToPath(new URL('../migrations', import.meta.url));
 
 type Urls = { ownerUrl: string; queueUrl: string };
 
@@ -20,7 +22,7 @@ export async function migrateAll({ ownerUrl, queueUrl }: Urls): Promise<void> {
 async function migrateTables(ownerUrl: string) {
   await withPool(ownerUrl, async (pool) => {
     await pool.query(APP_RIGHTS); // before the tables: a migration that takes a right away has the last word
-    if (existsSync('migrations/meta/_journal.json')) await migrate(drizzle({ client: pool }), { migrationsFolder: 'migrations' });
+    if (existsSync(`${MIGRATIONS}/meta/_journal.json`)) await migrate(drizzle({ client: pool }), { migrationsFolder: MIGRATIONS });
   });
 }
 
@@ -30,12 +32,14 @@ async function migrateQueue(queueUrl: string) {
       if (level === 'error' || level === 'warning') console.error(message);
     }) });
     await pool.query(ENQUEUE);
+    await pool.query(WORKERS);
   });
 }
 
 async function withPool(connectionString: string, run: (pool: Pool) => Promise<unknown>) {
   const pool = new Pool({ connectionString, max: 2 });
-  pool.on('error', () => undefined); // a lost idle connection; the next query says so
+  const lost = () => undefined; // the next query says so
+  pool.on('error', lost).on('connect', (client) => client.on('error', lost));
   try {
     await run(pool);
   } finally {
@@ -60,6 +64,9 @@ const ENQUEUE = `
   revoke all on function queue.enqueue(text, json, timestamptz, text) from public;
   grant usage on schema queue to leafhalt_app;
   grant execute on function queue.enqueue(text, json, timestamptz, text) to leafhalt_app;`;
+
+/** Which workers live: a row for each process, believed only while its advisory lock is held. */
+const WORKERS = 'create table if not exists queue.workers (lock_key bigint primary key, names text[] not null, seen_at timestamptz not null)';
 
 if (process.argv[1] && import.meta.url === pathToFileURL(process.argv[1]).href) {
   const { MIGRATE_DATABASE_URL: ownerUrl, QUEUE_DATABASE_URL: queueUrl } = process.env;
