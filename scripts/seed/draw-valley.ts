@@ -4,7 +4,7 @@
  */
 import { writeFileSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
-import { areaDrawings, fieldDrawings, haltPoint, hedgeDrawings, railwayDrawing, ridgeDrawing, riverDrawings, roadDrawings, woodDrawings, type Pen } from './valley-drawing.ts';
+import { areaDrawings, fieldDrawings, haltPoint, hedgeDrawings, railwayDrawing, ridgeDrawing, riverDrawings, roadDrawings, woodDrawings, type Pen } from './valley-drawing';
 
 type Point = readonly [number, number];
 
@@ -99,7 +99,15 @@ function ringOf(bounds: readonly string[]): Point[] {
 type Geometry = { type: 'LineString' | 'MultiPoint'; coordinates: number[][] } | { type: 'Polygon'; coordinates: number[][][] } | { type: 'Point'; coordinates: number[] };
 const feature = (properties: object, geometry: Geometry) => ({ type: 'Feature', properties, geometry });
 const lineString = (points: readonly Point[]): Geometry => ({ type: 'LineString', coordinates: points.map(toLonLat) });
-const polygon = (ring: readonly Point[]): Geometry => ({ type: 'Polygon', coordinates: [ring.map(toLonLat)] });
+/** Outer rings run counterclockwise on the ground (RFC 7946, section 3.1.6). */
+function polygon(ring: readonly Point[]): Geometry {
+  const onGround = ring.map(toLonLat);
+  const doubleArea = onGround.reduce((sum, [x, y], i) => {
+    const [nextX, nextY] = onGround[(i + 1) % onGround.length] ?? [x, y];
+    return sum + x * nextY - y * nextX;
+  }, 0);
+  return { type: 'Polygon', coordinates: [doubleArea < 0 ? onGround.reverse() : onGround] };
+}
 
 const [west, north] = toLonLat([0, 0]);
 const [east, south] = toLonLat([1600, 1100]);
