@@ -11,8 +11,8 @@ const heads = z.number().int().min(0).max(99);
 const people = { adults: heads, children: heads, babes: heads };
 const reason = z.string().trim().max(200).transform((text) => text || null).nullable();
 
-/** A device's own key, made on the phone: 32 random bytes in base 32. */
-export const deviceKey = z.string().regex(/^[A-Z2-7]{52}$/, { error: 'That is not a gate device.' });
+/** A device's own key, made on the phone: 32 random bytes in base64url (RFC 4648 section 5). */
+export const deviceKey = z.string().regex(/^[A-Za-z0-9_-]{43}$/, { error: 'That is not a gate device.' });
 
 /** What a phone sends once to become a device of a pass. The key is the phone's own, so a repeat changes nothing. */
 export const exchangePassInput = z.object({ secret: z.string().min(8).max(100), deviceKey });
@@ -57,7 +57,7 @@ export const gateList = z.object({
   madeAt: instant,
   deviceId: z.string(),
   here: z.object({
-    stopId: z.string(), stopNumber: z.number().int(), heldOn: z.string(), headsLimit: z.number().int().nullable(),
+    stopId: z.string(), stopNumber: z.number().int(), heldOn: z.string(), headsLimit: z.number().int(),
     earlyMinutes: z.number().int(), babes: z.enum(['counted', 'not counted']), calledOff: z.boolean(),
   }),
   garden: z.string(),

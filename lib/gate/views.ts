@@ -1,4 +1,5 @@
 import { dayOf, formatDay, formatTime, type ClubTime } from '@/lib/core/time';
+import { counted, inWordsFirst, listed } from '@/lib/opendays/rules/words';
 import { headCount, peopleCount, type BabesRule, type Heads } from './rules/facts';
 import { headsInGarden, storyOf, type GateFold } from './rules/fold';
 import type { GateHere, GateTicket, Verdict } from './rules/verdict';
@@ -29,8 +30,6 @@ export function sentenceOf(verdict: Verdict, hereNumber: number, club: ClubTime)
   }
 }
 
-const counted = (count: number, one: string, many: string) => (count === 1 ? `1 ${one}` : `${count} ${many}`);
-
 /** A party in words: "2 adults and 1 child". */
 export function peopleInWords({ adults, children, babes }: Heads): string {
   const parts = [
@@ -38,16 +37,11 @@ export function peopleInWords({ adults, children, babes }: Heads): string {
     children > 0 && counted(children, 'child', 'children'),
     babes > 0 && counted(babes, 'babe in arms', 'babes in arms'),
   ].filter((part) => part !== false);
-  const last = parts.pop();
-  return parts.length > 0 ? `${parts.join(', ')} and ${last}` : (last ?? 'nobody');
+  return listed(parts) || 'nobody';
 }
 
-const SMALL = ['None', 'One', 'Two', 'Three', 'Four', 'Five', 'Six', 'Seven', 'Eight', 'Nine', 'Ten', 'Eleven', 'Twelve'];
-/** A number that begins a sentence: "Three", "14". */
-export const numberWord = (count: number): string => SMALL[count] ?? String(count);
-
 /** What stands on the open gate once they are in: "Three in at 11:34". */
-export const letInSentence = (count: number, at: Date, club: ClubTime): string => `${numberWord(count)} in at ${formatTime(at, club)}`;
+export const letInSentence = (count: number, at: Date, club: ClubTime): string => `${inWordsFirst(count)} in at ${formatTime(at, club)}`;
 
 /** A length of time at the gate: minutes to two hours, then hours. */
 const minutesInWords = (minutes: number) => (minutes <= 120 ? counted(minutes, 'minute', 'minutes') : `${Math.floor(minutes / 60)} hours`);
@@ -56,7 +50,7 @@ const minutesInWords = (minutes: number) => (minutes <= 120 ? counted(minutes, '
 export function explain(verdict: Verdict, story: { deviceId: string; club: ClubTime }): string {
   switch (verdict.kind) {
     case 'let_in':
-      return verdict.cameBefore ? `${numberWord(peopleCount(verdict.cameBefore))} of the party came in before. Press the number.` : 'On time. Press the number.';
+      return verdict.cameBefore ? `${inWordsFirst(peopleCount(verdict.cameBefore))} of the party came in before. Press the number.` : 'On time. Press the number.';
     case 'early':
       return `${peopleInWords(verdict.heads)}, ${minutesInWords(verdict.minutes)} early.`;
     case 'late':
@@ -84,8 +78,7 @@ export function explain(verdict: Verdict, story: { deviceId: string; club: ClubT
 export function crowdSentence(fold: GateFold, here: GateHere, due: { heads: number; by: Date } | null, club: ClubTime): string {
   const now = headsInGarden(fold, here.babes);
   const people = now === 0 ? 'Nobody is in the garden yet' : now === 1 ? '1 person is in the garden' : `${now} people are in the garden`;
-  const next = due === null ? '' : ` ${numberWord(due.heads)} more ${due.heads === 1 ? 'is' : 'are'} due by ${formatTime(due.by, club)}.`;
-  if (here.headsLimit === null) return `${people}.${next}`;
+  const next = due === null ? '' : ` ${inWordsFirst(due.heads)} more ${due.heads === 1 ? 'is' : 'are'} due by ${formatTime(due.by, club)}.`;
   const room = here.headsLimit - now;
   if (room > 0) return `${people}, so there is room for ${room}.${next}`;
   return room === 0 ? `${now} of ${here.headsLimit} people are in the garden: it is full.${next}` : `${now} people are in the garden, ${-room} over its limit of ${here.headsLimit}.${next}`;

@@ -19,8 +19,8 @@ export type GateHere = {
   stopId: string;
   stopNumber: number;
   heldOn: Day;
-  /** Heads the garden carries at once; null when the host named no limit. */
-  headsLimit: number | null;
+  /** Heads the garden carries at once. */
+  headsLimit: number;
   /** How long before the entry time people may come in all the same. */
   earlyMinutes: number;
   babes: BabesRule;
@@ -74,9 +74,8 @@ export function judge(ticket: GateTicket | null, here: GateHere, fold: GateFold,
   return { kind: 'let_in', heads, number, cameBefore: last ? story.in : null };
 }
 
-/** Heads for whom the garden still has room; without a limit there is always room. */
-export const roomLeft = (here: GateHere, fold: GateFold): number =>
-  here.headsLimit === null ? Number.POSITIVE_INFINITY : Math.max(0, here.headsLimit - headsInGarden(fold, here.babes));
+/** Heads for whom the garden still has room. */
+export const roomLeft = (here: GateHere, fold: GateFold): number => Math.max(0, here.headsLimit - headsInGarden(fold, here.babes));
 
 /** The drawing that is the answer: open is yes, ajar is wait or ask, shut is no, and full lets one in for one out. */
 export function drawingOf(verdict: Verdict): GateDrawing {

@@ -36,8 +36,8 @@ describe('the wire format of gate facts', () => {
       .toEqual([false, true, true, false]);
   });
 
-  test('a device key is 32 bytes in base 32, and nothing shorter opens a gate', () => {
-    expect(exchangePassInput.safeParse({ secret: 'a-long-secret', deviceKey: 'A'.repeat(52) }).success).toBe(true);
-    expect(exchangePassInput.safeParse({ secret: 'a-long-secret', deviceKey: 'A'.repeat(51) }).success).toBe(false);
+  test('a device key is 32 bytes in base64url, and nothing shorter opens a gate', () => {
+    expect(exchangePassInput.safeParse({ secret: 'a-long-secret', deviceKey: 'A'.repeat(43) }).success).toBe(true);
+    expect(exchangePassInput.safeParse({ secret: 'a-long-secret', deviceKey: 'A'.repeat(42) }).success).toBe(false);
   });
 });

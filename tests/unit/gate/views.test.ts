@@ -25,7 +25,7 @@ describe('the words on the gate', () => {
 
   test('after the press the gate says how many are in and when', () => {
     expect(letInSentence(3, at('11:34'), club)).toBe('Three in at 11:34');
-    expect(letInSentence(14, at('11:34'), club)).toBe('14 in at 11:34');
+    expect(letInSentence(15, at('11:34'), club)).toBe('15 in at 11:34');
   });
 
   test('a party is told by kinds of people', () => {
