@@ -43,7 +43,7 @@ CREATE TRIGGER entry_made_here BEFORE INSERT ON "journal_entries" FOR EACH ROW E
 
 -- Checked at commit: the postings of an entry sum to zero in every currency, and there are some.
 CREATE FUNCTION entry_balances() RETURNS trigger LANGUAGE plpgsql AS $$
-DECLARE entry uuid := CASE TG_TABLE_NAME WHEN 'postings' THEN NEW.entry_id ELSE NEW.id END;
+DECLARE entry uuid := (to_jsonb(NEW) ->> TG_ARGV[0])::uuid;
 BEGIN
   IF NOT EXISTS (SELECT FROM postings WHERE entry_id = entry)
      OR EXISTS (SELECT FROM postings WHERE entry_id = entry GROUP BY currency HAVING sum(amount_minor) <> 0) THEN
@@ -51,7 +51,8 @@ BEGIN
   END IF;
   RETURN NULL;
 END $$;--> statement-breakpoint
-CREATE CONSTRAINT TRIGGER entry_balances AFTER INSERT ON "journal_entries" DEFERRABLE INITIALLY DEFERRED FOR EACH ROW EXECUTE FUNCTION entry_balances();--> statement-breakpoint
+CREATE CONSTRAINT TRIGGER entry_balances AFTER INSERT ON "journal_entries" DEFERRABLE INITIALLY DEFERRED FOR EACH ROW EXECUTE FUNCTION entry_balances('id');--> statement-breakpoint
+CREATE CONSTRAINT TRIGGER entry_balances AFTER INSERT ON "postings" DEFERRABLE INITIALLY DEFERRED FOR EACH ROW EXECUTE FUNCTION entry_balances('entry_id');--> statement-breakpoint
 
 -- A visit's entry time is on its booking's open day; an entry time is on its stop's.
 CREATE FUNCTION same_open_day() RETURNS trigger LANGUAGE plpgsql AS $$

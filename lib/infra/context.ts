@@ -39,7 +39,7 @@ export type AccountActor = {
   roles: Role[];
 };
 /** A browser that holds places, known by its cookie. */
-export type HolderActor = { kind: 'holder'; holderHash: string };
+export type HolderActor = { kind: 'holder'; holderHash: string; householdId: Id<'household'> | null };
 /** Whoever followed a booking's private link. */
 export type BookingActor = { kind: 'booking'; bookingId: Id<'booking'> };
 /** A phone that opened a gate pass. */

@@ -1,0 +1,106 @@
+import 'server-only';
+import { randomUUID } from 'node:crypto';
+import { headers } from 'next/headers';
+import { notFound, redirect } from 'next/navigation';
+import { cache } from 'react';
+import { getDb } from '@/db/client';
+import { findBookingByLink, findOwnBooking } from '@/lib/bookings/access';
+import { getClub } from '@/lib/club/queries';
+import { Refusal } from '@/lib/core/refusal';
+import { readClock } from '@/lib/infra/clock';
+import type { Actor, BookingActor, Ctx, HolderActor, SystemActor } from '@/lib/infra/context';
+import { env } from '@/lib/infra/env';
+import { findAccountActor } from '@/lib/people/queries';
+import { may, type Capability } from '@/lib/people/rules/capabilities';
+import { currentSignIn } from './auth';
+import { ensureHolder, readBookingLink, readHolder } from './cookies';
+import type { ActorFor, Requires } from './requires';
+
+const base = cache(async () => {
+  const db = getDb();
+  const incoming = await headers();
+  return { db, club: await getClub(db), now: readClock(), requestId: incoming.get('x-request-id') ?? randomUUID() };
+});
+
+const account = cache(async () => {
+  const signInId = await currentSignIn();
+  return signInId === null ? null : findAccountActor(getDb(), signInId);
+});
+
+/** The acting account of this request, or null: for a page's header. */
+export const currentAccount = account;
+
+/** The actor that `requires` asks for, or a refusal. The one place where a request becomes somebody. */
+async function actorFor(requires: Requires, options: { code?: string; mayMakeCookie: boolean }): Promise<Actor> {
+  switch (requires) {
+    case 'anyone': return (await account()) ?? { kind: 'anyone' };
+    case 'browser': return holder(options.mayMakeCookie);
+    case 'booking': return booking(options.code ?? '');
+    case 'account': {
+      const actor = await account();
+      if (!actor) throw new Refusal('not_allowed');
+      return actor;
+    }
+    case 'member': {
+      const actor = await account();
+      if (!actor || actor.householdId === null) throw new Refusal('not_allowed');
+      return actor;
+    }
+    default: return officer(requires);
+  }
+}
+
+async function holder(mayMakeCookie: boolean): Promise<HolderActor> {
+  const holderHash = mayMakeCookie ? await ensureHolder() : await readHolder();
+  if (holderHash === null) throw new Refusal('hold_over');
+  return { kind: 'holder', holderHash, householdId: (await account())?.householdId ?? null };
+}
+
+async function booking(code: string): Promise<BookingActor> {
+  const hash = await readBookingLink(code);
+  const { db, now } = await base();
+  const byLink = hash === null ? null : await findBookingByLink(db, code, hash, now);
+  if (byLink) return { kind: 'booking', bookingId: byLink };
+  const actor = await account();
+  const own = actor?.householdId ? await findOwnBooking(db, code, actor.householdId) : null;
+  if (!own) throw new Refusal('not_found');
+  return { kind: 'booking', bookingId: own };
+}
+
+async function officer(capability: Capability): Promise<Actor> {
+  const actor = await account();
+  if (!actor || !may(actor.roles, capability)) throw new Refusal('not_allowed');
+  return actor;
+}
+
+/** The context of an action or handler; throws a `Refusal` when the actor may not. */
+export async function requestContext<R extends Requires>(requires: R, options: { code?: string } = {}): Promise<Ctx<ActorFor<R>>> {
+  const actor = await actorFor(requires, { ...options, mayMakeCookie: true });
+  return { ...(await base()), actor: actor as ActorFor<R> }; // actorFor answers with the actor that R asks for
+}
+
+/** The context of a page. A stranger is sent to sign in; whoever may not see it is told it is not there. */
+export async function pageContext<R extends Requires>(requires: R, options: { code?: string } = {}): Promise<Ctx<ActorFor<R>>> {
+  try {
+    const actor = await actorFor(requires, { ...options, mayMakeCookie: false });
+    return { ...(await base()), actor: actor as ActorFor<R> }; // as above
+  } catch (error) {
+    if (!(error instanceof Refusal)) throw error;
+    if (error.code === 'not_allowed' && (await account()) === null) redirect('/sign-in');
+    notFound();
+  }
+}
+
+/** The context of a machine: a webhook, a job, a script. Machines have no role. */
+export async function systemContext(name: string): Promise<Ctx<SystemActor>> {
+  const db = getDb();
+  return { db, club: await getClub(db), now: readClock(), requestId: randomUUID(), actor: { kind: 'system', name } };
+}
+
+/** The client's address, taken from the set number of trusted proxies and no further; null when there is none. */
+export async function clientAddress(): Promise<string | null> {
+  const hops = env().TRUSTED_PROXY_HOPS;
+  if (hops === 0) return null;
+  const chain = ((await headers()).get('x-forwarded-for') ?? '').split(',').map((part) => part.trim()).filter(Boolean);
+  return chain.at(-hops) ?? null;
+}

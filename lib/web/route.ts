@@ -1,0 +1,89 @@
+import 'server-only';
+import { unstable_rethrow } from 'next/navigation';
+import { NextResponse, type NextRequest } from 'next/server';
+import { z } from 'zod';
+import { Refusal } from '@/lib/core/refusal';
+import type { Ctx, GateActor, SystemActor } from '@/lib/infra/context';
+import { env } from '@/lib/infra/env';
+import { log } from '@/lib/infra/log';
+import { findGateActor } from '@/lib/gate/access';
+import { hashSecret } from '@/lib/infra/secrets';
+import { requestContext, systemContext } from './context';
+import { fieldErrorsOf, statusOf } from './problems';
+import type { ActorFor, Requires } from './requires';
+
+/** Who a route handler answers: as an action does, or a `gate` phone by its key, or a `machine` that proves itself. */
+export type RouteRequires = Requires | 'gate' | 'machine';
+type RouteActor<R extends RouteRequires> = R extends 'gate' ? GateActor : R extends 'machine' ? SystemActor : R extends Requires ? ActorFor<R> : never;
+
+type Asked<R extends RouteRequires, S> = { ctx: Ctx<RouteActor<R>>; input: S; params: Record<string, string>; request: NextRequest; body: string };
+
+/** What a route is made of. `name` is its pattern, for the log; `input` parses the JSON body, or the query of a GET. */
+export type RouteParts<R extends RouteRequires, S extends z.ZodType> = {
+  name: string;
+  requires: R;
+  input?: S;
+  maxBytes?: number;
+  raw?: boolean; // the body is handed over as text, for signatures
+  run: (asked: Asked<R, z.output<S>>) => Promise<Response | object>;
+};
+
+const privately = { 'Cache-Control': 'private, no-store' };
+const say = (status: number, body: object) => NextResponse.json(body, { status, headers: privately });
+
+/** Builds a route handler, the one way there is: origin, size, actor, schema, command, status. */
+export function route<R extends RouteRequires, S extends z.ZodType = z.ZodType<undefined>>(parts: RouteParts<R, S>) {
+  return async function handle(request: NextRequest, segment: { params: Promise<Record<string, string>> }): Promise<Response> {
+    try {
+      const asked = await readRequest(parts, request, await segment.params);
+      if (asked instanceof Response) return asked;
+      const answer = await parts.run(asked);
+      return answer instanceof Response ? answer : NextResponse.json(answer, { headers: privately });
+    } catch (error) {
+      unstable_rethrow(error);
+      if (error instanceof Refusal) return say(statusOf(error.code), { refused: error.code, message: error.sentence, fields: error.detail.fields ?? {} });
+      log.error('route failed', error, { route: parts.name });
+      return say(500, { message: 'That did not work, and nothing was changed. Try again in a moment.' });
+    }
+  };
+}
+
+async function readRequest<R extends RouteRequires, S extends z.ZodType>(parts: RouteParts<R, S>, request: NextRequest, params: Record<string, string>) {
+  const writes = request.method !== 'GET' && request.method !== 'HEAD';
+  if (writes && parts.requires !== 'machine' && parts.requires !== 'gate' && !isSameOrigin(request)) throw new Refusal('wrong_origin');
+  const limit = parts.maxBytes ?? 64 * 1024;
+  if (Number(request.headers.get('content-length') ?? 0) > limit) return say(413, { message: 'That is more than this address takes.' });
+  const body = writes ? await request.text() : '';
+  if (Buffer.byteLength(body) > limit) return say(413, { message: 'That is more than this address takes.' });
+  const ctx = (await contextFor(parts.requires, request, params)) as Ctx<RouteActor<R>>; // contextFor answers with the actor that R asks for
+  if (!parts.input) return { ctx, input: undefined as z.output<S>, params, request, body }; // no schema: nothing is read
+  const plain = writes && parts.raw !== true ? parseJson(body) : Object.fromEntries(request.nextUrl.searchParams);
+  if (plain === BROKEN) return say(400, { message: 'That is not JSON.' });
+  const parsed = parts.input.safeParse(plain);
+  if (!parsed.success) return say(400, { message: 'Some of that is not right.', fields: fieldErrorsOf(parsed.error) });
+  return { ctx, input: parsed.data, params, request, body };
+}
+
+const BROKEN = Symbol('broken JSON');
+function parseJson(body: string): unknown {
+  try {
+    return JSON.parse(body);
+  } catch {
+    return BROKEN;
+  }
+}
+
+async function contextFor(requires: RouteRequires, request: NextRequest, params: Record<string, string>): Promise<Ctx> {
+  if (requires === 'machine') return systemContext('handler');
+  if (requires !== 'gate') return requestContext(requires, params['code'] === undefined ? {} : { code: params['code'] });
+  const system = await systemContext('gate');
+  const key = /^Bearer (.{40,100})$/.exec(request.headers.get('authorization') ?? '')?.[1];
+  if (key === undefined) throw new Refusal('pass_unknown');
+  return { ...system, actor: await findGateActor(system.db, hashSecret(key), system.now) };
+}
+
+/** Whether a writing request comes from our own pages (Origin, which browsers always send with it). */
+export function isSameOrigin(request: NextRequest): boolean {
+  const origin = request.headers.get('origin');
+  return origin !== null && (origin === new URL(env().SITE_URL).origin || origin === `${request.nextUrl.protocol}//${request.headers.get('host')}`);
+}
