@@ -4,20 +4,20 @@ import { box, disc, f, line, shape, times, type Cuts } from './cut';
 export const JOKE_NAMES = ['boot', 'robin', 'can', 'hand', 'cat', 'snail', 'mug', 'trowel', 'hedgehog', 'pot', 'apple', 'ball'] as const;
 export type JokeName = (typeof JOKE_NAMES)[number];
 
-/** What a joke is called in a sentence, and the room it takes in centimetres. */
-export const JOKE_FACTS: Readonly<Record<JokeName, { readonly words: string; readonly width: number; readonly height: number }>> = {
-  boot: { words: 'boot', width: 30, height: 31 },
-  robin: { words: 'robin', width: 22, height: 15 },
-  can: { words: 'watering can', width: 46, height: 29 },
-  hand: { words: 'child’s hand', width: 37, height: 17 },
-  cat: { words: 'cat', width: 27, height: 30 },
-  snail: { words: 'snail', width: 6, height: 5 },
-  mug: { words: 'mug of tea', width: 12, height: 15 },
-  trowel: { words: 'trowel', width: 8, height: 31 },
-  hedgehog: { words: 'hedgehog', width: 28, height: 13 },
-  pot: { words: 'flowerpot', width: 17, height: 36 },
-  apple: { words: 'apple', width: 10, height: 9 },
-  ball: { words: 'ball', width: 16, height: 16 },
+/** What a joke is called in a sentence, and how far it reaches from its own nought, in centimetres. */
+export const JOKE_FACTS: Readonly<Record<JokeName, { readonly words: string; readonly left: number; readonly right: number; readonly height: number }>> = {
+  boot: { words: 'boot', left: 0, right: 30, height: 31 },
+  robin: { words: 'robin', left: 0, right: 22, height: 15 },
+  can: { words: 'watering can', left: -8, right: 39, height: 29 },
+  hand: { words: 'child’s hand', left: -11, right: 26, height: 17 },
+  cat: { words: 'cat', left: -1, right: 28, height: 30 },
+  snail: { words: 'snail', left: 0, right: 6, height: 5 },
+  mug: { words: 'mug of tea', left: -0.5, right: 12, height: 15 },
+  trowel: { words: 'trowel', left: -4, right: 4, height: 31 },
+  hedgehog: { words: 'hedgehog', left: 0, right: 27, height: 13 },
+  pot: { words: 'flowerpot', left: -1, right: 16, height: 36 },
+  apple: { words: 'apple', left: -1, right: 9, height: 9 },
+  ball: { words: 'ball', left: 0, right: 16, height: 16 },
 };
 
 const drawn: Record<JokeName, () => Cuts> = {
