@@ -6,20 +6,24 @@
 /** A visit as the arithmetic sees it: the stop's row on the board, the start in whole minutes since the epoch, the usual stay. */
 export type Sitting = { row: number; opens: number; stayMinutes: number };
 
-/** Minutes from one stop's area to another's, by board rows; multiples of 5, the same both ways. */
+/** Minutes from one stop's area to another's, by board rows; multiples of 5. */
 export type MinutesTable = readonly (readonly number[])[];
+export type MinutesFact = { fromGardenId: string; toGardenId: string; minutes: number };
 
 /** Why one time cannot be had beside another that the party has chosen. `other` is the chosen one. */
 export type Clash =
   | { kind: 'there'; other: Sitting }
   | { kind: 'late'; way: 'from' | 'to'; other: Sitting; minutes: number; lateMinutes: number };
 
-/** Minutes between two rows of the board; a pair that nobody has measured counts as far as the farthest of that row. */
-export function minutesFor(table: MinutesTable, from: number, to: number): number {
-  if (from === to) return 0;
-  const row = table[from] ?? [];
-  return row[to] ?? Math.max(0, ...row.filter((minutes) => Number.isFinite(minutes)));
+/** The table of minutes between gardens in board order. A pair that nobody has measured counts as far as the farthest known one. */
+export function minutesTable(gardenIds: readonly string[], facts: readonly MinutesFact[]): number[][] {
+  const known = new Map(facts.map((fact) => [`${fact.fromGardenId} ${fact.toGardenId}`, fact.minutes]));
+  const farthest = Math.max(0, ...facts.map((fact) => fact.minutes));
+  return gardenIds.map((from) => gardenIds.map((to) => (from === to ? 0 : known.get(`${from} ${to}`) ?? farthest)));
 }
+
+/** Minutes between two rows of the board; nought within one garden. */
+export const minutesFor = (table: MinutesTable, from: number, to: number): number => (from === to ? 0 : table[from]?.[to] ?? 0);
 
 /** Why `wanted` cannot be had beside `chosen`, or null when both can be made in the order of their starts. */
 export function clashBetween(wanted: Sitting, chosen: Sitting, table: MinutesTable): Clash | null {

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { clashBetween, clashWith, firstClash, minutesFor, reasonForRun, reasonInFull, reasonInShort, type Sitting } from '@/lib/opendays/rules/reach';
+import { clashBetween, clashWith, firstClash, minutesTable, reasonForRun, reasonInFull, reasonInShort, type Sitting } from '@/lib/opendays/rules/reach';
 
 // The rule is LOOK's: start + stay + area minutes ≤ the later start. No published source: it is the club's own definition,
 // checked here against a brute-force walk through the day, minute by minute.
@@ -69,9 +69,11 @@ describe('reasons as sentences', () => {
   });
 });
 
-test('a pair of areas nobody has measured counts as far as the farthest of that row', () => {
-  expect(minutesFor([[0, 20], []], 0, 2)).toBe(20);
-  expect(minutesFor([], 0, 1)).toBe(0);
+test('a pair of gardens nobody has measured counts as far as the farthest known one, so that no plan depends on it', () => {
+  const facts = [{ fromGardenId: 'a', toGardenId: 'b', minutes: 20 }, { fromGardenId: 'b', toGardenId: 'a', minutes: 20 }, { fromGardenId: 'a', toGardenId: 'c', minutes: 5 }];
+
+  expect(minutesTable(['a', 'b', 'c'], facts)).toEqual([[0, 20, 5], [20, 0, 20], [20, 20, 0]]);
+  expect(minutesTable(['a', 'b'], [])).toEqual([[0, 0], [0, 0]]);
 });
 
 // Brute force: a party walks through the day minute by minute. It may be at one place only, on the road or in a garden.
