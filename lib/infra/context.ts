@@ -50,7 +50,15 @@ export type SystemActor = { kind: 'system'; name: string };
 export type Actor = Stranger | AccountActor | HolderActor | BookingActor | GateActor | SystemActor;
 
 /** What every query and command is given: where to ask, who asks, when, and for which club. */
-export type Ctx<A extends Actor = Actor> = { db: Db | Tx; actor: A; now: Date; club: ClubSettings; requestId: string };
+export type Ctx<A extends Actor = Actor> = {
+  db: Db | Tx;
+  actor: A;
+  now: Date;
+  club: ClubSettings;
+  requestId: string;
+  /** A hash of the client's address for rate limits, from the trusted proxies; null when there is none. */
+  client: string | null;
+};
 
 /** A context of a signed-in member of a household. */
 export type MemberActor = AccountActor & { householdId: Id<'household'> };

@@ -10,6 +10,7 @@ import { Refusal } from '@/lib/core/refusal';
 import { readClock } from '@/lib/infra/clock';
 import type { Actor, BookingActor, Ctx, HolderActor, SystemActor } from '@/lib/infra/context';
 import { env } from '@/lib/infra/env';
+import { hashSecret } from '@/lib/infra/secrets';
 import { findAccountActor } from '@/lib/people/queries';
 import { may, type Capability } from '@/lib/people/rules/capabilities';
 import { currentSignIn } from './auth';
@@ -19,7 +20,9 @@ import type { ActorFor, Requires } from './requires';
 const base = cache(async () => {
   const db = getDb();
   const incoming = await headers();
-  return { db, club: await getClub(db), now: readClock(), requestId: incoming.get('x-request-id') ?? randomUUID() };
+  const address = await clientAddress();
+  const client = address === null ? null : hashSecret(address).slice(0, 22);
+  return { db, club: await getClub(db), now: readClock(), requestId: incoming.get('x-request-id') ?? randomUUID(), client };
 });
 
 const account = cache(async () => {
@@ -94,11 +97,11 @@ export async function pageContext<R extends Requires>(requires: R, options: { co
 /** The context of a machine: a webhook, a job, a script. Machines have no role. */
 export async function systemContext(name: string): Promise<Ctx<SystemActor>> {
   const db = getDb();
-  return { db, club: await getClub(db), now: readClock(), requestId: randomUUID(), actor: { kind: 'system', name } };
+  return { db, club: await getClub(db), now: readClock(), requestId: randomUUID(), client: null, actor: { kind: 'system', name } };
 }
 
 /** The client's address, taken from the set number of trusted proxies and no further; null when there is none. */
-export async function clientAddress(): Promise<string | null> {
+async function clientAddress(): Promise<string | null> {
   const hops = env().TRUSTED_PROXY_HOPS;
   if (hops === 0) return null;
   const chain = ((await headers()).get('x-forwarded-for') ?? '').split(',').map((part) => part.trim()).filter(Boolean);
