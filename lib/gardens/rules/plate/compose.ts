@@ -36,6 +36,10 @@ function trainFor({ notes, powers, scaleOneTo }: PlateParticulars, dice: Dice): 
   }
 }
 
+/** A train with wagons left in the yard until it fits, so that trees have a place behind it; three vehicles always stay. */
+const shortened = (train: readonly StockName[], metres: number): readonly StockName[] =>
+  train.length > 3 && trainLengthMeters(train) > metres ? shortened(train.slice(0, -1), metres) : train;
+
 /** Where the bridge stands, right-running: its two ends, or nothing. */
 function gapFor(bridge: PlateParticulars['bridge'], nose: number, dice: Dice): readonly [number, number] | null {
   const sway = dice.between(-3, 3);
@@ -79,13 +83,14 @@ export function compose(garden: PlateParticulars): Block {
   const seed = seedOf(garden.slug);
   const dice = diceFrom(seed);
   const centimetresAMetre = 100 / garden.scaleOneTo;
-  const train = trainFor(garden, dice);
-  const steaming = garden.powers[0] === 'live-steam' && (train[0] === 'tank' || train[0] === 'saddle');
+  const asked = trainFor(garden, dice);
+  const steaming = garden.powers[0] === 'live-steam' && (asked[0] === 'tank' || asked[0] === 'saddle');
   const rail = railHeight(garden.bridge, centimetresAMetre, steaming, dice);
   const plants = garden.plants.map((plant) => ({ form: formOf(plant), heightCm: plant.heightMm / 10 }));
   const trees = plants.flatMap(({ form, heightCm }) => (isTree(form) ? [{ form, heightCm }] : []));
+  const nose = Math.round(trees.length > 0 ? dice.between(74, 84) : dice.between(80, 98));
+  const train = trees.length > 0 ? shortened(asked, (nose - 24) / centimetresAMetre) : asked;
   const length = trainLengthMeters(train) * centimetresAMetre;
-  const nose = Math.round(Math.max(Math.min(length + 10, 62), dice.between(...(trees.length > 0 ? [74, 84] as const : [80, 98] as const))));
   const gap = gapFor(garden.bridge, nose, dice);
   const water = waterOf(garden.water, garden.bridge);
   const joke = jokeFor(garden.notes.joke, HEIGHT - rail - 3, dice);

@@ -5,7 +5,7 @@ export type Grow = (x: number, foot: number, height: number, dice: Dice) => Cuts
 
 const spruce: Grow = (x, y, h, dice) => {
   const width = h * 0.27;
-  const layers = Math.round(h / 3.6);
+  const layers = Math.max(3, Math.round(h / 3.6));
   const left: string[] = [];
   const right: string[] = [];
   let needles = '';
