@@ -6,7 +6,7 @@ import { Refusal } from '@/lib/core/refusal';
 import type { Ctx } from '@/lib/infra/context';
 import { log } from '@/lib/infra/log';
 import { requestContext } from './context';
-import { readForm, typedValues } from './form-data';
+import { readForm, typedValues } from '@/lib/core/form-data';
 import { fieldErrorsOf } from './problems';
 import type { ActorFor, Requires } from './requires';
 
