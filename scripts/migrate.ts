@@ -1,6 +1,5 @@
 // Brings a database up to date, an empty one included; run it before every start (`npm run db:migrate`). It needs
 // MIGRATE_DATABASE_URL (the owner) and QUEUE_DATABASE_URL (the job queue's role), prepared by scripts/setup/*.sql.
-import { existsSync } from 'node:fs';
 import { fileURLToPath, pathToFileURL } from 'node:url';
 import { drizzle } from 'drizzle-orm/node-postgres';
 import { migrate } from 'drizzle-orm/node-postgres/migrator';
@@ -22,7 +21,7 @@ export async function migrateAll({ ownerUrl, queueUrl }: Urls): Promise<void> {
 async function migrateTables(ownerUrl: string) {
   await withPool(ownerUrl, async (pool) => {
     await pool.query(APP_RIGHTS); // before the tables: a migration that takes a right away has the last word
-    if (existsSync(`${MIGRATIONS}/meta/_journal.json`)) await migrate(drizzle({ client: pool }), { migrationsFolder: MIGRATIONS });
+    await migrate(drizzle({ client: pool }), { migrationsFolder: MIGRATIONS });
   });
 }
 
