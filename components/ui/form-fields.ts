@@ -1,6 +1,6 @@
 'use client';
 
-import { createContext, useContext, useId, type ChangeEventHandler, type FocusEventHandler, type RefCallback } from 'react';
+import { createContext, useContext, useEffect, useId, type ChangeEventHandler, type FocusEventHandler, type RefCallback } from 'react';
 
 type Registration = {
   ref?: RefCallback<HTMLInputElement | HTMLSelectElement | HTMLTextAreaElement>;
@@ -15,6 +15,8 @@ export type FormFields = {
   /** What was typed or given; undefined when the form does not know the field, so its own default counts. */
   valueOf: (name: string) => string | string[] | undefined;
   register: (name: string) => Registration;
+  /** A field says that it is on screen; the answer says that it has gone. */
+  enter: (name: string) => () => void;
 };
 
 export const FormFieldsContext = createContext<FormFields | null>(null);
@@ -25,6 +27,8 @@ export type FieldWiring = { id: string; errors: readonly string[]; value: string
 export function useField(name: string, ownErrors: readonly string[] = []): FieldWiring {
   const form = useContext(FormFieldsContext);
   const ownId = useId();
+  const enter = form?.enter;
+  useEffect(() => enter?.(name), [enter, name]);
   if (form === null) return { id: ownId, errors: ownErrors, value: undefined, registration: {} };
   return { id: form.idOf(name), errors: [...ownErrors, ...form.errorsOf(name)], value: form.valueOf(name), registration: form.register(name) };
 }
