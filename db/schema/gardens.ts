@@ -1,11 +1,9 @@
 import { sql } from 'drizzle-orm';
 import { boolean, check, doublePrecision, index, integer, jsonb, numeric, pgTable, primaryKey, smallint, text } from 'drizzle-orm/pg-core';
+import { POWERS, BRIDGES, WATERS } from '../../lib/core/words'; // relative: the migration tool knows no aliases
 import { idOf, instant, ownId } from './columns';
 import { households } from './people';
 
-export const POWERS = ['live-steam', 'battery', 'track', 'overhead', 'clockwork'] as const;
-export const BRIDGES = ['none', 'trestle', 'viaduct', 'girder', 'truss', 'pier'] as const;
-export const WATERS = ['none', 'brook', 'pond', 'pool', 'lagoon'] as const;
 
 /** What the plate needs beyond the particulars; everything has a default drawn from the garden's own id. */
 export type PlateNotes = { stock?: string[]; joke?: string; sky?: string };

@@ -1,11 +1,11 @@
 import { sql } from 'drizzle-orm';
 import { type AnyPgColumn, check, index, integer, pgTable, smallint, text, uniqueIndex } from 'drizzle-orm/pg-core';
+import { FACT_KINDS } from '../../lib/core/words'; // relative: the migration tool knows no aliases
 import { idOf, instant } from './columns';
 import { visits } from './bookings';
 import { openDays, stops } from './opendays';
 import { gateDevices, gatePasses } from './people';
 
-export const FACT_KINDS = ['admit', 'refuse', 'count-out', 'walk-up', 'undo'] as const;
 
 /** What a phone did at a gate. Append-only, with ids made on the phone; what it means is a fold of these. */
 export const gateFacts = pgTable('gate_facts', {

@@ -1,10 +1,10 @@
 import { sql } from 'drizzle-orm';
 import { check, date, index, integer, pgTable, primaryKey, smallint, text, unique, uniqueIndex } from 'drizzle-orm/pg-core';
+import { PERSON_KINDS } from '../../lib/core/words'; // relative: the migration tool knows no aliases
 import { idOf, instant, ownId } from './columns';
 import { gardens } from './gardens';
 import { accounts } from './people';
 
-export const PERSON_KINDS = ['adult', 'child', 'babe'] as const;
 
 export const openDays = pgTable('open_days', {
   id: ownId<'openDay'>(),

@@ -1,5 +1,5 @@
 import type { Db, Tx } from '@/db/client';
-import type { Role } from '@/db/schema/people';
+import type { Role } from '@/lib/core/words';
 import type { Id } from '@/lib/core/ids';
 
 /** The club's settings that nearly every command needs, read once a request. */

@@ -1,4 +1,4 @@
-import type { Role } from '@/db/schema/people';
+import type { Role } from '@/lib/core/words';
 
 /** What an officer's role lets its holder do. Nothing else does: deny by default. */
 const GRANTS = {
