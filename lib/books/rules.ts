@@ -1,8 +1,25 @@
 import { sumMinor } from '@/lib/core/money';
 
 /** The accounts that the rules below post to; the migrations make them. */
-export type AccountCode = 'bank' | 'cards-clearing' | 'cash-in-hand' | 'cheques-in-hand' | 'refunds-owed' | 'ticket-income' | 'dues-income' | 'card-fees';
-export type FundKey = 'general' | 'open-days';
+export const ACCOUNTS = [
+  { code: 'bank', name: 'Bank', kind: 'asset' },
+  { code: 'cards-clearing', name: 'Card payments on their way to the bank', kind: 'asset' },
+  { code: 'cash-in-hand', name: 'Cash in hand', kind: 'asset' },
+  { code: 'cheques-in-hand', name: 'Cheques in hand', kind: 'asset' },
+  { code: 'refunds-owed', name: 'Money to give back', kind: 'liability' },
+  { code: 'ticket-income', name: 'Open-day tickets', kind: 'income' },
+  { code: 'dues-income', name: "Members' dues", kind: 'income' },
+  { code: 'card-fees', name: 'Card fees', kind: 'expense' },
+] as const;
+export type AccountCode = (typeof ACCOUNTS)[number]['code'];
+
+/** The funds that money lies in. */
+export const FUNDS = [
+  { key: 'general', name: 'General fund', position: 1 },
+  { key: 'open-days', name: 'Open days', position: 2 },
+] as const;
+export type FundKey = (typeof FUNDS)[number]['key'];
+
 /** How money comes in. */
 export type PayMethod = 'card' | 'cheque' | 'cash' | 'transfer';
 /** What it is for: tickets go to the open days' fund, dues to the general one. */
