@@ -67,7 +67,8 @@ export function Halts({ valley, sheet }: GroundProps) {
     const [x, y] = sheet.at(geometry.coordinates);
     return (
       <g key={properties.key} transform={`translate(${x.toFixed(1)} ${y.toFixed(1)}) rotate(-8)`}>
-        <path d="M6 5H32V11H6ZM16 -1" className="fill-ink stroke-paper" strokeWidth="1.5" paintOrder="stroke" />
+        <path d="M6 5H32V11H6Z" className="fill-ink stroke-paper" strokeWidth="1.5" paintOrder="stroke" />
+        <text x="5" y="-6" fontSize="15" className="fill-ink stroke-paper font-heading italic" strokeWidth="4.5" strokeLinejoin="round" paintOrder="stroke">the halt</text>
         <path d="M10 11V17M28 11V17M7 17H31" className="stroke-ink" strokeWidth="1.6" fill="none" />
       </g>
     );
@@ -91,12 +92,18 @@ export function Fields({ valley, sheet }: GroundProps) {
   });
 }
 
-/** The ridge: hachures falling from its crest. */
+/** The ridge: hachures falling from its crest, longer and shorter by turns. */
 export function Ridges({ valley, sheet }: GroundProps) {
   return featuresOf(valley, 'ridge').map(({ properties, geometry }) => {
     const crest = geometry.coordinates.map((place) => sheet.at(place));
-    const strokes = crest.map(([x, y], i) => `M${x.toFixed(1)} ${y.toFixed(1)}l${i % 2 === 0 ? -1.5 : 1} ${5 + ((i * 7) % 4)}`);
-    return <path key={properties.name} d={strokes.join('')} className="stroke-ink-soft" strokeWidth="1.4" strokeLinecap="round" fill="none" />;
+    const strokes = crest.flatMap(([x, y], i) => {
+      const [nextX, nextY] = crest[i + 1] ?? [x, y];
+      return [0, 0.25, 0.5, 0.75].map((share, k) => {
+        const [footX, footY] = [-1.4 + ((i + k) % 3), 5 + ((i * 5 + k * 3) % 7)];
+        return `M${(x + (nextX - x) * share).toFixed(1)} ${(y + (nextY - y) * share).toFixed(1)}l${footX.toFixed(1)} ${footY}`;
+      });
+    });
+    return <path key={properties.name} d={strokes.join('')} className="stroke-ink-soft" strokeWidth="1.1" strokeLinecap="round" fill="none" />;
   });
 }
 

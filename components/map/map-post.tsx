@@ -7,17 +7,16 @@ const TUFTS = [
   'M9 82q-3-5-8-5M13 82q1-9-2-13M17 82q1-7 7-10',
 ];
 
-/** A cast milepost with its number, standing with its foot at the origin, 54 by 84 before scaling. */
+/** A cast milepost with its number, in daylight inks because it always stands on pasteboard colour, standing with its foot at the origin, 54 by 84 before scaling. */
 export function MapPost({ number, height }: { readonly number: number; readonly height: number }) {
   const tuft = TUFTS[(number - 1) % TUFTS.length];
-  const outline = 'stroke-ink';
   return (
     <g transform={`scale(${height / 84}) translate(-27 -84)`} className={`card-${number}`} strokeWidth="2" strokeLinejoin="round">
-      <path d="M17 54L27 58V83L17 79.4Z" className={`fill-paper ${outline}`} />
-      <path d="M37 54L27 58V83L37 79.4Z" className={`fill-ink ${outline}`} />
-      <path d="M2 12L27 3 52 12 27 21Z" className={`fill-paper ${outline}`} />
-      <path d="M2 12L27 21V65L2 56Z" className={`fill-(--card) ${outline}`} />
-      <path d="M52 12L27 21V65L52 56Z" className={`fill-ink ${outline}`} />
+      <path d="M17 54L27 58V83L17 79.4Z" className="fill-sun-paper stroke-card-ink" />
+      <path d="M37 54L27 58V83L37 79.4Z" className="fill-card-ink stroke-card-ink" />
+      <path d="M2 12L27 3 52 12 27 21Z" className="fill-sun-paper stroke-card-ink" />
+      <path d="M2 12L27 21V65L2 56Z" className="fill-(--card) stroke-card-ink" />
+      <path d="M52 12L27 21V65L52 56Z" className="fill-card-ink stroke-card-ink" />
       <text transform="matrix(1 .36 0 1 14.5 48)" textAnchor="middle" className="fill-card-ink font-heading" fontWeight="800" fontSize={number > 9 ? 23 : 29} stroke="none">
         {number}
       </text>

@@ -78,7 +78,7 @@ export function ValleyMap({ valley, gardens, line = [] }: ValleyMapProps) {
         {visited.length > 1 && <VisitLine valley={valley} areas={visited} sheet={sheet} />}
         {named.map(({ area }) => <AreaName key={area.key} area={area} sheet={sheet} />)}
         <PlaceName x={16} y={sheet.at([0, 40.2108])[1]} name="the Alder" size={NAME_SIZE} anchor="start" />
-        <ScaleBar x={sheet.width - fiveMinutes - 26} y={sheet.height - 22} length={Math.round(fiveMinutes)} />
+        <ScaleBar x={sheet.width - fiveMinutes - 22} y={sheet.height - 36} length={Math.round(fiveMinutes)} />
       </g>
       {posts.map((post) => <PostLink key={post.number} {...post} />)}
       <DoubleFrame width={sheet.width} height={sheet.height} />
@@ -88,5 +88,6 @@ export function ValleyMap({ valley, gardens, line = [] }: ValleyMapProps) {
 
 function AreaName({ area, sheet }: { readonly area: Neighbourhood; readonly sheet: Sheet }) {
   const [x, y] = sheet.at(area.labelPoint);
-  return <PlaceName x={x} y={y + 29} name={area.name} size={NAME_SIZE} />;
+  const easts = area.ring.map((place) => sheet.at(place)[0]);
+  return <PlaceName x={x} y={y + 29} name={area.name} size={NAME_SIZE} within={Math.min((Math.max(...easts) - Math.min(...easts)) * 1.12, (sheet.width - x) * 2 - 24)} />;
 }
