@@ -1,6 +1,5 @@
 import { getDb } from '@/db/client';
 import { club } from '@/db/schema/club';
-import { accountsOfBooks, funds } from '@/db/schema/books';
 import { membershipClasses, classDues } from '@/db/schema/dues';
 import { gardenAreas, gardenPlaces, gardens } from '@/db/schema/gardens';
 import { areaMinutes, entryTimes, openDays, prices, stops } from '@/db/schema/opendays';
@@ -19,7 +18,7 @@ export const MAY_15 = { heldOn: '2027-05-15', opensAt: new Date('2027-05-15T14:0
 /** 10:00 on the open day plus some minutes. */
 export const onTheDay = (minutes: number): Date => addMinutes(MAY_15.opensAt, minutes);
 
-/** The club's one row with its books and membership classes; call it once a test file, before anything else. */
+/** The club's one row with its membership classes; call it once a test file, before anything else. */
 export async function aClub(changes: Partial<typeof club.$inferInsert> = {}): Promise<void> {
   const db = getDb();
   await db.insert(club).values({
@@ -36,9 +35,6 @@ export async function aClub(changes: Partial<typeof club.$inferInsert> = {}): Pr
     { classKey: 'single', fromOn: '2020-01-01', amountMinor: 4800 },
     { classKey: 'household', fromOn: '2020-01-01', amountMinor: 6200 },
   ]).onConflictDoNothing();
-  const { ACCOUNTS, FUNDS } = await import('@/lib/books/rules'); // the books' own lists, so that no test keeps a second one
-  await db.insert(accountsOfBooks).values([...ACCOUNTS]).onConflictDoNothing();
-  await db.insert(funds).values([...FUNDS]).onConflictDoNothing();
 }
 
 let members = 0;
