@@ -1,0 +1,71 @@
+import 'server-only';
+import { and, desc, eq, isNull, sql } from 'drizzle-orm';
+import type { Queryable } from '@/db/client';
+import { paymentAttempts, payments } from '@/db/schema/books';
+import { charges, membershipClasses, terms } from '@/db/schema/dues';
+import { households } from '@/db/schema/people';
+import type { Id } from '@/lib/core/ids';
+import { firstOrNull } from '@/lib/core/only';
+import { Refusal } from '@/lib/core/refusal';
+import { dayOf } from '@/lib/core/time';
+import type { Ctx, MemberCtx } from '@/lib/infra/context';
+import { standingOf } from './rules/standing';
+import { receiptNumber, type ChargeView, type DuesView, type ReceiptView } from './views';
+
+/** The last day that a household's terms pay for. */
+export const termEnd = sql<string | null>`(select max(upper(${terms.during}) - 1)::text from ${terms} where ${terms.householdId} = ${households.id})`;
+/** What a household owes over all its charges, less what has come. */
+export const owedMinor = sql<number>`(select coalesce(sum(c.amount_minor - coalesce((select sum(p.amount_minor) from ${payments} p where p.charge_id = c.id), 0)), 0)::int
+  from ${charges} c where c.household_id = ${households.id} and c.waived_at is null)`;
+/** The class of a household's latest term, or of its latest charge. */
+export const classKey = sql<string | null>`coalesce((select t.class_key from ${terms} t where t.household_id = ${households.id} order by upper(t.during) desc limit 1),
+  (select c.class_key from ${charges} c where c.household_id = ${households.id} order by c.term_to desc limit 1))`;
+
+/** The acting household's dues: standing, charges newest first, receipts. */
+export async function memberDues(ctx: MemberCtx): Promise<DuesView> {
+  return householdDues(ctx, ctx.actor.householdId);
+}
+
+/** One household's dues, for an officer or for itself. Three queries. */
+export async function householdDues({ db, now, club }: Ctx, householdId: Id<'household'>): Promise<DuesView> {
+  const facts = firstOrNull(await db.select({
+    joinedOn: households.joinedOn, leftOn: households.leftOn, termEnd, owedMinor, isForLife: sql<boolean>`coalesce(${membershipClasses.isForLife}, false)`,
+  }).from(households).leftJoin(membershipClasses, sql`${membershipClasses.key} = ${classKey}`).where(eq(households.id, householdId)));
+  if (!facts) throw new Refusal('not_found');
+  const standing = standingOf(facts, dayOf(now, club.timeZone), club.duesKeptOnDays);
+  return { standing, charges: await chargesOf(db, householdId), receipts: await receiptsOf(db, householdId) };
+}
+
+async function chargesOf(db: Queryable, householdId: Id<'household'>): Promise<ChargeView[]> {
+  return db.select({
+    id: charges.id, className: membershipClasses.name, termFrom: charges.termFrom, termTo: charges.termTo, amountMinor: charges.amountMinor, dueOn: charges.dueOn,
+    paidMinor: sql<number>`coalesce((select sum(p.amount_minor) from ${payments} p where p.charge_id = ${charges.id}), 0)::int`,
+    isPaying: sql<boolean>`exists (select from ${paymentAttempts} a where a.charge_id = ${charges.id} and a.ended_at is null)`,
+  })
+    .from(charges).innerJoin(membershipClasses, eq(membershipClasses.key, charges.classKey))
+    .where(and(eq(charges.householdId, householdId), isNull(charges.waivedAt))).orderBy(desc(charges.termFrom)).limit(30);
+}
+
+async function receiptsOf(db: Queryable, householdId: Id<'household'>): Promise<ReceiptView[]> {
+  const rows = await db.select({
+    id: payments.id, year: payments.receiptYear, number: payments.receiptNumber, method: payments.method, amountMinor: payments.amountMinor, receivedOn: payments.receivedOn, termTo: charges.termTo,
+  })
+    .from(payments).leftJoin(charges, eq(charges.id, payments.chargeId))
+    .where(eq(payments.householdId, householdId)).orderBy(desc(payments.receivedOn), desc(payments.receiptNumber)).limit(50);
+  return rows.map(({ year, number, ...row }) => ({ ...row, number: receiptNumber(year, number) }));
+}
+
+/** One receipt of a household, with what it was for; null when it is not theirs. */
+export async function findReceipt({ db, actor }: MemberCtx, paymentId: Id<'payment'>) {
+  const rows = await db.select({
+    id: payments.id, year: payments.receiptYear, number: payments.receiptNumber, method: payments.method, amountMinor: payments.amountMinor, currency: payments.currency,
+    receivedOn: payments.receivedOn, reference: payments.reference, className: membershipClasses.name, termFrom: charges.termFrom, termTo: charges.termTo, household: households.name, memberNumber: households.memberNumber,
+  })
+    .from(payments)
+    .innerJoin(charges, eq(charges.id, payments.chargeId))
+    .innerJoin(membershipClasses, eq(membershipClasses.key, charges.classKey))
+    .innerJoin(households, eq(households.id, charges.householdId))
+    .where(and(eq(payments.id, paymentId), eq(charges.householdId, actor.householdId))).limit(1);
+  const row = firstOrNull(rows);
+  return row === null ? null : { ...row, number: receiptNumber(row.year, row.number) };
+}
