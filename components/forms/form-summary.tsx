@@ -55,9 +55,9 @@ function Sentences({ problems, known, idOf }: { problems: Problems; known: strin
 
 /* Straight into the box: the first of its name, which may be one of several that share it. */
 function goToField(event: MouseEvent<HTMLAnchorElement>, name: string) {
-  const form = event.currentTarget.closest('form');
-  const field = form?.querySelector<HTMLElement>(`[name="${CSS.escape(name)}"], [name="${CSS.escape(`${name}[]`)}"]`);
-  if (field === null || field === undefined) return;
+  const controls = [...(event.currentTarget.closest('form')?.elements ?? [])];
+  const field = controls.find((each) => plainName(each.getAttribute('name') ?? '') === name);
+  if (!(field instanceof HTMLElement)) return;
   event.preventDefault();
   field.focus();
 }
