@@ -18,9 +18,12 @@ export const deviceKey = z.string().regex(/^[A-Za-z0-9_-]{43}$/, { error: 'That 
 export const exchangePassInput = z.object({ secret: z.string().min(8).max(100), deviceKey });
 export type ExchangePassInput = z.output<typeof exchangePassInput>;
 
+/** Which of the pass's phones this is. */
+export const deviceNumber = z.object({ number: z.number().int() });
+
 /** One fact as a phone sends it. A refusal and an admission name a visit; an undo names what it takes back. */
 export const sentFact = z
-  .object({ id: idField<'gateFact'>(), kind: z.enum(GATE_KINDS), undoesId: idField<'gateFact'>().nullable(), visitId: idField<'visit'>().nullable(), ...people, at: instant, reason })
+  .object({ id: idField<'gateFact'>(), kind: z.enum(GATE_KINDS), undoesId: idField<'gateFact'>().nullable(), visitId: idField<'visit'>().nullable(), ...people, at: instant, verdict: z.string().max(40).nullable(), reason })
   .refine((fact) => (fact.kind === 'undo') === (fact.undoesId !== null), { error: 'An undo names what it takes back, and nothing else does.' })
   .refine((fact) => fact.kind !== 'admit' || fact.visitId !== null, { error: 'An admission names its ticket.' })
   .refine((fact) => fact.kind === 'undo' || fact.kind === 'refuse' || fact.adults + fact.children + fact.babes > 0, { error: 'Say how many people.' });
@@ -62,14 +65,18 @@ export const gateList = z.object({
   }),
   garden: z.string(),
   dayName: z.string(),
-  address: z.string().nullable(),
   time: z.object({ timeZone: z.string(), locale: z.string(), hourCycle: z.enum(['h12', 'h23']) }),
   parties: z.array(listedParty),
+  /** What was done at this stop, by every phone; times set right by the server's clock. */
   facts: z.array(z.object({ id: z.string(), kind: z.enum(GATE_KINDS), undoesId: z.string().nullable(), visitId: z.string().nullable(), ...people, at: instant, deviceId: z.string(), reason: z.string().nullable() })),
+  /** The club's ticket keys: raw Ed25519 public keys (RFC 8032) in base64url. */
   keys: z.array(z.object({ keyId: z.number().int(), publicKey: z.string() })),
-  clubId: z.string(),
 });
 export type GateList = z.output<typeof gateList>;
+
+/** Where this garden is, for an ambulance. Each asking is a showing and is recorded. */
+export const gatePlace = z.object({ garden: z.string(), address: z.string(), directions: z.string().nullable(), lat: z.number(), lon: z.number() });
+export type GatePlace = z.output<typeof gatePlace>;
 
 /** The coordinator's wish for a gate pass. */
 export const makeGatePassInput = z.object({

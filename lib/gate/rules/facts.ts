@@ -1,5 +1,5 @@
 /** The kinds of fact a gate writes down. Each is kept for good; what they mean together is a fold. */
-export const GATE_KINDS = ['admit', 'refuse', 'undo', 'count_out', 'walk_up'] as const;
+export const GATE_KINDS = ['admit', 'refuse', 'undo', 'count-out', 'walk-up'] as const;
 export type GateKind = (typeof GATE_KINDS)[number];
 
 /** People of each kind. A count out names no kind: whoever came out is counted under adults. */

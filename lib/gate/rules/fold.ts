@@ -21,7 +21,9 @@ export type GateFold = {
   wentOut: number;
   /** The facts that stand, by id: not undone, each once. */
   standing: ReadonlyMap<string, GateFact>;
-  /** The facts the server turned down, by id. */
+  /** Ids of facts that were taken back. */
+  undone: ReadonlySet<string>;
+  /** Times a gate said no, and what the server turned down, by id. */
   refused: ReadonlyMap<string, GateFact>;
 };
 
@@ -38,9 +40,10 @@ export function foldFacts(facts: readonly GateFact[]): GateFold {
   const standing = known.filter(stands);
   return {
     visits: storiesOf(known, undone),
-    cameIn: standing.filter(({ kind }) => kind === 'admit' || kind === 'walk_up').reduce(addHeads, NO_HEADS),
-    wentOut: standing.filter(({ kind }) => kind === 'count_out').reduce((sum, fact) => sum + headCount(fact, 'counted'), 0),
+    cameIn: standing.filter(({ kind }) => kind === 'admit' || kind === 'walk-up').reduce(addHeads, NO_HEADS),
+    wentOut: standing.filter(({ kind }) => kind === 'count-out').reduce((sum, fact) => sum + headCount(fact, 'counted'), 0),
     standing: byId(standing),
+    undone,
     refused: byId(known.filter(({ kind }) => kind === 'refuse')),
   };
 }

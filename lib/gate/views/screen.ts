@@ -1,8 +1,8 @@
 import { dayOf, formatDay, formatTime, type ClubTime } from '@/lib/core/time';
 import { counted, inWordsFirst, listed } from '@/lib/opendays/rules/words';
-import { headCount, peopleCount, type BabesRule, type Heads } from './rules/facts';
-import { headsInGarden, storyOf, type GateFold } from './rules/fold';
-import type { GateHere, GateTicket, Verdict } from './rules/verdict';
+import { headCount, peopleCount, type BabesRule, type Heads } from '../rules/facts';
+import { headsInGarden, storyOf, type GateFold } from '../rules/fold';
+import type { GateHere, GateTicket, Verdict } from '../rules/verdict';
 
 /** The large short sentence on the gate. */
 export function sentenceOf(verdict: Verdict, hereNumber: number, club: ClubTime): string {
@@ -50,7 +50,7 @@ const minutesInWords = (minutes: number) => (minutes <= 120 ? counted(minutes, '
 export function explain(verdict: Verdict, story: { deviceId: string; club: ClubTime }): string {
   switch (verdict.kind) {
     case 'let_in':
-      return verdict.cameBefore ? `${inWordsFirst(peopleCount(verdict.cameBefore))} of the party came in before. Press the number.` : 'On time. Press the number.';
+      return verdict.cameBefore ? `${inWordsFirst(peopleCount(verdict.cameBefore))} of the party came in before. Press the number.` : 'Press the number.';
     case 'early':
       return `${peopleInWords(verdict.heads)}, ${minutesInWords(verdict.minutes)} early.`;
     case 'late':
@@ -91,3 +91,7 @@ export function dueNow(parties: readonly GateTicket[], fold: GateFold, babes: Ba
   const by = open.reduce<Date | null>((last, party) => (last === null || party.graceUntil > last ? party.graceUntil : last), null);
   return heads > 0 && by !== null ? { heads, by } : null;
 }
+
+/** The entry time of a ticket, with the end of its grace: "11:30, until 11:50". */
+export const whenInWords = (ticket: Pick<GateTicket, 'opensAt' | 'graceUntil'>, club: ClubTime): string =>
+  `${formatTime(ticket.opensAt, club)}, until ${formatTime(ticket.graceUntil, club)}`;

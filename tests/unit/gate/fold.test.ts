@@ -68,7 +68,7 @@ describe('the fold of gate facts', () => {
   });
 
   test('people counted out leave room, and a count out can be taken back', () => {
-    const out = fact({ kind: 'count_out', visitId: null, adults: 1, children: 0 });
+    const out = fact({ kind: 'count-out', visitId: null, adults: 1, children: 0 });
     const undo = fact({ kind: 'undo', undoesId: out.id, visitId: null });
 
     expect(headsInGarden(foldFacts([fact(), out]), 'counted')).toBe(2);
@@ -76,13 +76,13 @@ describe('the fold of gate facts', () => {
   });
 
   test('more people counted out than came in leave nobody in the garden, never fewer', () => {
-    const out = fact({ kind: 'count_out', visitId: null, adults: 5, children: 0 });
+    const out = fact({ kind: 'count-out', visitId: null, adults: 5, children: 0 });
 
     expect(headsInGarden(foldFacts([fact(), out]), 'counted')).toBe(0);
   });
 
   test('walk-ups are in the garden without a ticket', () => {
-    const walkUp = fact({ kind: 'walk_up', visitId: null, adults: 2, children: 2 });
+    const walkUp = fact({ kind: 'walk-up', visitId: null, adults: 2, children: 2 });
 
     const fold = foldFacts([walkUp]);
 

@@ -6,7 +6,7 @@ import { drawingOf, judge, pressesOf, type GateTicket } from '@/lib/gate/rules/v
 import { at, fact, here, ticket } from './cast';
 
 const nobodyYet = foldFacts([]);
-const crowd = (heads: number) => fact({ kind: 'walk_up', visitId: null, adults: heads, children: 0 });
+const crowd = (heads: number) => fact({ kind: 'walk-up', visitId: null, adults: heads, children: 0 });
 
 describe('the verdict at the gate, by the clock', () => {
   test.each([
@@ -100,7 +100,7 @@ describe('the verdict at the gate, by the crowd', () => {
   });
 
   test('one out makes room for one in', () => {
-    const out = fact({ kind: 'count_out', visitId: null, adults: 1, children: 0 });
+    const out = fact({ kind: 'count-out', visitId: null, adults: 1, children: 0 });
 
     expect(judge(ticket({ adults: 1, children: 0 }), here(), foldFacts([crowd(28)]), now)).toMatchObject({ kind: 'full', room: 0 });
     expect(judge(ticket({ adults: 1, children: 0 }), here(), foldFacts([crowd(28), out]), now).kind).toBe('let_in');

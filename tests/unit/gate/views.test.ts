@@ -1,11 +1,11 @@
 import { describe, expect, test } from 'vitest';
 import { foldFacts } from '@/lib/gate/rules/fold';
-import { crowdSentence, dueNow, explain, letInSentence, peopleInWords, sentenceOf } from '@/lib/gate/views';
+import { crowdSentence, dueNow, explain, letInSentence, peopleInWords, sentenceOf } from '@/lib/gate/views/screen';
 import type { Verdict } from '@/lib/gate/rules/verdict';
 import { at, club, fact, here, ticket } from './cast';
 
 const heads = { adults: 2, children: 1, babes: 0 };
-const inside = (count: number) => foldFacts(count === 0 ? [] : [fact({ kind: 'walk_up', visitId: null, adults: count, children: 0 })]);
+const inside = (count: number) => foldFacts(count === 0 ? [] : [fact({ kind: 'walk-up', visitId: null, adults: count, children: 0 })]);
 
 describe('the words on the gate', () => {
   test.each<[string, Verdict]>([
