@@ -1,0 +1,61 @@
+import 'server-only';
+import { randomBytes } from 'node:crypto';
+import { sql } from 'drizzle-orm';
+import type { Queryable } from '@/db/client';
+import { only } from '@/lib/core/only';
+import { Refusal, refuseIf } from '@/lib/core/refusal';
+import { asId, type Id } from '@/lib/core/ids';
+import type { Ctx, HolderActor } from '@/lib/infra/context';
+import { countTry } from '@/lib/infra/rate-limit';
+import { constraintOf, sqlStateOf } from '@/lib/infra/sql-state';
+import { clashSentence, holdRefusal, keptUntil, priced, type PricedVisit } from '../rules/hold';
+import { drawSpokenCode } from '../rules/spoken-code';
+import type { HoldInput } from '../schema';
+import { findWishFacts } from '../queries/entry-facts';
+
+/** A family at one address may try again and again; a script may not. */
+const HOLDS_FROM_ONE_PLACE = { tries: 60, minutes: 10 };
+
+/**
+ * Keeps all the wanted places for this browser, or none; returns the booking's id. Its earlier hold of the same open day
+ * is given back in the same transaction. Three round trips: the limiter, the facts, and one statement that locks the
+ * entry times in id order and decides.
+ */
+export async function holdPlaces(ctx: Ctx<HolderActor>, input: HoldInput): Promise<Id<'booking'>> {
+  const { db, club, now, actor } = ctx;
+  await countTry(db, `hold:${ctx.client ?? actor.holderHash}`, HOLDS_FROM_ONE_PLACE, now);
+  const facts = await findWishFacts(db, input.openDayId, input.wanted.map((wish) => wish.entryTimeId));
+  if (!facts) throw new Refusal('not_found');
+  refuseIf(holdRefusal(facts.day, facts.entries, input.wanted, club, now));
+  const clash = input.insists ? null : clashSentence(facts.entries, facts.minutes, club);
+  if (clash !== null) throw new Refusal('clash', { sentence: clash });
+  const { visits, totalMinor } = priced(input.wanted, facts.entries, club.babesTakePlace);
+  return decide(db, () => sql`select hold_places(${input.openDayId}::uuid, ${actor.holderHash}, ${actor.householdId}::uuid, ${drawSpokenCode(randomBytes)},
+    ${now.toISOString()}::timestamptz, ${keptUntil(now, club.holdMinutes).toISOString()}::timestamptz, ${input.insists}, ${totalMinor}::integer, ${club.currency},
+    ${wantedJson(visits)}::jsonb) as id`);
+}
+
+const wantedJson = (visits: readonly PricedVisit[]) => JSON.stringify(visits.map((visit) => ({
+  id: visit.entryTimeId, adults: visit.adults, children: visit.children, babes: visit.babes, heads: visit.heads,
+  adult: visit.adultMinor, child: visit.childMinor, babe: visit.babeMinor,
+})));
+
+const REFUSED_BY_DATABASE = new Map([['LH001', 'places_gone'], ['LH002', 'hold_paying']] as const);
+// deadlock_detected, serialization_failure, lock_not_available: somebody else went first (PostgreSQL manual, appendix A)
+const TRIED_AGAIN = new Set(['40P01', '40001', '55P03']);
+const DRAWN_AGAIN = new Set(['bookings_code_unique', 'bookings_one_hold_a_browser']); // the code is taken; another tab of this browser was first
+
+/** Runs the deciding statement, up to four times when it lost a race that a second try wins, and reads its refusals. */
+async function decide(db: Queryable, statement: () => ReturnType<typeof sql>): Promise<Id<'booking'>> {
+  for (let tries = 1; ; tries += 1) {
+    try {
+      return asId<'booking'>(only((await db.execute<{ id: string }>(statement())).rows).id);
+    } catch (error) {
+      const state = sqlStateOf(error) ?? '';
+      const refused = [...REFUSED_BY_DATABASE].find(([code]) => code === state);
+      if (refused) throw new Refusal(refused[1]);
+      const isWorthAnother = TRIED_AGAIN.has(state) || DRAWN_AGAIN.has(constraintOf(error) ?? '');
+      if (!isWorthAnother || tries === 4) throw error;
+    }
+  }
+}
