@@ -3,9 +3,15 @@ import { describe, expect, it } from 'vitest';
 import { drawSpokenCode, readSpokenCode, showSpokenCode } from '@/lib/bookings/rules/spoken-code';
 import { checkCharacter, hasGoodCheck } from '@/lib/core/check-character';
 
-const bytesOf = fc.uint8Array({ minLength: 7, maxLength: 7 });
 const LETTERS = '0123456789ABCDEFGHJKMNPQRSTVWXYZ';
 const bytesFor = (body: string) => Uint8Array.from(body, (letter) => LETTERS.indexOf(letter));
+
+/** A source of bytes that never repeats itself for long: a linear congruential generator's upper byte. */
+function bytesFrom(seed: number): (count: number) => Uint8Array {
+  let state = seed >>> 0;
+  const next = () => (state = (Math.imul(state, 1664525) + 1013904223) >>> 0) >>> 24;
+  return (count) => Uint8Array.from({ length: count }, next);
+}
 
 /** A body whose check character is the given one of the four that codes leave out. */
 function bodyWithCheck(check: string): string {
@@ -18,8 +24,8 @@ function bodyWithCheck(check: string): string {
 describe('drawing a spoken code', () => {
   it('gives eight characters with a good check character and none of I, L, O, U', () => {
     fc.assert(
-      fc.property(fc.infiniteStream(bytesOf), (draws) => {
-        const code = drawSpokenCode(() => draws.next().value);
+      fc.property(fc.nat(), (seed) => {
+        const code = drawSpokenCode(bytesFrom(seed));
 
         expect(code).toMatch(/^[0-9A-HJKMNP-TV-Z]{8}$/);
         expect(hasGoodCheck(code)).toBe(true);
@@ -28,17 +34,17 @@ describe('drawing a spoken code', () => {
   });
 
   it.each(['I', 'L', 'O', 'U'])('draws again when the check character would be %s', (letter) => {
-    const draws = [bytesFor(bodyWithCheck(letter)), bytesFor('7Q2MXK4')];
+    const draws = [bytesFor(bodyWithCheck(letter)), bytesFor('7Q2MXK5')];
 
     const code = drawSpokenCode(() => draws.shift() ?? new Uint8Array(7));
 
-    expect(code.slice(0, 7)).toBe('7Q2MXK4');
+    expect(code.slice(0, 7)).toBe('7Q2MXK5');
     expect(draws).toHaveLength(0);
   });
 });
 
 describe('reading a spoken code', () => {
-  const code = drawSpokenCode(() => bytesFor('7Q2MXK4'));
+  const code = drawSpokenCode(() => bytesFor('7Q2MXK5'));
 
   it('is shown as two groups of four', () => {
     expect(showSpokenCode('7Q2MXK4D')).toBe('7Q2M XK4D');
@@ -46,8 +52,8 @@ describe('reading a spoken code', () => {
 
   it('reads back any code however it is typed: small letters, spaces, hyphens, dots', () => {
     fc.assert(
-      fc.property(bytesOf, fc.constantFrom(' ', '-', '.', '', '  ', '\u2013', '\u00a0'), (bytes, gap) => {
-        const drawn = drawSpokenCode((count) => (count === 7 ? bytes.map((byte) => (byte & 31) % 29) : bytes));
+      fc.property(fc.nat(), fc.constantFrom(' ', '-', '.', '', '  ', '\u2013', '\u00a0'), (seed, gap) => {
+        const drawn = drawSpokenCode(bytesFrom(seed));
         const typed = ` ${drawn.slice(0, 3).toLowerCase()}${gap}${drawn.slice(3)} `;
 
         expect(readSpokenCode(typed)).toEqual({ code: drawn });
