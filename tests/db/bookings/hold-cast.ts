@@ -40,9 +40,13 @@ export async function liveHeadsAt(id: Id<'entryTime'>): Promise<number> {
   return only(rows).heads;
 }
 
-/** How many deadlocks PostgreSQL has broken in this test's own database. */
+/** How many deadlocks PostgreSQL has broken in this test's own database; every connection hands in its count first. */
 export async function deadlocksSoFar(): Promise<number> {
-  const { rows } = await getDb().execute<{ deadlocks: string }>(sql`select pg_stat_clear_snapshot(), deadlocks from pg_stat_database where datname = current_database()`);
+  const pool = getDb().$client;
+  const clients = await Promise.all(Array.from({ length: pool.options.max }, () => pool.connect()));
+  for (const client of clients) await client.query('select pg_stat_force_next_flush()');
+  for (const client of clients) client.release();
+  const { rows } = await pool.query<{ deadlocks: string }>('select deadlocks from pg_stat_database where datname = current_database()');
   return Number(rows[0]?.deadlocks ?? 0);
 }
 

@@ -2,6 +2,7 @@ import { eq } from 'drizzle-orm';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { getDb } from '@/db/client';
 import { bookings, visits } from '@/db/schema/bookings';
+import type { Id } from '@/lib/core/ids';
 import { aBrowser, aClub, anEntryTime, anOpenDay, aStop } from '../../support/cast';
 import { deadlocksSoFar, keep, liveHeadsAt, outcomes, takenAt } from './hold-cast';
 
@@ -21,7 +22,8 @@ describe('races for places', () => {
 
   it('serves 200 parties that want three times each, in orders of their own, without one deadlock', async () => {
     const day = await anOpenDay();
-    const times = await Promise.all([1, 2, 3].map(async (number) => anEntryTime(await aStop(day.id, number), { capacity: 150, atMinutes: number * 90 })));
+    const times: { id: Id<'entryTime'> }[] = [];
+    for (const number of [1, 2, 3]) times.push(await anEntryTime(await aStop(day.id, number), { capacity: 150, atMinutes: number * 90 }));
     const [a, b, c] = times.map((time) => time.id);
     if (!a || !b || !c) throw new Error('three times were made');
     const orders = [[a, b, c], [a, c, b], [b, a, c], [b, c, a], [c, a, b], [c, b, a]];
