@@ -1,4 +1,4 @@
-import { addMinutes, formatTime, type ClubTime } from '@/lib/core/time';
+import { addMinutes, formatTime, wallTime, type ClubTime } from '@/lib/core/time';
 import type { Id } from '@/lib/core/ids';
 import type { PersonPrices } from './rules/prices';
 import { minutesFor, minutesTable, type MinutesFact } from './rules/reach';
@@ -39,6 +39,7 @@ export type BoardView = {
   openDayId: Id<'openDay'>;
   stops: BoardStop[];
   columns: BoardColumn[];
+  hours: BoardColumn[]; // whole clock hours from the first start to the end of the last stay
   rows: (BoardCell | null)[][]; // by stop, then by column; null: no entry at that time
   minutes: number[][];
   prices: PersonPrices;
@@ -85,9 +86,6 @@ export type BoardClub = ClubTime & {
   holdMinutes: number;
 };
 
-/** The most times that stand across a sheet; with more, the board is set in strips at every width. */
-export const WIDEST_BOARD = 14;
-
 const minuteOf = (at: Date) => Math.round(at.getTime() / 60_000);
 
 function pricesOf(facts: PriceFacts[], stopId: Id<'stop'> | null): PersonPrices {
@@ -104,6 +102,18 @@ function notesOf(stop: StopFacts): NoteLetter[] {
 /** An entry time is half-open: [opensAt, graceUntil). Closed, or at a closed stop, it is over too. */
 export const isOver = (entry: Pick<EntryFacts, 'closedAt' | 'graceUntil'>, stopClosedAt: Date | null, now: Date): boolean =>
   entry.closedAt !== null || stopClosedAt !== null || now >= entry.graceUntil;
+
+/** The whole clock hours of a day, for the scale of the day graph. */
+function hoursOf(facts: BoardFacts, club: ClubTime): BoardColumn[] {
+  const starts = facts.entries.map((entry) => entry.opensAt.getTime());
+  if (starts.length === 0) return [];
+  const first = new Date(Math.min(...starts));
+  const last = addMinutes(new Date(Math.max(...starts)), Math.max(0, ...facts.stops.map((stop) => stop.stayMinutes)));
+  const toHour = (60 - Number(wallTime(first, club.timeZone).slice(3))) % 60;
+  const hours: BoardColumn[] = [];
+  for (let at = addMinutes(first, toHour); at <= last; at = addMinutes(at, 60)) hours.push({ opens: minuteOf(at), text: formatTime(at, club) });
+  return hours;
+}
 
 /** Sets the board of one open day: stops by number, columns the union of starts. */
 export function toBoard(facts: BoardFacts, club: BoardClub, now: Date): BoardView {
@@ -129,6 +139,7 @@ export function toBoard(facts: BoardFacts, club: BoardClub, now: Date): BoardVie
       minutesFromAbove: row === 0 ? null : minutesFor(minutes, row - 1, row),
     })),
     columns,
+    hours: hoursOf(facts, club),
     rows: stops.map((stop, row) => columns.map((column, index) => toCell(stop, row, column, index))),
     minutes,
     prices: pricesOf(facts.prices, null),

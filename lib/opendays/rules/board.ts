@@ -1,6 +1,6 @@
 import type { BoardCell, BoardStop, BoardView, PlacesLeft } from '../views';
 import type { Party } from './prices';
-import { clashWith, reasonForRun, reasonInFull, type Clash, type Naming, type Sitting } from './reach';
+import { clashWith, minutesFor, reasonForRun, reasonInFull, type Clash, type Naming, type Sitting } from './reach';
 import { counted } from './words';
 
 /** What one cell of the board is to one party, given what it has chosen. */
@@ -24,6 +24,27 @@ export function withPlaces(board: BoardView, { places }: PlacesLeft): BoardView 
     return cell === null || left === undefined ? cell : { ...cell, places: left ?? cell.places, isOver: left === null };
   };
   return { ...board, rows: board.rows.map((row) => row.map(refresh)) };
+}
+
+/** What a visitor may ask to see alone. */
+export type Only = { stepFree: boolean; steam: boolean };
+
+/** The board with only the gardens that fit, and those where the party has a time already. Rows are numbered anew. */
+export function onlyFitting(board: BoardView, only: Only, chosen: readonly string[]): BoardView {
+  const wanted = new Set(chosen);
+  const fits = ({ notes }: BoardStop) => (!only.stepFree || notes.includes('w')) && (!only.steam || notes.includes('s'));
+  const kept = board.stops.flatMap((stop, row) => (fits(stop) || board.rows[row]?.some((cell) => cell && wanted.has(cell.entryTimeId)) ? [row] : []));
+  if (kept.length === board.stops.length) return board;
+  return {
+    ...board,
+    stops: kept.flatMap((old, row) => {
+      const stop = board.stops[old];
+      const above = kept[row - 1];
+      return stop ? [{ ...stop, minutesFromAbove: above === undefined ? null : minutesFor(board.minutes, above, old) }] : [];
+    }),
+    rows: kept.map((old, row) => (board.rows[old] ?? []).map((cell) => (cell ? { ...cell, row } : null))),
+    minutes: kept.map((from) => kept.map((to) => minutesFor(board.minutes, from, to))),
+  };
 }
 
 /** The people of a party that count against places: babes only when the club says so. */
@@ -62,24 +83,32 @@ export function namingOf(board: BoardView): Naming {
   return { nameOf: (row) => board.stops[row]?.shortName ?? '', timeOf: (sitting) => texts.get(sitting.opens) ?? '' };
 }
 
-/** Neighbouring cells of one row that a narrow sheet sets as one line: barred for one reason, not open, over. */
+/** Neighbouring cells of one row that a narrow sheet sets as one line: barred by one visit, not open, over. */
 export type Run = { from: number; to: number; reason: string | null };
 
-function runKey(board: BoardView, state: CellState, row: number): string | null {
-  if (state.kind === 'barred') return reasonForRun(state.clash, row, namingOf(board));
+function runKey(state: CellState): string | null {
+  if (state.kind === 'barred') return `barred ${state.clash.other.row} ${state.clash.other.opens}`;
   return state.kind === 'none' || state.kind === 'over' ? state.kind : null;
 }
 
-/** A row as a narrow sheet sets it: runs of one or more columns, in order. */
+function reasonOf(board: BoardView, states: readonly CellState[], row: number): string | null {
+  const clashes = states.flatMap((state) => (state.kind === 'barred' ? [state.clash] : []));
+  const [first] = clashes;
+  if (first === undefined) return null;
+  const late = clashes.find((clash) => clash.kind === 'late');
+  return clashes.length === 1 || late === undefined ? reasonInFull(first, row, namingOf(board)) : reasonForRun(late, row, namingOf(board));
+}
+
+/** A row as a narrow sheet sets it: runs of one or more columns, in order, each with its one reason. */
 export function runsOf(board: BoardView, states: readonly CellState[], row: number): Run[] {
-  const runs: (Run & { key: string | null })[] = [];
+  const runs: { from: number; to: number; key: string | null }[] = [];
   states.forEach((state, column) => {
-    const key = runKey(board, state, row);
+    const key = runKey(state);
     const last = runs.at(-1);
     if (last && key !== null && last.key === key) last.to = column;
-    else runs.push({ from: column, to: column, key, reason: state.kind === 'barred' ? key : null });
+    else runs.push({ from: column, to: column, key });
   });
-  return runs.map(({ from, to, reason }) => ({ from, to, reason }));
+  return runs.map(({ from, to }) => ({ from, to, reason: reasonOf(board, states.slice(from, to + 1), row) }));
 }
 
 /** What a cell is called by a screen reader: garden, time, then places or the reason. */
@@ -95,3 +124,17 @@ export function spokenName(board: BoardView, stop: BoardStop, cell: BoardCell, s
     case 'none': return `${name}, not open`;
   }
 }
+
+/** The most times that stand across a sheet; with more, the board is set in strips at every width. */
+const COLUMNS_MOST = 14;
+const COLUMNS_FEW = 8;
+
+/** How a board is set: with few columns beside the plants, with many on the full measure, with too many always in strips. */
+export function settingOf({ columns }: BoardView): 'few' | 'many' | 'strips' {
+  if (columns.length > COLUMNS_MOST) return 'strips';
+  return columns.length > COLUMNS_FEW ? 'many' : 'few';
+}
+
+/** A state as a browser without JavaScript shows it: times that clash can be ticked, and the server says why not. */
+export const unbarred = (state: CellState): CellState =>
+  state.kind === 'barred' ? { kind: state.places <= PEGS_MAX ? 'few' : 'open', places: state.places } : state;

@@ -50,3 +50,19 @@ export function trackPieces(visits: readonly Place[], lastRow: number): Map<stri
   }
   return byCell;
 }
+
+/** Where the line runs along the foot or the head of a cell, by its key: a bar that stands there is cut to let it pass. */
+export function cutsOf(pieces: ReadonlyMap<string, readonly Piece[]>): Map<string, 'foot' | 'head' | 'both'> {
+  const cuts = new Map<string, 'foot' | 'head' | 'both'>();
+  const cut = (row: number, column: number, where: 'foot' | 'head') => {
+    const key = `${row}-${column}`;
+    const before = cuts.get(key);
+    cuts.set(key, before === undefined || before === where ? where : 'both');
+  };
+  for (const { row, column, part, edge } of [...pieces.values()].flat()) {
+    if (part !== 'start' && part !== 'across') continue;
+    cut(row, column, edge === 'lower' ? 'foot' : 'head');
+    cut(edge === 'lower' ? row + 1 : row - 1, column, edge === 'lower' ? 'head' : 'foot');
+  }
+  return cuts;
+}

@@ -1,0 +1,52 @@
+'use client';
+
+import { useState } from 'react';
+import type { FormState } from '@/lib/core/form-state';
+import type { Only } from '@/lib/opendays/rules/board';
+import { headsTyped } from '@/lib/opendays/rules/party';
+import type { Party } from '@/lib/opendays/rules/prices';
+
+/** The people boxes as they were typed. */
+export type PartyTyped = Record<keyof Party, string>;
+/** What the address says, or a form that came back: the board's first setting. */
+export type FirstChoice = { typed: PartyTyped; only: Only; chosen: string[] };
+
+const listOf = (value: string | string[] | undefined) => (value === undefined ? [] : Array.isArray(value) ? value : [value]);
+const textOf = (value: string | string[] | undefined, otherwise: string) => listOf(value)[0] ?? otherwise;
+
+/** What was sent and came back is kept; else what the page began with. */
+export function firstChoice(state: FormState, first: FirstChoice): FirstChoice {
+  const sent = state.values;
+  if (!sent) return first;
+  const { adults, children, babes } = first.typed;
+  return {
+    only: first.only,
+    chosen: listOf(sent['entryTimeId[]']),
+    typed: { adults: textOf(sent['adults'], adults), children: textOf(sent['children'], children), babes: textOf(sent['babes'], babes) },
+  };
+}
+
+/** The people as numbers; a box that cannot be read counts as its last good figure would: nobody. */
+export function partyOf(typed: PartyTyped): { party: Party; isReadable: boolean } {
+  const [adults, children, babes] = [headsTyped(typed.adults), headsTyped(typed.children), headsTyped(typed.babes)];
+  return { party: { adults: adults ?? 0, children: children ?? 0, babes: babes ?? 0 }, isReadable: adults !== null && children !== null && babes !== null };
+}
+
+/** Everything the party decides on the board: people, times, and which it insisted on. The last chosen time calls the train. */
+export function useChoice(first: FirstChoice) {
+  const [typed, setTyped] = useState(first.typed);
+  const [only, setOnly] = useState(first.only);
+  const [chosen, setChosen] = useState(first.chosen);
+  const [insisted, setInsisted] = useState<string[]>([]);
+  return {
+    typed, only, chosen, insisted,
+    type: (kind: keyof Party, text: string) => setTyped((before) => ({ ...before, [kind]: text })),
+    show: (next: Only) => setOnly(next),
+    toggle: (entryTimeId: string) => setChosen((before) => (before.includes(entryTimeId) ? before.filter((each) => each !== entryTimeId) : [...before, entryTimeId])),
+    insist: (entryTimeId: string) => {
+      setInsisted((before) => [...before, entryTimeId]);
+      setChosen((before) => [...before.filter((each) => each !== entryTimeId), entryTimeId]);
+    },
+  };
+}
+export type Choice = ReturnType<typeof useChoice>;
