@@ -1,6 +1,6 @@
 import { useId } from 'react';
 import { CROW_SPEED_KMH, DETOUR_FACTOR } from '@/lib/gardens/rules/travel';
-import { type Neighbourhood, neighbourhoodsOf, type Valley } from '@/lib/gardens/rules/valley';
+import { featuresOf, type Neighbourhood, neighbourhoodsOf, type Valley } from '@/lib/gardens/rules/valley';
 import { Fields, Halts, Railway, Ridges, Rivers, Roads, Woods } from './ground';
 import { DoubleFrame, PlaceName, ScaleBar } from './lettering';
 import { MapPost } from './map-post';
@@ -57,7 +57,7 @@ function PostLink({ number, name, href, area, x, y }: Standing) {
 
 /** The valley as one printed drawing: hatched neighbourhoods under roads and river, a post in each, each post a link. */
 export function ValleyMap({ valley, gardens, line = [] }: ValleyMapProps) {
-  const sheet = sheetOf(valley.bbox, WIDTH);
+  const sheet = sheetOf(valley.sheet, WIDTH);
   const posts = standings(gardens, neighbourhoodsOf(valley), sheet);
   const idPrefix = `patch${useId().replaceAll(/\W/g, '')}`;
   const visited = line.flatMap((number) => posts.find((post) => post.number === number)?.area ?? []);
@@ -77,7 +77,7 @@ export function ValleyMap({ valley, gardens, line = [] }: ValleyMapProps) {
         <Woods valley={valley} sheet={sheet} />
         {visited.length > 1 && <VisitLine valley={valley} areas={visited} sheet={sheet} />}
         {named.map(({ area }) => <AreaName key={area.key} area={area} sheet={sheet} />)}
-        <PlaceName x={16} y={sheet.at([0, 40.2108])[1]} name="the Alder" size={NAME_SIZE} anchor="start" />
+        <RiverName valley={valley} sheet={sheet} />
         <ScaleBar x={sheet.width - fiveMinutes - 22} y={sheet.height - 36} length={Math.round(fiveMinutes)} />
       </g>
       {posts.map((post) => <PostLink key={post.number} {...post} />)}
@@ -90,4 +90,11 @@ function AreaName({ area, sheet }: { readonly area: Neighbourhood; readonly shee
   const [x, y] = sheet.at(area.labelPoint);
   const easts = area.ring.map((place) => sheet.at(place)[0]);
   return <PlaceName x={x} y={y + 29} name={area.name} size={NAME_SIZE} within={Math.min((Math.max(...easts) - Math.min(...easts)) * 1.12, (sheet.width - x) * 2 - 24)} />;
+}
+
+/** The main river's name, at its bank where it leaves the sheet. */
+function RiverName({ valley, sheet }: { readonly valley: Valley; readonly sheet: Sheet }) {
+  const river = featuresOf(valley, 'river')[0];
+  const mouth = river?.geometry.coordinates.map((place) => sheet.at(place)).find(([x]) => x > 0);
+  return river && mouth && <PlaceName x={16} y={mouth[1] - 28} name={river.properties.name} size={NAME_SIZE} anchor="start" />;
 }

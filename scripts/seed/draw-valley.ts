@@ -70,9 +70,17 @@ function between(line: readonly Point[], from: number, to: number): Point[] {
   return kept.map(({ point }) => point);
 }
 
+/** Roads and water run on past the sheet's edge, so that a map of an outer neighbourhood shows no end of them. */
+function beyond(pen: Pen): Pen {
+  const isOff = ([x, y]: Point): boolean => x < 0 || x > 1600 || y < 0 || y > 1100;
+  const onward = (end: Point, before: Point): Point => [end[0] + 4 * (end[0] - before[0]), end[1] + 4 * (end[1] - before[1])];
+  const last = pen.length - 1;
+  return [...(isOff(nth(pen, 0)) ? [onward(nth(pen, 0), nth(pen, 1))] : []), ...pen, ...(isOff(nth(pen, last)) ? [onward(nth(pen, last), nth(pen, last - 1))] : [])];
+}
+
 const linesByKey = new Map<string, Point[]>([
-  ...[...roadDrawings, ...riverDrawings].map(({ key, pen }): [string, Point[]] => [key, smooth(pen)]),
-  ['railway', smooth(railwayDrawing)],
+  ...[...roadDrawings, ...riverDrawings].map(({ key, pen }): [string, Point[]] => [key, smooth(beyond(pen))]),
+  ['railway', smooth(beyond(railwayDrawing))],
   ...Object.entries(hedgeDrawings).map(([key, pen]): [string, Point[]] => [key, [...pen]]),
 ]);
 
@@ -115,11 +123,11 @@ const [east, south] = toLonLat([1600, 1100]);
 export const valley = {
   type: 'FeatureCollection',
   note: 'All geometry and every name in this file is invented and drawn by hand. It lies on the open Atlantic, where there is no street.',
-  bbox: [west, south, east, north],
+  sheet: [west, south, east, north],
   features: [
-    ...riverDrawings.map(({ key, name, widthMeters, pen }) => feature({ kind: 'river', key, name, widthMeters }, lineString(smooth(pen)))),
-    ...roadDrawings.map(({ key, name, roadClass, pen }) => feature({ kind: 'road', key, name, roadClass }, lineString(smooth(pen)))),
-    feature({ kind: 'railway', key: 'valley-line', name: 'the old valley line' }, lineString(smooth(railwayDrawing))),
+    ...riverDrawings.map(({ key, name, widthMeters }) => feature({ kind: 'river', key, name, widthMeters }, lineString(lineOf(key)))),
+    ...roadDrawings.map(({ key, name, roadClass }) => feature({ kind: 'road', key, name, roadClass }, lineString(lineOf(key)))),
+    feature({ kind: 'railway', key: 'valley-line', name: 'the old valley line' }, lineString(lineOf('railway'))),
     feature({ kind: 'halt', key: 'alder-fork-halt', name: 'Alder Fork Halt' }, { type: 'Point', coordinates: toLonLat(haltPoint) }),
     ...areaDrawings.map(({ key, name, inWords, homes, label, bounds }) => feature({ kind: 'area', key, name, inWords, homes, labelPoint: toLonLat(label) }, polygon(ringOf(bounds)))),
     ...woodDrawings.map(({ name, trees }) => feature({ kind: 'wood', name }, { type: 'MultiPoint', coordinates: trees.map(toLonLat) })),

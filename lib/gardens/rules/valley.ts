@@ -23,7 +23,8 @@ const ridgeFeature = feature(z.object({ kind: z.literal('ridge'), name: z.string
 export const valleySchema = z.object({
   type: z.literal('FeatureCollection'),
   note: z.string(),
-  bbox: z.tuple([z.number(), z.number(), z.number(), z.number()]),
+  /** What the printed map shows; roads and water run on beyond it. */
+  sheet: z.tuple([z.number(), z.number(), z.number(), z.number()]),
   features: z.array(z.union([riverFeature, roadFeature, railwayFeature, haltFeature, areaFeature, woodFeature, fieldFeature, ridgeFeature])),
 });
 
