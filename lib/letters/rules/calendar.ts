@@ -1,6 +1,6 @@
 import { createEvents, type EventAttributes } from 'ics';
 import { tzlib_get_ical_block } from 'timezones-ical-library';
-import { instantOf, dayOf, wallTime } from '@/lib/core/time';
+import { addMinutes, dayOf, wallTime } from '@/lib/core/time';
 import { calendarText, fold, mailtoUri, quotedParameter, unfold } from './calendar-lines';
 
 /** One visit as a calendar shows it. `address` is set only for someone who may know it; `version` rises with each change. */
@@ -70,14 +70,16 @@ function eventOf(visit: CalendarVisit, club: CalendarClub, method: CalendarMetho
 }
 
 /**
- * A wall-clock time, `20270515T103000`; the second of two equal times when clocks go back is written in UTC instead,
- * because with TZID it would mean the first (RFC 5545 section 3.3.5).
+ * A wall-clock time, `20270515T103000`. When clocks go back one reading stands for two instants; the standard means
+ * the first (RFC 5545 section 3.3.5), but readers differ, so both are written in UTC. Clocks move by 60 or 30 minutes.
  */
 function wallOrUtc(at: Date, timeZone: string): string {
-  const [day, time] = [dayOf(at, timeZone), wallTime(at, timeZone)];
-  const isPlain = instantOf(day, time, timeZone).getTime() === at.getTime();
-  return isPlain ? `${day.replaceAll('-', '')}T${time.replace(':', '')}00` : utcStamp(at);
+  const wall = wallStamp(at, timeZone);
+  const isTwice = [-60, -30, 30, 60].some((minutes) => wallStamp(addMinutes(at, minutes), timeZone) === wall);
+  return isTwice ? utcStamp(at) : wall;
 }
+
+const wallStamp = (at: Date, timeZone: string): string => `${dayOf(at, timeZone).replaceAll('-', '')}T${wallTime(at, timeZone).replace(':', '')}00`;
 
 const utcStamp = (at: Date): string => at.toISOString().replace(/\.\d+/, '').replace(/[-:]/g, '');
 
