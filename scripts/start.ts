@@ -6,7 +6,7 @@ import { migrateAll } from './migrate';
 import { ensureBuild } from './stack/build';
 import { root } from './stack/places';
 import { isFree, keptPorts } from './stack/ports';
-import { livingRun, type Processes } from './stack/processes';
+import { lastRun, type Processes } from './stack/processes';
 import { seedOnce, signInsText } from './stack/seed-once';
 import { portalEnv, startStack, type StackSettings } from './stack/stack';
 import { command, step, Trouble } from './stack/step';
@@ -20,8 +20,9 @@ let postgresRuns = false;
 async function main() {
   mkdirSync(join(root, FOLDER), { recursive: true });
   const port = portFrom(process.env['PORT']);
-  const other = livingRun(FOLDER);
-  if (other !== null) throw new Trouble(`It is running already (process ${other}). Stop it there with Ctrl-C first.`);
+  const { living, leftovers } = await lastRun(FOLDER);
+  if (living !== null) throw new Trouble(`It is running already (process ${living}). Stop it there with Ctrl-C first.`);
+  postgresRuns = leftovers;
   if (!(await isFree(port))) throw new Trouble(`Port ${port} is taken by another program. Stop that one, or choose another port: PORT=${port + 1} scripts/start`);
   if (fresh) for (const name of ['cards.jsonl', 'letters', 'ports.json']) rmSync(join(root, FOLDER, name), { recursive: true, force: true });
 

@@ -82,15 +82,20 @@ export class Processes {
   }
 }
 
-/** The run that `folder` notes, if its main process lives. What a killed run has left behind is ended first. */
-export function livingRun(folder: string): number | null {
+/**
+ * What `folder` notes of a run: the process that leads it, if it lives. What a killed run has left behind is ended
+ * first, and then `leftovers` is true: its PostgreSQL may be running too.
+ */
+export async function lastRun(folder: string): Promise<{ living: number | null; leftovers: boolean }> {
   const file = join(root, folder, 'run.json');
-  if (!existsSync(file)) return null;
+  if (!existsSync(file)) return { living: null, leftovers: false };
   const note: Note = JSON.parse(readFileSync(file, 'utf8'));
-  if (environmentOf(note.pid) !== null && note.pid !== process.pid && note.groups.some((pid) => belongs(pid, note.run))) return note.pid;
-  for (const pid of note.groups) if (belongs(pid, note.run)) endGroup(pid, 'SIGKILL');
+  const ours = note.groups.filter((pid) => belongs(pid, note.run));
+  if (environmentOf(note.pid) !== null && note.pid !== process.pid && ours.length > 0) return { living: note.pid, leftovers: false };
+  for (const pid of ours) endGroup(pid, 'SIGKILL');
+  for (let waits = 0; waits < 50 && ours.some((pid) => belongs(pid, note.run)); waits += 1) await new Promise((resolve) => setTimeout(resolve, 50));
   rmSync(file, { force: true });
-  return null;
+  return { living: null, leftovers: true };
 }
 
 /** Whether a process is one of that run: numbers are used again, so its environment is asked. */
