@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { ROLES } from '@/lib/core/words';
-import { emailField, textField } from '@/lib/core/fields';
+import { emailField, optionalTextField, phoneField, textField } from '@/lib/core/fields';
 import { idField } from '@/lib/core/ids';
 import { passwordProblem } from './rules/password';
 
@@ -30,5 +30,17 @@ const roleField = z.enum(ROLES, { error: 'Choose a role.' });
 export const inviteOfficerInput = z.object({ name: textField('a name'), email: emailField, role: roleField });
 export const giveRoleInput = z.object({ accountId: idField<'account'>(), role: roleField });
 export const takeRoleInput = giveRoleInput;
+
+/** An e-mail address that may be left out. */
+const optionalEmail = z.union([z.literal('').transform(() => null), emailField]).optional().transform((email) => email ?? null);
+
+export const contactInput = z.object({
+  personId: idField<'person'>(),
+  email: optionalEmail,
+  phone: phoneField,
+  street: optionalTextField(120),
+  town: optionalTextField(80),
+  postcode: optionalTextField(20),
+});
 
 export const nothingInput = z.object({});

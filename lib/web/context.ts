@@ -12,7 +12,7 @@ import type { Actor, BookingActor, Ctx, HolderActor, SystemActor } from '@/lib/i
 import { env } from '@/lib/infra/env';
 import { hashSecret } from '@/lib/infra/secrets';
 import { findAccountActor } from '@/lib/people/queries';
-import { may, type Capability } from '@/lib/people/rules/capabilities';
+import { isOfficer, may, type Capability } from '@/lib/people/rules/capabilities';
 import { currentSignIn } from './auth';
 import { ensureHolder, readBookingLink, readHolder } from './cookies';
 import type { ActorFor, Requires } from './requires';
@@ -47,6 +47,11 @@ async function actorFor(requires: Requires, options: { code?: string; mayMakeCoo
     case 'member': {
       const actor = await account();
       if (!actor || actor.householdId === null) throw new Refusal('not_allowed');
+      return actor;
+    }
+    case 'officer': {
+      const actor = await account();
+      if (!actor || !isOfficer(actor.roles)) throw new Refusal('not_allowed');
       return actor;
     }
     default: return officer(requires);

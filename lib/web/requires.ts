@@ -3,9 +3,9 @@ import type { Capability } from '@/lib/people/rules/capabilities';
 
 /**
  * Who may: `anyone`; a `browser` that holds places or is about to; the holder of a `booking`'s link or its household;
- * a signed-in `account`; a `member` of a household; or an officer with a capability.
+ * a signed-in `account`; a `member` of a household; an `officer` of any role; or an officer with a capability.
  */
-export type Requires = 'anyone' | 'browser' | 'booking' | 'account' | 'member' | Capability;
+export type Requires = 'anyone' | 'browser' | 'booking' | 'account' | 'member' | 'officer' | Capability;
 
 /** An account that was found to hold a capability. A command that takes one cannot be wired to `anyone`. */
 export type OfficerActor = AccountActor;
@@ -17,5 +17,5 @@ export type ActorFor<R extends Requires> =
   : R extends 'booking' ? BookingActor
   : R extends 'account' ? AccountActor
   : R extends 'member' ? MemberActor
-  : R extends Capability ? OfficerActor
+  : R extends 'officer' | Capability ? OfficerActor
   : Actor;
