@@ -6,9 +6,8 @@ import { codeProblem, findParties, padKeys, type FindBy } from '@/lib/gate/rules
 import { storyOf } from '@/lib/gate/rules/fold';
 import type { ListedParty } from '@/lib/gate/schema';
 import { peopleInWords } from '@/lib/gate/views/screen';
-import { GateButton } from './gate-button';
 import { SmallShutGate } from './gate-drawings';
-import { GateKey } from './gate-key';
+import { GateKey, PadKey } from './gate-key';
 import type { Gate } from './use-gate';
 
 const SHOWN = 3;
@@ -47,9 +46,9 @@ export function Finding({ gate, onFound, onDone }: FindingProps) {
       </div>
       <div className="mt-auto grid grid-cols-[repeat(auto-fill,minmax(56px,1fr))] gap-[16px]">
         {keys.map((key) => <GateKey key={key} letter={key} leads={nextKeys.has(key)} onPress={() => setTyped(typed + key)} />)}
-        <div className="col-span-2"><GateButton onPress={switchTo}>{by === 'name' ? 'By code' : 'By name'}</GateButton></div>
-        <div className="col-span-2"><GateButton onPress={() => setTyped(Array.from(typed).slice(0, -1).join(''))} isOff={typed === ''}>Back one</GateButton></div>
-        <div className="col-span-2"><GateButton onPress={onDone}>Done</GateButton></div>
+        <PadKey words={by === 'name' ? 'Code' : 'Name'} onPress={switchTo} />
+        <div className="col-span-2"><PadKey words="Back one" isOff={typed === ''} onPress={() => setTyped(Array.from(typed).slice(0, -1).join(''))} /></div>
+        <PadKey words="Done" onPress={onDone} />
       </div>
     </div>
   );

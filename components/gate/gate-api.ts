@@ -27,19 +27,13 @@ async function ask<S extends z.ZodType>({ path, key, body, method }: Ask, schema
 const isRefusal = (answer: unknown): answer is { refused: string; message: string } =>
   typeof answer === 'object' && answer !== null && 'refused' in answer && typeof answer.refused === 'string' && 'message' in answer && typeof answer.message === 'string';
 
-/** What the gate asks the server, each answer checked against the wire format. */
-export type GateApi = {
-  exchange(secret: string, key: string): Promise<void>;
-  list(key: string): Promise<GateList>;
-  send(key: string, batch: { phoneTime: string; listVersion: string; facts: readonly unknown[] }): Promise<FactAnswers>;
-  readTicket(key: string, text: string): Promise<z.output<typeof ticketReading>>;
-  place(key: string): Promise<GatePlace>;
-};
+type Batch = { phoneTime: string; listVersion: string; facts: readonly unknown[] };
 
-export const gateApi: GateApi = {
-  exchange: async (secret, key) => void (await ask({ method: 'POST', path: 'device', body: { secret, deviceKey: key } }, deviceNumber)),
-  list: (key) => ask({ method: 'GET', path: 'list', key }, gateList),
-  send: (key, batch) => ask({ method: 'POST', path: 'facts', key, body: batch }, factAnswers),
-  readTicket: (key, text) => ask({ method: 'POST', path: 'ticket', key, body: { text } }, ticketReading),
-  place: (key) => ask({ method: 'POST', path: 'place', key, body: {} }, gatePlace),
+/** What the gate asks the server, each answer checked against the wire format. */
+export const gateApi = {
+  exchange: async (secret: string, key: string): Promise<void> => void (await ask({ method: 'POST', path: 'device', body: { secret, deviceKey: key } }, deviceNumber)),
+  list: (key: string): Promise<GateList> => ask({ method: 'GET', path: 'list', key }, gateList),
+  send: (key: string, batch: Batch): Promise<FactAnswers> => ask({ method: 'POST', path: 'facts', key, body: batch }, factAnswers),
+  readTicket: (key: string, text: string): Promise<z.output<typeof ticketReading>> => ask({ method: 'POST', path: 'ticket', key, body: { text } }, ticketReading),
+  place: (key: string): Promise<GatePlace> => ask({ method: 'POST', path: 'place', key, body: {} }, gatePlace),
 };

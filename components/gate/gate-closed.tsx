@@ -11,7 +11,7 @@ export function GateClosed({ sentence, press }: { sentence: string; press?: { wo
         <h1 className="px-5 pt-8 text-4xl leading-none font-black">The gate</h1>
         <p role="status" className="flex-1 px-5 py-5 text-2xl leading-snug">{sentence}</p>
         {press && <div className="px-5 pb-6"><GateButton onPress={press.onPress}>{press.words}</GateButton></div>}
-        <div className="h-56"><ShutGate /></div>
+        <div className="relative h-56"><ShutGate /></div>
         <Track />
         <div className="h-10" />
       </div>

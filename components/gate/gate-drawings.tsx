@@ -1,7 +1,8 @@
 import { dialPiece, handsAt } from '@/lib/gate/rules/dial';
 import { CARD_PAINT, CardPaint, OpenLeaf, Posts, TallPosts } from './gate-parts';
 
-const SCENE = 'block h-full w-full text-current';
+/* Fills what the screen leaves it, so that the presses below stay under the thumb. */
+const SCENE = 'absolute inset-0 block h-full w-full text-current';
 
 /** What stands between the open posts: two lines of sentence at most, and the number below. */
 type OpenGateProps = { lines: readonly string[]; number: number; isFramed: boolean };

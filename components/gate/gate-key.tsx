@@ -7,3 +7,17 @@ export function GateKey({ letter, leads, onPress }: { letter: string; leads: boo
     </button>
   );
 }
+
+/** One of the pad's own keys: its words are as small as a key is wide. */
+export function PadKey({ words, isOff = false, onPress }: { words: string; isOff?: boolean; onPress: () => void }) {
+  return (
+    <button
+      type="button"
+      disabled={isOff}
+      onClick={onPress}
+      className="min-h-[56px] w-full cursor-pointer border-[2.5px] border-current bg-sun-paper text-base leading-none font-bold group-data-[sun=yes]:border-[3.5px] disabled:cursor-default disabled:border-dashed disabled:font-normal"
+    >
+      {words}
+    </button>
+  );
+}

@@ -3,7 +3,7 @@ import { useEffect, useMemo, useState, useSyncExternalStore } from 'react';
 import { foldFacts, type GateFold } from '@/lib/gate/rules/fold';
 import type { GateList } from '@/lib/gate/schema';
 import type { Keep } from './device';
-import { GateRefused, type GateApi } from './gate-api';
+import { gateApi, GateRefused } from './gate-api';
 import { openOutbox, toGateFact, type NewFact } from './outbox';
 
 const EVERY_MS = 10_000;
@@ -19,26 +19,26 @@ export type Gate = {
   keptHere: number;
   /** Writes a fact down: shown at once, sent at once, kept here until the server has it. */
   record: (fact: Omit<NewFact, 'at'>) => void;
-  readTicket: (text: string) => ReturnType<GateApi['readTicket']>;
-  place: () => ReturnType<GateApi['place']>;
+  readTicket: (text: string) => ReturnType<typeof gateApi.readTicket>;
+  place: () => ReturnType<typeof gateApi.place>;
 };
 
 /** What the gate can show: its screen, why it is refused, or that it waits for its first list. */
 export type GateState = { at: 'open'; gate: Gate } | { at: 'refused'; sentence: string } | { at: 'waiting'; hasSignal: boolean };
 
 /** Keeps the gate's list fresh and its outbox empty. */
-export function useGate(key: string, api: GateApi, keep: Keep): GateState {
+export function useGate(key: string, keep: Keep): GateState {
   const client = useQueryClient();
   const [queryKey] = useState(() => ['gate-list', key]);
   const listed = () => client.getQueryData<{ list: GateList; offsetMs: number }>(queryKey)?.list;
   const [outbox] = useState(() =>
-    openOutbox(keep, `leafhalt-gate-facts-${key.slice(0, 8)}`, (facts) => api.send(key, { phoneTime: new Date().toISOString(), listVersion: listed()?.version ?? '', facts })));
+    openOutbox(keep, `leafhalt-gate-facts-${key.slice(0, 8)}`, (facts) => gateApi.send(key, { phoneTime: new Date().toISOString(), listVersion: listed()?.version ?? '', facts })));
   const query = useQuery({
     queryKey,
     queryFn: async () => {
       outbox.drop(new Set(listed()?.facts.map(({ id }) => id)));
       await outbox.flush();
-      const list = await api.list(key);
+      const list = await gateApi.list(key);
       return { list, offsetMs: list.madeAt.getTime() - Date.now() };
     },
     refetchInterval: EVERY_MS,
@@ -62,7 +62,7 @@ export function useGate(key: string, api: GateApi, keep: Keep): GateState {
     at: 'open',
     gate: {
       list, fold, record, now: new Date(phoneNow + offsetMs), hasSignal: !query.isError, keptHere: mine.filter(({ isSent }) => !isSent).length,
-      readTicket: (text) => api.readTicket(key, text), place: () => api.place(key),
+      readTicket: (text) => gateApi.readTicket(key, text), place: () => gateApi.place(key),
     },
   };
 }

@@ -33,7 +33,7 @@ export function VerdictScreen({ gate, showing, cab, go, next }: VerdictScreenPro
       </div>
       <div className="flex flex-col gap-4 px-5 pt-3 pb-4 landscape:col-start-2 landscape:row-start-2 landscape:justify-between">
         <p className="text-xl leading-snug"><WhoItIs gate={gate} ticket={ticket} verdict={verdict} done={done} wasTurnedDown={fold.refused.has(showing.admitId)} /></p>
-        <div className="grid grid-cols-2 gap-4">
+        <div className="grid grid-cols-[fit-content(70%)_1fr] gap-4">
           {done
             ? <div className="col-span-2"><GateButton onPress={() => takeBack(gate, done.id)}>Take that back</GateButton></div>
             : <Presses gate={gate} verdict={verdict} showing={showing} go={go} admit={admit} />}
@@ -53,7 +53,7 @@ function LetInScene({ gate, fact }: { gate: Gate; fact: GateFact }) {
   const sentence = letInSentence(count, fact.at, gate.list.time);
   const [first = '', second = ''] = sentence.split(/ (?=at )/);
   return (
-    <div className="flex-1">
+    <div className="relative min-h-72 flex-1">
       <p role="status" className="sr-only">{sentence}</p>
       <OpenGate lines={[first, second]} number={count} isFramed={false} />
     </div>
@@ -70,7 +70,7 @@ function Scene({ gate, verdict, onLetIn }: SceneProps) {
     return (
       <div className="flex flex-1 flex-col">
         <p role="status" className="sr-only">{sentence}. Press the number.</p>
-        <button type="button" aria-label={sentence} onClick={() => onLetIn(verdict.heads)} className="min-h-72 w-full flex-1 cursor-pointer">
+        <button type="button" aria-label={sentence} onClick={() => onLetIn(verdict.heads)} className="relative min-h-72 w-full flex-1 cursor-pointer">
           <OpenGate lines={['Let in']} number={verdict.number} isFramed />
         </button>
       </div>
@@ -79,7 +79,7 @@ function Scene({ gate, verdict, onLetIn }: SceneProps) {
   return (
     <>
       <p role="status" className={SENTENCE}>{sentence}</p>
-      <div className="min-h-40 flex-1 pt-2"><Drawing verdict={verdict} minutesOfDay={minutesOf(wallTime(now, list.time.timeZone))} stopNumber={list.here.stopNumber} /></div>
+      <div className="relative mt-2 min-h-40 flex-1"><Drawing verdict={verdict} minutesOfDay={minutesOf(wallTime(now, list.time.timeZone))} stopNumber={list.here.stopNumber} /></div>
     </>
   );
 }
@@ -111,7 +111,8 @@ function WhoItIs({ gate, ticket, verdict, done, wasTurnedDown }: WhoProps) {
   const before = wasTurnedDown ? 'The other phone was first, so nobody was let in here. ' : '';
   if (verdict.kind === 'let_in' && ticket) return <>{before}{who}{peopleInWords(verdict.heads)}. {whenInWords(ticket, time)}. {explain(verdict, { deviceId, club: time })}</>;
   const seenBy = ticket !== null && ticket.stopId === here.stopId && storyOf(gate.fold, ticket.visitId).admissions.length > 0 ? peopleInWords(ticket) : null;
-  return <>{before}{who}{verdict.kind === 'came_in' && seenBy ? `${seenBy}. ` : ''}{explain(verdict, { deviceId, club: time })}</>;
+  const heads = 'heads' in verdict ? who : name && <><b>{name}</b>{seenBy ? `, ${seenBy}` : ''}. </>;
+  return <>{before}{heads}{explain(verdict, { deviceId, club: time })}</>;
 }
 
 type PressesProps = { gate: Gate; verdict: Verdict; showing: Showing; go: (place: Place) => void; admit: (heads: Heads, reason: string | null) => void };
