@@ -9,7 +9,7 @@ export type Layer = {
 
 const short = (value: number) => String(Math.round(value * 10) / 10);
 
-type Point = readonly [x: number, y: number];
+export type Point = readonly [x: number, y: number];
 
 /** A drawing's own points set at a place, turned and scaled: what was right and up stays so to the plant. */
 const placed = (x: number, y: number, angle: number, scale = 1) => {
@@ -61,6 +61,14 @@ export function blade(foot: Point, tip: Point, bend: number, width: number): str
   const my = (fy + ty) / 2;
   const points = [mx - width, my, mx + width, my].map(short);
   return `M${short(fx)} ${short(fy)}Q${points[0]} ${points[1]} ${short(tx)} ${short(ty)}Q${points[2]} ${points[3]} ${short(fx + 2)} ${short(fy)}Z`;
+}
+
+/** A place on a curve from `from` to `to` pulled by `pull`, at `t` 0 to 1, with the way it is heading there. */
+export function along(from: Point, pull: Point, to: Point, t: number): { x: number; y: number; heading: number } {
+  const u = 1 - t;
+  const at = (axis: 0 | 1) => u * u * from[axis] + 2 * t * u * pull[axis] + t * t * to[axis];
+  const speed = (axis: 0 | 1) => 2 * u * (pull[axis] - from[axis]) + 2 * t * (to[axis] - pull[axis]);
+  return { x: at(0), y: at(1), heading: (Math.atan2(speed(0), -speed(1)) * 180) / Math.PI };
 }
 
 /** Every item's paths as one path. */

@@ -1,4 +1,4 @@
-import { around, blade, dot, dotsAround, leaf, many, put, rays, upTo, veins } from './ink';
+import { along, around, blade, dot, dotsAround, leaf, many, put, rays, upTo, veins, type Point } from './ink';
 import type { PlantDrawing } from './plant-drawing';
 
 const rings = [{ radius: 22, count: 11 }, { radius: 34, count: 13 }, { radius: 50, count: 15 }];
@@ -22,24 +22,31 @@ export const allium: PlantDrawing = {
   ],
 };
 
-const spikes = [[30, 66, -14], [54, 24, -6], [80, 40, 4], [106, 14, 10], [126, 72, 18]] as const;
+const heatherFoot: Point = [78, 186];
+const spikes = [[22, 74], [50, 26], [80, 40], [108, 12], [134, 78]] as const;
 const heatherBell = 'M0 0C-5 1 -6 6 -5 10L-2 8L0 11L2 8L5 10C6 6 5 1 0 0Z';
+const pullOf = ([x, y]: Point): Point => [x, y + 70];
+
+/* Needles low on each stem, bells in pairs above them, a bud at the tip. */
+const needles = (tip: Point) => many(upTo(6), (index) => {
+  const { x, y, heading } = along(heatherFoot, pullOf(tip), tip, 0.2 + index * 0.06);
+  return put('M-9 -5L0 0L9 -5', x, y, heading);
+});
+const bells = (draw: (x: number, y: number, angle: number) => string) => (tip: Point) => many(upTo(7), (index) => {
+  const { x, y, heading } = along(heatherFoot, pullOf(tip), tip, 0.56 + index * 0.065);
+  return draw(x - 2, y, heading + 130) + draw(x + 2, y + 4, heading - 130);
+});
+const hung = (path: string) => (x: number, y: number, angle: number) => put(path, x, y, angle > 0 ? angle - 80 : angle + 80);
 
 export const heather: PlantDrawing = {
-  width: 152,
+  width: 156,
   height: 190,
   layers: [
-    { as: 'line', width: 3, d: many(spikes, ([x, y]) => `M78 188C${78 + (x - 78) * 0.3} 150 ${x} 140 ${x} ${y}`) },
-    { as: 'line', width: 1.8, d: many(spikes, ([x, y]) => many(upTo(5), (index) => `M${x - 9} ${y + 78 + index * 10}L${x} ${y + 84 + index * 9}L${x + 9} ${y + 78 + index * 10}`)) },
-    { as: 'ink', d: many(spikes, ([x, y, lean]) => leaf(x, y + 8, lean, 16, 4) + many(upTo(6), (index) => {
-      const reach = 6 + index * 0.7;
-      return put(heatherBell, x - reach, y + 4 + index * 11, 35) + put(heatherBell, x + reach, y + 9 + index * 11, -35);
-    })) },
-    { as: 'cut', width: 1.2, d: many(spikes, ([x, y]) => many(upTo(6), (index) => {
-      const reach = 6 + index * 0.7;
-      return put('M0 2L0 7', x - reach, y + 4 + index * 11, 35) + put('M0 2L0 7', x + reach, y + 9 + index * 11, -35);
-    })) },
-    { as: 'ink', d: 'M50 189C58 178 98 178 106 189Z' },
+    { as: 'line', width: 3, d: many(spikes, (tip) => `M${heatherFoot.join(' ')}Q${pullOf(tip).join(' ')} ${tip.join(' ')}`) },
+    { as: 'line', width: 1.8, d: many(spikes, needles) },
+    { as: 'ink', d: many(spikes, bells(hung(heatherBell))) + many(spikes, ([x, y]) => leaf(x, y + 6, 0, 15, 4)) },
+    { as: 'cut', width: 1.2, d: many(spikes, bells(hung('M0 2L0 7'))) },
+    { as: 'ink', d: 'M50 189C58 176 98 176 106 189Z' },
   ],
 };
 
@@ -62,28 +69,24 @@ export const rose: PlantDrawing = {
   ],
 };
 
-const fronds = [[14, 66, -58], [40, 22, -26], [78, 8, 2], [118, 26, 30], [144, 72, 60]] as const;
+const fernFoot: Point = [80, 188];
+const fronds = [[6, 104], [22, 40], [80, 6], [138, 40], [154, 104]] as const;
+const archOf = ([x, y]: Point): Point => [80 + (x - 80) * 0.42, y - 14 + Math.abs(x - 80) * 0.1];
 
-/* Pinnae in pairs along a bent stalk, longest a third of the way up. */
-const frond = ([tx, ty]: readonly [number, number, number]) => {
-  const [bx, by] = [78 + (tx - 78) * 0.12, ty * 0.55 + 20];
-  return many(upTo(13), (index) => {
-    const t = 0.22 + index * 0.06;
-    const x = (1 - t) ** 2 * 78 + 2 * t * (1 - t) * bx + t ** 2 * tx;
-    const y = (1 - t) ** 2 * 190 + 2 * t * (1 - t) * by + t ** 2 * ty;
-    const heading = (Math.atan2(2 * (1 - t) * (bx - 78) + 2 * t * (tx - bx), -(2 * (1 - t) * (by - 190) + 2 * t * (ty - by))) * 180) / Math.PI;
-    const length = 20 * Math.sin(Math.PI * (0.25 + index * 0.058));
-    return leaf(x, y, heading - 62, length, 3.4) + leaf(x, y, heading + 62, length, 3.4);
-  });
-};
+/* Pinnae in pairs, longest a third of the way up, none near the foot where the fronds crowd. */
+const frond = (tip: Point) => many(upTo(15), (index) => {
+  const { x, y, heading } = along(fernFoot, archOf(tip), tip, 0.4 + index * 0.04);
+  const length = 19 * Math.sin(Math.PI * (0.3 + index * 0.048));
+  return leaf(x, y, heading - 68, length, 2.7) + leaf(x, y, heading + 68, length, 2.7);
+});
 
 export const fern: PlantDrawing = {
-  width: 158,
-  height: 192,
+  width: 160,
+  height: 190,
   layers: [
-    { as: 'line', width: 2.4, d: many(fronds, ([x, y]) => `M78 190Q${78 + (x - 78) * 0.12} ${y * 0.55 + 20} ${x} ${y}`) },
-    { as: 'ink', d: many(fronds, frond) + many(fronds, ([x, y, lean]) => leaf(x, y + 3, lean, 14, 2.600)) },
-    { as: 'line', width: 3, d: 'M66 190C58 178 60 166 68 168C74 170 70 178 66 175M90 190C100 182 100 168 92 169C86 171 89 178 93 176' },
+    { as: 'line', width: 2.4, d: many(fronds, (tip) => `M${fernFoot.join(' ')}Q${archOf(tip).join(' ')} ${tip.join(' ')}`) },
+    { as: 'ink', d: many(fronds, frond) + many(fronds, (tip) => leaf(tip[0], tip[1], along(fernFoot, archOf(tip), tip, 1).heading, 7, 2.500)) },
+    { as: 'line', width: 3, d: 'M68 188C58 176 60 162 68 164C74 166 70 175 66 172M92 188C102 178 102 164 94 165C88 167 91 175 95 173' },
   ],
 };
 

@@ -51,11 +51,11 @@ export function Post({ stopNumber, minutes, height = 75, label }: PostProps) {
 function Face({ stopNumber }: { stopNumber: number }) {
   return (
     <text
-      transform="matrix(1 .36 0 1 14.500 48)"
+      transform={`matrix(1 .36 0 1 ${stopNumber > 9 ? 13.7 : 14.5} ${stopNumber > 9 ? 45 : 48})`}
       textAnchor="middle"
       className="fill-card-ink font-heading font-extrabold"
-      fontSize={stopNumber > 9 ? 22 : 29}
-      letterSpacing={stopNumber > 9 ? -1.4 : 0}
+      fontSize={stopNumber > 9 ? 20 : 29}
+      letterSpacing={stopNumber > 9 ? -1.6 : 0}
       {...(isWoven(stopNumber) ? { stroke: 'var(--card)', strokeWidth: 5, paintOrder: 'stroke', strokeLinejoin: 'round' } : {})}
     >
       {stopNumber}

@@ -77,7 +77,7 @@ export function ActionForm({ action, schema, values, submit, sending = 'One mome
 
   return (
     <FormFieldsContext value={fields.context}>
-      <form ref={element} action={send} onSubmit={submitOnce} onInput={fields.noteEdit} noValidate={schema !== undefined} className="grid gap-5">
+      <form ref={element} action={send} onSubmit={submitOnce} onInput={fields.noteEdit} noValidate={schema !== undefined} className="grid grid-cols-1 gap-5">
         <FormSummary
           key={fields.round}
           message={fields.message}

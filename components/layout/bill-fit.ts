@@ -8,8 +8,8 @@ export type BillFit = {
   fitWords: number;
 };
 
-/* At a measure of 1,184 px this is 58 px: below it a name no longer reads as a bill. */
-const WIDEST_LINE_EM = 20.4;
+/* At the drawn measure of 1,184 px this is 45 px: below it a name no longer reads as a bill. */
+const WIDEST_LINE_EM = 26;
 /* Kerning, a fallback face before the font arrives, a rounding: nothing may stick out. */
 const AIR = 0.97;
 

@@ -55,7 +55,7 @@ export function GardenFoot({ plants }: GardenProps) {
 
 function PlantGardens({ gardens }: { gardens: readonly number[] }) {
   if (gardens.length === 0) return null;
-  return <span className="block font-text font-semibold not-italic">{numbered(gardens)}</span>;
+  return <span className="block text-balance font-text font-semibold not-italic">{numbered(gardens)}</span>;
 }
 
 /** "garden 6", "gardens 4 and 7", "gardens 1, 4 and 7". */

@@ -20,5 +20,5 @@ const widths: Record<ButtonSize, string> = { usual: 'px-6', small: 'px-3', gate:
 /** The class names that buttons, and links set as buttons, share. */
 export function buttonLook(tone: ButtonTone, size: ButtonSize): string {
   const width = tone === 'bare' ? '' : widths[size];
-  return `inline-flex cursor-pointer items-center justify-center gap-2 text-center leading-tight font-semibold hover:underline hover:underline-offset-4 aria-disabled:cursor-default aria-disabled:opacity-60 disabled:cursor-default disabled:opacity-60 print:hidden ${tones[tone]} ${sizes[size]} ${width}`;
+  return `inline-flex cursor-pointer justify-self-start items-center justify-center gap-2 text-center leading-tight font-semibold hover:underline hover:underline-offset-4 aria-disabled:cursor-default aria-disabled:opacity-60 disabled:cursor-default disabled:opacity-60 print:hidden ${tones[tone]} ${sizes[size]} ${width}`;
 }

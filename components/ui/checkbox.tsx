@@ -1,7 +1,7 @@
 'use client';
 
 import type { ComponentProps, ReactNode } from 'react';
-import { MarginNote } from './field';
+import { fieldWidths, MarginNote } from './field';
 import { includesChoice, useField } from './form-fields';
 
 type CheckboxProps = Omit<ComponentProps<'input'>, 'className' | 'id' | 'type'> & {
@@ -18,8 +18,8 @@ export function Checkbox({ name, label, hint, errors, value = 'on', defaultCheck
   const id = value === 'on' ? field.id : `${field.id}-${value}`;
   const described = [hint === undefined ? '' : `${id}-hint`, field.errors.length > 0 ? `${id}-error` : ''].filter((each) => each !== '').join(' ');
   return (
-    <div className="flex flex-wrap items-start gap-x-5 gap-y-1">
-      <div className="min-w-0 max-w-lg flex-[1_1_16rem]">
+    <div className="flex min-w-0 max-w-full flex-wrap items-start gap-x-5 gap-y-1">
+      <div className={fieldWidths.fitting}>
         <label htmlFor={id} className="inline-flex min-h-11 cursor-pointer items-center gap-3 leading-snug">
           <input
             {...rest}

@@ -11,13 +11,17 @@ export type FieldProps = {
   required?: boolean;
   /** A group of choices is labelled by a legend instead of a label. */
   as?: 'field' | 'group';
+  /** `filling`: as wide as the column allows; `fitting`: only as wide as its control, so that a note stands close by. */
+  width?: 'filling' | 'fitting';
   children: (control: FieldControl) => ReactNode;
 };
+
+export const fieldWidths = { filling: 'min-w-0 max-w-lg flex-[1_1_16rem]', fitting: 'min-w-0 max-w-lg flex-initial' };
 
 const describedBy = (...ids: (string | false)[]) => ids.filter((id) => id !== false).join(' ');
 
 /** A label, a hint, a control, and any mistake as a note in the margin beside it. */
-export function Field({ id, label, hint, errors = [], required = false, as = 'field', children }: FieldProps) {
+export function Field({ id, label, hint, errors = [], required = false, as = 'field', width = 'filling', children }: FieldProps) {
   const hasErrors = errors.length > 0;
   const described = describedBy(hint !== undefined && `${id}-hint`, hasErrors && `${id}-error`);
   const control: FieldControl = {
@@ -37,10 +41,10 @@ export function Field({ id, label, hint, errors = [], required = false, as = 'fi
     </>
   );
   return (
-    <div className="flex flex-wrap items-start gap-x-5 gap-y-2">
+    <div className="flex min-w-0 max-w-full flex-wrap items-start gap-x-5 gap-y-2">
       {as === 'group' ? (
         <fieldset
-          className="min-w-0 max-w-lg flex-[1_1_16rem]"
+          className={fieldWidths[width]}
           id={id}
           {...(described === '' ? {} : { 'aria-describedby': described })}
         >
@@ -48,7 +52,7 @@ export function Field({ id, label, hint, errors = [], required = false, as = 'fi
           {inner}
         </fieldset>
       ) : (
-        <div className="min-w-0 max-w-lg flex-[1_1_16rem]">
+        <div className={fieldWidths[width]}>
           <label htmlFor={id} className="mb-1.5 block leading-tight font-semibold">
             {label}
           </label>

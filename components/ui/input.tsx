@@ -21,7 +21,7 @@ type InputProps = Omit<ComponentProps<'input'>, 'className' | 'id' | 'size' | 't
 export function Input({ name, label, hint, errors, width = 'full', face = 'text', type = 'text', defaultValue, required, ...rest }: InputProps) {
   const field = useField(name, errors);
   return (
-    <Field id={field.id} label={label} errors={field.errors} required={required ?? false} {...(hint === undefined ? {} : { hint })}>
+    <Field id={field.id} width={width === 'full' ? 'filling' : 'fitting'} label={label} errors={field.errors} required={required ?? false} {...(hint === undefined ? {} : { hint })}>
       {(control) => (
         <input
           {...rest}

@@ -22,7 +22,7 @@ export function RadioGroup({ name, label, choices, hint, errors, defaultValue, r
   const field = useField(name, errors);
   const chosen = field.value ?? defaultValue;
   return (
-    <Field as="group" id={field.id} label={label} errors={field.errors} {...(hint === undefined ? {} : { hint })}>
+    <Field as="group" width="fitting" id={field.id} label={label} errors={field.errors} {...(hint === undefined ? {} : { hint })}>
       {() => (
         <div className={run === 'across' ? 'flex flex-wrap gap-x-7' : 'grid'}>
           {choices.map((choice) => (

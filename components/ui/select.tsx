@@ -21,7 +21,7 @@ type SelectProps = Omit<ComponentProps<'select'>, 'className' | 'id' | 'children
 export function Select({ name, label, choices, hint, errors, width = 'full', defaultValue, required, ...rest }: SelectProps) {
   const field = useField(name, errors);
   return (
-    <Field id={field.id} label={label} errors={field.errors} required={required ?? false} {...(hint === undefined ? {} : { hint })}>
+    <Field id={field.id} width={width === 'full' ? 'filling' : 'fitting'} label={label} errors={field.errors} required={required ?? false} {...(hint === undefined ? {} : { hint })}>
       {(control) => (
         <span className="relative inline-block max-w-full has-[.w-full]:block">
           <select

@@ -32,7 +32,7 @@ export function Table<Row>({ caption, captionShown = 'spoken', columns, rows, ro
   if (rows.length === 0) return <div className="py-3">{empty}</div>;
   return (
     <div className="scroll-frame" role="region" aria-label={typeof caption === 'string' ? caption : 'Table'} tabIndex={0}>
-      <table className="w-full border-collapse">
+      <table className="w-full border-collapse" style={{ minWidth: `${columns.length * ROOM_REM}rem` }}>
         <caption className={captionShown === 'spoken' ? 'sr-only' : 'note pb-2 text-lg'}>{caption}</caption>
         <thead>
           <tr>
@@ -57,6 +57,9 @@ export function Table<Row>({ caption, captionShown = 'spoken', columns, rows, ro
     </div>
   );
 }
+
+/* Room for each column on a phone, where the frame scrolls rather than break words. */
+const ROOM_REM = 6.5;
 
 const setting = (set: 'text' | 'figures' = 'text') => (set === 'figures' ? 'text-right whitespace-nowrap' : 'text-left pr-4 last:pr-0');
 
