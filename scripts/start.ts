@@ -5,9 +5,9 @@ import { Client } from 'pg';
 import { migrateAll } from './migrate';
 import { ensureBuild } from './stack/build';
 import { root } from './stack/places';
+import { plant, type Planted } from './stack/plant';
 import { isFree, keptPorts } from './stack/ports';
 import { lastRun, type Processes } from './stack/processes';
-import { seedOnce, signInsText } from './stack/seed-once';
 import { portalEnv, startStack, type StackSettings } from './stack/stack';
 import { command, step, Trouble } from './stack/step';
 
@@ -31,13 +31,13 @@ async function main() {
   const ports = { server: port, ...(await keptPorts(FOLDER)) };
   const settings: Omit<StackSettings, 'build'> = { mode: 'demo', folder: FOLDER, database, ports, remembers: true };
   await step('Bringing the database up to date', () => prepare(database));
-  Object.assign(process.env, portalEnv({ ...settings, build: '.next' }));
-  const madeOn = await step('Planting the demo club', () => seedOnce(database.MIGRATE_DATABASE_URL));
+  const env = portalEnv({ ...settings, build: '.next' });
+  const planted = await step('Planting the demo club', () => plant(env, database.MIGRATE_DATABASE_URL, stopped.signal));
   const build = await ensureBuild(stopped.signal);
   stopped.signal.throwIfAborted();
   processes = await step('Starting', () => startStack({ ...settings, build }, (why) => void stop(1, why.message)));
   stopped.signal.throwIfAborted();
-  console.log(await welcome(ports, madeOn));
+  console.log(welcome(ports, planted));
 }
 
 function portFrom(text: string | undefined): number {
@@ -77,15 +77,17 @@ async function hasClub(url: string): Promise<boolean> {
   return rows[0]?.note?.startsWith('planted ') ?? false;
 }
 
-async function welcome(ports: StackSettings['ports'], madeOn: string): Promise<string> {
+function welcome(ports: StackSettings['ports'], { plantedOn, signIns }: Planted): string {
   const today = new Date().toISOString().slice(0, 10);
+  const widest = Math.max(...signIns.map((one) => one.email.length));
   return `
   The club is open:   http://127.0.0.1:${ports.server}
   Letters it sends:   http://127.0.0.1:${ports.inbox}
   Card for trying:    4242 4242 4242 4242 (others stand on the pay page)
 
-${await signInsText()}
-${madeOn === today ? '' : `\n  The demo club's days count from ${madeOn}. For days from today: scripts/start --fresh\n`}
+  Sign in with one of these; the code comes as a letter:
+${signIns.map((one) => `    ${one.email.padEnd(widest)}  ${one.does}`).join('\n')}
+${plantedOn === today ? '' : `\n  The demo club's days count from ${plantedOn}. For days from today: scripts/start --fresh\n`}
   Ctrl-C stops all of it.
 `;
 }
