@@ -1,4 +1,5 @@
-import { HEIGHT, SKIES, WIDTH, type Block, type Bridge, type Oddment, type Planting, type Sky, type Water } from './block';
+import type * as words from '@/lib/core/words';
+import { HEIGHT, SKIES, WIDTH, type Block, type Oddment, type Planting, type Sky, type Water } from './block';
 import { diceFrom, seedOf, type Dice } from './cut';
 import { formOf, isFlower, isMat, isTree, type ListedPlant } from './forms';
 import { JOKE_FACTS, JOKE_NAMES, type JokeName } from './jokes';
@@ -10,9 +11,9 @@ import { STOCK_NAMES, trainLengthMeters, type StockName } from './stock';
 export type PlateParticulars = {
   readonly slug: string;
   readonly scaleOneTo: number;
-  readonly powers: readonly ('live-steam' | 'battery' | 'track' | 'overhead' | 'clockwork')[];
-  readonly bridge: Bridge | 'pier';
-  readonly water: 'none' | 'brook' | 'pond' | 'pool' | 'lagoon';
+  readonly powers: readonly words.Power[];
+  readonly bridge: words.Bridge;
+  readonly water: words.Water;
   readonly plants: readonly ListedPlant[];
   readonly notes: { readonly stock?: readonly string[]; readonly joke?: string; readonly sky?: string };
 };
