@@ -6,6 +6,8 @@ export type BillFit = {
   /** Font sizes in percent of the measure (cqw): for those lines, and for a phone, where every word must fit. */
   fit: number;
   fitWords: number;
+  /** The largest size on a phone, in rem: a long name is set smaller rather than fill the screen. */
+  phoneRem: number;
 };
 
 /* At the drawn measure of 1,184 px this is 45 px: below it a name no longer reads as a bill. */
@@ -19,10 +21,12 @@ export function billFit(name: string): BillFit {
   const lines = linesOf(words);
   const widest = Math.max(...lines.map(besleyBlackEm), 1);
   const longestWord = Math.max(...words.map(besleyBlackEm), 1);
-  return { lines, fit: percent(widest), fitWords: percent(longestWord) };
+  return { lines, fit: percent(widest), fitWords: percent(longestWord), phoneRem: phoneRem(besleyBlackEm(words.join(' '))) };
 }
 
 const percent = (em: number) => Math.floor((100 / em) * AIR * 100) / 100;
+
+const phoneRem = (em: number) => (em <= 17 ? 3.4 : em <= 30 ? 2.7 : 2.1);
 
 function linesOf(words: string[]): string[] {
   for (const count of [1, 2, 3]) {

@@ -15,15 +15,15 @@ type BillProps = {
   rail?: ReactNode;
 };
 
-const vars = (values: Record<`--${string}`, number>): CSSProperties => values;
+const vars = (values: Record<`--${string}`, number | string>): CSSProperties => values;
 
 /** How a page opens, like a handbill: the name filling the measure, an italic line, sums in a sentence, the rail rule. */
 export function Bill({ name, line, sums, children, rail = <RailRule /> }: BillProps) {
-  const { lines, fit, fitWords } = billFit(name);
+  const { lines, fit, fitWords, phoneRem } = billFit(name);
   return (
     <>
       <header className="bill pt-3">
-        <h1 className="bill-name" style={vars({ '--fit': fit, '--fit-words': fitWords })}>
+        <h1 className="bill-name" style={vars({ '--fit': fit, '--fit-words': fitWords, '--bill-phone': `${phoneRem}rem` })}>
           {lines.map((each, index) => (
             <Fragment key={index}>
               {index === 0 ? null : ' '}

@@ -22,7 +22,7 @@ type PartProps = { title: ReactNode; id?: string; /** `first`: no hairline above
 /** One part of a page: a hairline, a heading, what it says. */
 export function Part({ title, id, place = 'next', children }: PartProps) {
   return (
-    <section {...(id === undefined ? {} : { id })} className={place === 'first' ? 'pt-5' : 'mt-9 border-t border-rule pt-5'}>
+    <section {...(id === undefined ? {} : { id })} className={place === 'first' ? 'part-first' : 'part'}>
       <h2 className="mb-3">{title}</h2>
       {children}
     </section>

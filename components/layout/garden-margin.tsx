@@ -27,9 +27,8 @@ export function GardenMargin({ plants }: GardenProps) {
           </figure>
         ))}
       </div>
-      <div className="grid grid-cols-[7rem_1fr] items-end gap-4 lg:hidden large-print:grid">
-        <Flower plant={first.plantKey} width={120} height={170} />
-        <p className="note text-lg leading-snug">In flower: {plants.map(inOneSentence).join(', ')}.</p>
+      <div className="lg:hidden large-print:block">
+        <OneAndASentence first={first} plants={plants} />
       </div>
     </aside>
   );
@@ -37,19 +36,34 @@ export function GardenMargin({ plants }: GardenProps) {
 
 /** What is in flower, growing on the foot rule: for pages that already have two columns. */
 export function GardenFoot({ plants }: GardenProps) {
-  if (plants.length === 0) return null;
+  const [first] = plants;
+  if (first === undefined) return null;
   return (
-    <aside aria-label="In flower" className="mt-10 grid grid-cols-[repeat(auto-fit,minmax(9rem,1fr))] items-end gap-x-6">
-      {plants.slice(0, 4).map((plant, index) => (
-        <figure key={plant.name} className={`items-end gap-3 ${index > 1 ? 'hidden md:flex' : 'flex'}`}>
-          <Flower plant={plant.plantKey} width={132} height={200} />
-          <figcaption className="note pb-2 leading-snug">
-            {plant.name}
-            <PlantGardens gardens={plant.gardens} />
-          </figcaption>
-        </figure>
-      ))}
+    <aside aria-label="In flower" className="mt-10">
+      <div className="hidden grid-cols-[repeat(auto-fit,minmax(12rem,1fr))] items-end gap-x-6 md:grid large-print:hidden">
+        {plants.slice(0, 4).map((plant) => (
+          <figure key={plant.name} className="flex items-end gap-3">
+            <Flower plant={plant.plantKey} width={132} height={200} />
+            <figcaption className="note pb-2 leading-snug">
+              {plant.name}
+              <PlantGardens gardens={plant.gardens} />
+            </figcaption>
+          </figure>
+        ))}
+      </div>
+      <div className="md:hidden large-print:block">
+        <OneAndASentence first={first} plants={plants} />
+      </div>
     </aside>
+  );
+}
+
+function OneAndASentence({ first, plants }: { first: InFlower; plants: readonly InFlower[] }) {
+  return (
+    <div className="grid grid-cols-[auto_minmax(0,1fr)] items-end gap-4">
+      <Flower plant={first.plantKey} width={112} height={170} />
+      <p className="note pb-2 text-lg leading-snug">In flower: {plants.map(inOneSentence).join(', ')}.</p>
+    </div>
   );
 }
 

@@ -27,19 +27,21 @@ export function StaffCopy({ clubName, printedAt, bill, contents, here, notes = [
   return (
     <div className="staff">
       <div className="copy">
-        <div className="flex flex-wrap items-baseline justify-between gap-x-6 pb-1">
+        <header className="flex flex-wrap items-baseline justify-between gap-x-6 pb-1">
           <span className="font-heading text-lg font-semibold">{clubName}</span>
           <span className="note text-lg">Staff copy, {printedAt}</span>
-        </div>
+        </header>
         <main id="page" tabIndex={-1} className="copy-grid">
           <div className="copy-bill">{bill}</div>
-          <div className="copy-margin">
+          <div className="copy-contents">
             <Contents groups={contents} here={here} />
-            <PencilNotes notes={notes} />
           </div>
-          <div className="min-w-0 pt-6">
+          <div className="copy-text">
             {toSettle === undefined ? null : <ToSettle items={toSettle} />}
             {children}
+          </div>
+          <div className="copy-notes">
+            <PencilNotes notes={notes} />
           </div>
         </main>
         <footer className="mt-8 flex flex-wrap items-center gap-x-6 border-t border-rule pt-1 text-ink-soft">
