@@ -42,7 +42,7 @@ export function Finding({ gate, onFound, onDone }: FindingProps) {
           <span role="status">{hits.length} of {counted(parties.length, 'party', 'parties')}</span>
         </label>
         {typed !== '' && <ul>{hits.slice(0, SHOWN).map((party) => <li key={party.visitId} className="border-b-[1.5px] border-current"><Hit gate={gate} party={party} onFound={onFound} /></li>)}</ul>}
-        <p className="min-h-12 py-2">{advice({ hits: hits.length, all: parties.length, typed, by })}</p>
+        <p className="py-1.5">{advice({ hits: hits.length, all: parties.length, typed, by })}</p>
       </div>
       <div className="mt-auto grid grid-cols-[repeat(auto-fill,minmax(56px,1fr))] gap-[16px]">
         {keys.map((key) => <GateKey key={key} letter={key} leads={nextKeys.has(key)} onPress={() => setTyped(typed + key)} />)}
@@ -70,7 +70,7 @@ function Hit({ gate, party, onFound }: { gate: Gate; party: ListedParty; onFound
   const cameIn = peopleCount(left) === 0 ? story.admissions.at(-1) : undefined;
   const what = party.givenBackAt ? 'given back' : cameIn ? `came in at ${formatTime(cameIn.at, time)}` : peopleInWords(left);
   return (
-    <button type="button" onClick={() => onFound(party)} className="grid min-h-16 w-full cursor-pointer grid-cols-[2.5rem_1fr_auto] items-center gap-2 py-1 text-left">
+    <button type="button" onClick={() => onFound(party)} className="my-2 grid min-h-[56px] w-full cursor-pointer grid-cols-[2.5rem_1fr_auto] items-center gap-2 py-1 text-left">
       <span className="font-heading text-4xl leading-none font-black">{headCount(cameIn ? party : left, here.babes)}</span>
       <span className="min-w-0">
         <b className="block leading-tight break-words">{party.name}</b>

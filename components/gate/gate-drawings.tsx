@@ -11,7 +11,7 @@ type OpenGateProps = { lines: readonly string[]; number: number; isFramed: boole
 export function OpenGate({ lines, number, isFramed }: OpenGateProps) {
   const digits = String(number).length;
   const size = lines.length > 1 ? 238 : 266;
-  const squeeze = digits > 1 ? { textLength: Math.min(212, digits * 112), lengthAdjust: 'spacingAndGlyphs' as const } : {};
+  const squeeze = digits > 1 ? { textLength: isFramed ? 182 : 206, lengthAdjust: 'spacingAndGlyphs' as const } : {};
   return (
     <svg aria-hidden viewBox="0 0 390 322" preserveAspectRatio="xMidYMax meet" className={SCENE}>
       <TallPosts />
@@ -27,6 +27,24 @@ export function OpenGate({ lines, number, isFramed }: OpenGateProps) {
         <text x="195" y={lines.length > 1 ? 308 : 287} fontSize={digits > 1 ? 216 : size} {...squeeze}>
           {number}
         </text>
+      </g>
+    </svg>
+  );
+}
+
+/** The open posts with nobody between them: the words above, and below them the camera's window. */
+export function WaitingGate({ lines }: { lines: readonly string[] }) {
+  return (
+    <svg aria-hidden viewBox="0 0 390 322" preserveAspectRatio="xMidYMax meet" className={SCENE}>
+      <TallPosts />
+      <OpenLeaf />
+      <OpenLeaf right />
+      <g className="font-heading" fill="currentColor" textAnchor="middle" fontWeight="900" fontSize="48" letterSpacing="-1">
+        {lines.map((line, at) => (
+          <text key={line} x="195" y={44 + at * 48}>
+            {line}
+          </text>
+        ))}
       </g>
     </svg>
   );

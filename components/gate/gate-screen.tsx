@@ -24,7 +24,8 @@ export function GateScreen({ gate, keep }: { gate: Gate; keep: Keep }) {
   const [place, go] = useState<Place>({ at: 'watching', note: null });
   const [scheme, setScheme] = useState<'day' | 'sun'>(() => (keep.getItem(SUN) === 'yes' ? 'sun' : 'day'));
   const { here, garden, madeAt, time } = gate.list;
-  const words = gate.hasSignal ? `list from ${formatTime(madeAt, time)}` : `No signal: ${gate.keptHere} kept here`;
+  const kept = gate.keptHere === 0 ? 'No signal' : `No signal: ${gate.keptHere} kept here`;
+  const words = gate.hasSignal ? `list from ${formatTime(madeAt, time)}` : kept;
   const toggleSun = () => {
     keep.setItem(SUN, scheme === 'sun' ? 'no' : 'yes');
     setScheme(scheme === 'sun' ? 'day' : 'sun');

@@ -23,11 +23,11 @@ export function VerdictScreen({ gate, showing, cab, go, next }: VerdictScreenPro
   const admit = (heads: Heads, reason: string | null) => go({ at: 'ticket', showing: letIn(gate, showing, heads, { verdict: verdict.kind, reason }) });
   return (
     <div className="flex flex-1 flex-col landscape:grid landscape:grid-cols-2 landscape:grid-rows-[auto_1fr] landscape:gap-x-6">
-      <div className="grid grid-cols-[8rem_1fr] items-center gap-4 px-5 pt-3 landscape:col-start-2 landscape:row-start-1">
-        {cab}
-        <p>{crowdSentence(fold, list.here, due, list.time)}</p>
+      <div className="flex flex-wrap items-center gap-x-4 gap-y-2 px-5 pt-3 landscape:col-start-2 landscape:row-start-1">
+        <div className="w-[min(8rem,36vw)] shrink-0 landscape:w-20">{cab}</div>
+        <p className="min-w-0 flex-[1_1_8rem]">{crowdSentence(fold, list.here, due, list.time)}</p>
       </div>
-      <div className="flex flex-1 flex-col landscape:col-start-1 landscape:row-span-2 landscape:row-start-1">
+      <div className={`flex flex-1 flex-col landscape:col-start-1 landscape:row-span-2 landscape:row-start-1 ${BESIDE}`}>
         {done && ticket ? <LetInScene gate={gate} fact={done} /> : <Scene gate={gate} verdict={verdict} onLetIn={(heads) => admit(heads, null)} />}
         <Track />
       </div>
@@ -45,7 +45,9 @@ export function VerdictScreen({ gate, showing, cab, go, next }: VerdictScreenPro
   );
 }
 
-const SENTENCE = 'px-5 pt-2 font-heading text-[2.75rem] leading-none font-black tracking-tight'; // 49.5 px: never under 48, and two lines on the narrowest phone
+/* With the phone on its side the drawing keeps to the screen's height and stays put while the presses scroll. */
+const BESIDE = 'landscape:sticky landscape:top-0 landscape:h-[calc(100dvh-3.6rem)]';
+const SENTENCE = 'px-5 pt-2 max-[360px]:px-3 max-[360px]:hyphens-auto font-heading text-[2.75rem] leading-none font-black tracking-tight'; // 49.5 px: never under 48, and two lines on the narrowest phone
 
 /** The open gate after the press: "Three in at 11:34". */
 function LetInScene({ gate, fact }: { gate: Gate; fact: GateFact }) {
@@ -53,7 +55,7 @@ function LetInScene({ gate, fact }: { gate: Gate; fact: GateFact }) {
   const sentence = letInSentence(count, fact.at, gate.list.time);
   const [first = '', second = ''] = sentence.split(/ (?=at )/);
   return (
-    <div className="relative min-h-72 flex-1">
+    <div className="relative min-h-[288px] landscape:min-h-0 flex-1">
       <p role="status" className="sr-only">{sentence}</p>
       <OpenGate lines={[first, second]} number={count} isFramed={false} />
     </div>
@@ -70,7 +72,7 @@ function Scene({ gate, verdict, onLetIn }: SceneProps) {
     return (
       <div className="flex flex-1 flex-col">
         <p role="status" className="sr-only">{sentence}. Press the number.</p>
-        <button type="button" aria-label={sentence} onClick={() => onLetIn(verdict.heads)} className="relative min-h-72 w-full flex-1 cursor-pointer">
+        <button type="button" aria-label={sentence} onClick={() => onLetIn(verdict.heads)} className="relative min-h-[288px] landscape:min-h-0 w-full flex-1 cursor-pointer">
           <OpenGate lines={['Let in']} number={verdict.number} isFramed />
         </button>
       </div>
@@ -79,7 +81,7 @@ function Scene({ gate, verdict, onLetIn }: SceneProps) {
   return (
     <>
       <p role="status" className={SENTENCE}>{sentence}</p>
-      <div className="relative mt-2 min-h-40 flex-1"><Drawing verdict={verdict} minutesOfDay={minutesOf(wallTime(now, list.time.timeZone))} stopNumber={list.here.stopNumber} /></div>
+      <div className="relative mt-2 min-h-40 landscape:min-h-0 flex-1"><Drawing verdict={verdict} minutesOfDay={minutesOf(wallTime(now, list.time.timeZone))} stopNumber={list.here.stopNumber} /></div>
     </>
   );
 }

@@ -2,16 +2,17 @@ import type { ReactNode } from 'react';
 import { useState } from 'react';
 import { crowdSentence, dueNow } from '@/lib/gate/views/screen';
 import { GateButton } from './gate-button';
-import { OpenLeaf, TallPosts, Track } from './gate-parts';
+import { WaitingGate } from './gate-drawings';
+import { Track } from './gate-parts';
 import { countOut, takeBack, type Place } from './showing';
 import type { CameraState } from './use-camera';
 import type { Gate } from './use-gate';
 
-const CAMERA_WORDS: Record<CameraState, string> = {
-  starting: 'Show a ticket',
-  watching: 'Show a ticket',
-  refused: 'No camera',
-  none: 'No camera',
+const CAMERA_WORDS: Record<CameraState, readonly string[]> = {
+  starting: ['Show', 'a ticket'],
+  watching: ['Show', 'a ticket'],
+  refused: ['No', 'camera'],
+  none: ['No', 'camera'],
 };
 
 type WatchingProps = { gate: Gate; cab: ReactNode; camera: CameraState; note: string | null; go: (place: Place) => void; sun: { scheme: 'day' | 'sun'; toggle: () => void } };
@@ -24,17 +25,10 @@ export function Watching({ gate, cab, camera, note, go, sun }: WatchingProps) {
   const due = dueNow(list.parties, fold, list.here.babes, now);
   return (
     <div className="flex flex-1 flex-col landscape:grid landscape:grid-cols-2 landscape:gap-x-6">
-      <div className="flex flex-col landscape:justify-end">
-        <div className="relative">
-          <svg aria-hidden viewBox="0 0 390 322" className="block w-full">
-            <TallPosts />
-            <OpenLeaf />
-            <OpenLeaf right />
-          </svg>
-          <div className="absolute inset-x-[23.5%] bottom-[4%] flex flex-col items-center gap-3">
-            <p className="text-center font-heading text-4xl leading-none font-black">{CAMERA_WORDS[camera]}</p>
-            {cab}
-          </div>
+      <div className="landscape:sticky landscape:top-0 landscape:self-start">
+        <div className="relative mx-auto aspect-[390/322] w-full landscape:h-[calc(100dvh-4.6rem)] landscape:w-auto">
+          <WaitingGate lines={CAMERA_WORDS[camera]} />
+          <div className="absolute inset-x-[24.5%] bottom-[2%]">{cab}</div>
         </div>
         <Track />
       </div>
@@ -45,8 +39,8 @@ export function Watching({ gate, cab, camera, note, go, sun }: WatchingProps) {
           {list.here.calledOff && <p className="font-bold">This open day is called off. Nobody is let in.</p>}
           <p>{crowdSentence(fold, list.here, due, list.time)}</p>
         </div>
-        <div className="grid grid-cols-2 gap-4">
-          <div className="col-span-2"><GateButton tone="main" onPress={() => go({ at: 'finding' })}>Find by name or code</GateButton></div>
+        <div className="grid grid-cols-[repeat(auto-fit,minmax(7rem,1fr))] gap-4">
+          <div className="col-span-full"><GateButton tone="main" onPress={() => go({ at: 'finding' })}>Find by name or code</GateButton></div>
           <GateButton onPress={() => setLastOut(countOut(gate))}>One came out</GateButton>
           <GateButton isOff={!isOutStanding} onPress={() => lastOut !== null && takeBack(gate, lastOut)}>Take that back</GateButton>
           <GateButton tone="bare" onPress={sun.toggle}>{sun.scheme === 'sun' ? 'By ordinary light' : 'Black on white'}</GateButton>
