@@ -17,10 +17,10 @@ export const listingOf = <const S extends readonly [string, ...string[]]>(sorts:
 
 const firstOf = (value: unknown) => (Array.isArray(value) ? value[0] : value) ?? '';
 
-/** The address of the same table asked for otherwise; what stands at its default stays out. */
-export function listingHref(path: string, listing: Listing<string>, change: Partial<Listing<string>>): string {
+/** The address of the same table asked for otherwise; `keep` is the page's own filters. */
+export function listingHref(path: string, listing: Listing<string>, change: Partial<Listing<string>>, keep: Record<string, string> = {}): string {
   const next = { ...listing, ...change };
-  const query = new URLSearchParams();
+  const query = new URLSearchParams(keep);
   if (next.find !== '') query.set('find', next.find);
   query.set('sort', next.sort);
   query.set('order', next.order);
@@ -29,11 +29,11 @@ export function listingHref(path: string, listing: Listing<string>, change: Part
 }
 
 /** What a column's head does: its address and how it is sorted now. */
-export function sortingOf(path: string, listing: Listing<string>, sort: string) {
+export function sortingOf(path: string, listing: Listing<string>, sort: string, keep: Record<string, string> = {}) {
   const isNow = listing.sort === sort;
   const order = isNow && listing.order === 'asc' ? 'desc' : 'asc';
   const now = isNow ? (listing.order === 'asc' ? ('ascending' as const) : ('descending' as const)) : ('none' as const);
-  return { href: listingHref(path, listing, { sort, order, page: 1 }), order: now };
+  return { href: listingHref(path, listing, { sort, order, page: 1 }, keep), order: now };
 }
 
 /** Words to find as a LIKE pattern with its own wildcards taken literally; null when there are none. */

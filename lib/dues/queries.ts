@@ -2,7 +2,7 @@ import 'server-only';
 import { and, desc, eq, isNull, sql } from 'drizzle-orm';
 import type { Queryable } from '@/db/client';
 import { paymentAttempts, payments } from '@/db/schema/books';
-import { charges, membershipClasses, terms } from '@/db/schema/dues';
+import { charges, membershipClasses } from '@/db/schema/dues';
 import { households } from '@/db/schema/people';
 import type { Id } from '@/lib/core/ids';
 import { firstOrNull } from '@/lib/core/only';
@@ -10,16 +10,8 @@ import { Refusal } from '@/lib/core/refusal';
 import { dayOf } from '@/lib/core/time';
 import type { Ctx, MemberCtx } from '@/lib/infra/context';
 import { standingOf } from './rules/standing';
+import { classKey, owedMinor, termEnd } from './standing-sql';
 import { receiptNumber, type ChargeView, type DuesView, type ReceiptView } from './views';
-
-/** The last day that a household's terms pay for. */
-export const termEnd = sql<string | null>`(select max(upper(${terms.during}) - 1)::text from ${terms} where ${terms.householdId} = ${households.id})`;
-/** What a household owes over all its charges, less what has come. */
-export const owedMinor = sql<number>`(select coalesce(sum(c.amount_minor - coalesce((select sum(p.amount_minor) from ${payments} p where p.charge_id = c.id), 0)), 0)::int
-  from ${charges} c where c.household_id = ${households.id} and c.waived_at is null)`;
-/** The class of a household's latest term, or of its latest charge. */
-export const classKey = sql<string | null>`coalesce((select t.class_key from ${terms} t where t.household_id = ${households.id} order by upper(t.during) desc limit 1),
-  (select c.class_key from ${charges} c where c.household_id = ${households.id} order by c.term_to desc limit 1))`;
 
 /** The acting household's dues: standing, charges newest first, receipts. */
 export async function memberDues(ctx: MemberCtx): Promise<DuesView> {

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { dayField, optionalTextField } from '@/lib/core/fields';
 import { idField } from '@/lib/core/ids';
+import { listingOf } from '@/lib/core/listing';
 
 export const payDuesInput = z.object({ chargeId: idField<'charge'>() });
 
@@ -12,3 +13,12 @@ export const recordPaymentInput = z.object({
   receivedOn: dayField,
   reference: optionalTextField(80),
 });
+
+export const ROLL_SORTS = ['name', 'class', 'since', 'number'] as const;
+export type RollSort = (typeof ROLL_SORTS)[number];
+
+export const ROLL_FILTERS = ['all', 'paid', 'kept', 'lapsed', 'life', 'new', 'left'] as const;
+export type RollFilter = (typeof ROLL_FILTERS)[number];
+
+/** How the roll is asked for, as it stands in the address. */
+export const rollInput = listingOf(ROLL_SORTS, { sort: 'name', order: 'asc' }).extend({ standing: z.enum(ROLL_FILTERS).catch('all') });

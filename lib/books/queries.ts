@@ -1,0 +1,65 @@
+import 'server-only';
+import { and, asc, desc, eq, ilike, isNull, or, sql, type SQL } from 'drizzle-orm';
+import { accountsOfBooks, funds, journalEntries, payments, postings, refunds } from '@/db/schema/books';
+import { bookingContacts } from '@/db/schema/bookings';
+import { openDays } from '@/db/schema/opendays';
+import { households } from '@/db/schema/people';
+import { likeOf, PAGE_ROWS, type Listing } from '@/lib/core/listing';
+import type { AccountCtx } from '@/lib/infra/context';
+import type { ReceiptSort } from './schema';
+
+/** The figure of postings that credit an income account: money that came in, less what was given back. */
+const cameIn = sql<number>`(-sum(${postings.amountMinor}) filter (where ${accountsOfBooks.kind} = 'income'))::bigint::int`;
+const fees = sql<number>`coalesce(sum(${postings.amountMinor}) filter (where ${accountsOfBooks.kind} = 'expense'), 0)::int`;
+
+/** What each open day has brought in and cost in card fees, the latest first, at most 60. */
+export async function incomeByOpenDay({ db }: AccountCtx) {
+  return db.select({ id: openDays.id, title: openDays.title, slug: openDays.slug, heldOn: openDays.heldOn, cameInMinor: sql<number>`coalesce(${cameIn}, 0)`, feesMinor: fees })
+    .from(openDays).leftJoin(postings, eq(postings.openDayId, openDays.id)).leftJoin(accountsOfBooks, eq(accountsOfBooks.code, postings.account))
+    .groupBy(openDays.id).orderBy(desc(openDays.heldOn)).limit(60);
+}
+
+/** What each fund has taken in and spent. */
+export async function incomeByFund({ db }: AccountCtx) {
+  return db.select({ key: funds.key, name: funds.name, cameInMinor: sql<number>`coalesce(${cameIn}, 0)`, feesMinor: fees })
+    .from(funds).leftJoin(postings, eq(postings.fund, funds.key)).leftJoin(accountsOfBooks, eq(accountsOfBooks.code, postings.account))
+    .groupBy(funds.key).orderBy(asc(funds.position)).limit(40);
+}
+
+/** What each account of the books holds now. Debits are positive. */
+export async function accountBalances({ db }: AccountCtx) {
+  return db.select({ code: accountsOfBooks.code, name: accountsOfBooks.name, kind: accountsOfBooks.kind, balanceMinor: sql<number>`coalesce(sum(${postings.amountMinor}), 0)::int` })
+    .from(accountsOfBooks).leftJoin(postings, eq(postings.account, accountsOfBooks.code)).groupBy(accountsOfBooks.code).orderBy(asc(accountsOfBooks.kind), asc(accountsOfBooks.name)).limit(100);
+}
+
+const SORTS: Record<ReceiptSort, SQL> = { received: sql`${payments.receivedOn}`, amount: sql`${payments.amountMinor}`, number: sql`${payments.receiptYear} * 1000000 + ${payments.receiptNumber}` };
+
+/** One page of the money that came in (or all of it, for a file): receipt, payer, what for, how. */
+export async function receiptLines({ db }: AccountCtx, asked: Listing<ReceiptSort>, extent: 'page' | 'all' = 'page') {
+  const like = likeOf(asked.find);
+  const payer = sql<string>`coalesce(${households.name}, ${bookingContacts.name}, '')`;
+  const order = SORTS[asked.sort];
+  const rows = await db.select({
+    id: payments.id, year: payments.receiptYear, number: payments.receiptNumber, method: payments.method, amountMinor: payments.amountMinor, receivedOn: payments.receivedOn, reference: payments.reference,
+    payer, isDues: sql<boolean>`${payments.chargeId} is not null`, total: sql<number>`count(*) over ()::int`,
+    givenBackMinor: sql<number>`coalesce((select sum(r.amount_minor) from ${refunds} r where r.payment_id = ${payments.id} and r.failed_at is null), 0)::int`,
+  })
+    .from(payments).leftJoin(households, eq(households.id, payments.householdId)).leftJoin(bookingContacts, eq(bookingContacts.bookingId, payments.bookingId))
+    .where(like === null ? undefined : or(ilike(households.name, like), ilike(bookingContacts.name, like), ilike(payments.reference, like), sql`${payments.receiptYear} || '/' || lpad(${payments.receiptNumber}::text, 4, '0') ilike ${like}`))
+    .orderBy(asked.order === 'asc' ? asc(order) : desc(order), desc(payments.receiptNumber))
+    .limit(extent === 'page' ? PAGE_ROWS : 20_000).offset(extent === 'page' ? (asked.page - 1) * PAGE_ROWS : 0);
+  return { rows, total: rows[0]?.total ?? 0 };
+}
+
+/** Refunds that are on their way or failed, oldest first, at most 100. */
+export async function refundsOpen({ db }: AccountCtx) {
+  return db.select({ id: refunds.id, amountMinor: refunds.amountMinor, reason: refunds.reason, askedAt: refunds.askedAt, tries: refunds.tries, failedAt: refunds.failedAt })
+    .from(refunds).where(and(isNull(refunds.doneAt))).orderBy(asc(refunds.askedAt)).limit(100);
+}
+
+/** The journal's newest entries with their postings, at most 100 postings. */
+export async function journalLines({ db }: AccountCtx) {
+  return db.select({ entryId: journalEntries.id, kind: journalEntries.kind, happenedOn: journalEntries.happenedOn, account: accountsOfBooks.name, fund: postings.fund, amountMinor: postings.amountMinor })
+    .from(journalEntries).innerJoin(postings, eq(postings.entryId, journalEntries.id)).innerJoin(accountsOfBooks, eq(accountsOfBooks.code, postings.account))
+    .orderBy(desc(journalEntries.madeAt), asc(journalEntries.id), desc(postings.amountMinor)).limit(100);
+}
