@@ -2,11 +2,12 @@ import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import type { FormState } from '@/lib/core/form-state';
 import { keepWords, visitsInLine } from '@/lib/opendays/rules/day-line';
-import { sumSentence, type Party } from '@/lib/opendays/rules/prices';
+import type { People } from '@/lib/bookings/rules/party';
+import { sumSentence } from '@/lib/opendays/rules/prices';
 import type { BoardCell, BoardView } from '@/lib/opendays/views';
 import styles from './time-board.module.css';
 
-type FareProps = { board: BoardView; chosen: readonly BoardCell[]; party: Party; heads: number; state: FormState; problem: string | null; isSending: boolean; isAwake: boolean };
+type FareProps = { board: BoardView; chosen: readonly BoardCell[]; party: People; heads: number; state: FormState; problem: string | null; isSending: boolean; isAwake: boolean };
 
 /** What the choice comes to, what was refused and the way on, and the one main button. */
 export function Fare({ board, chosen, party, heads, state, problem, isSending, isAwake }: FareProps) {

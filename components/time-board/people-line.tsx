@@ -2,7 +2,7 @@ import { Button } from '@/components/ui/button';
 import { controlLook } from '@/components/ui/control-look';
 import { MarginNote } from '@/components/ui/field';
 import type { Only } from '@/lib/opendays/rules/board';
-import type { Party } from '@/lib/opendays/rules/prices';
+import type { People } from '@/lib/bookings/rules/party';
 import type { PartyTyped } from './use-choice';
 
 type PeopleLineProps = {
@@ -12,12 +12,12 @@ type PeopleLineProps = {
   mistake: string | null;
   /** The page's own address, for a browser that must ask the server again. */
   path: string;
-  acts: { type: (kind: keyof Party, text: string) => void; show: (only: Only) => void };
+  acts: { type: (kind: keyof People, text: string) => void; show: (only: Only) => void };
 };
 
 /** "We are 2 adults, 1 child and 0 babes in arms", and which gardens to show. */
 export function PeopleLine({ typed, only, mistake, path, acts }: PeopleLineProps) {
-  const box = (kind: keyof Party, label: string) => (
+  const box = (kind: keyof People, label: string) => (
     <input
       id={`people-${kind}`}
       name={kind}

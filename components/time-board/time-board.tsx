@@ -4,8 +4,9 @@ import { QueryClient, QueryClientProvider } from '@tanstack/react-query';
 import { startTransition, useActionState, useState, useSyncExternalStore, type CSSProperties, type FormEvent, type ReactNode } from 'react';
 import { VisitorLine } from '@/components/day-graph/visitor-line';
 import { idleForm, type FormAction } from '@/lib/core/form-state';
+import { countPeople, headsOf } from '@/lib/bookings/rules/party';
 import { REFUSALS } from '@/lib/core/refusal';
-import { boardStates, chosenCells, headsOf, onlyFitting, settingOf, sittingOf, unbarred } from '@/lib/opendays/rules/board';
+import { boardStates, chosenCells, onlyFitting, settingOf, sittingOf, unbarred } from '@/lib/opendays/rules/board';
 import { dayLine } from '@/lib/opendays/rules/day-line';
 import { partyMistake } from '@/lib/opendays/rules/party';
 import { firstClash } from '@/lib/opendays/rules/reach';
@@ -81,7 +82,7 @@ function Board({ board: served, action, first, path, caption, heads: headOf, pos
             <div className={`rail ${styles.rail ?? ''}`} aria-hidden="true">
               <span className={styles.train} style={trainStands(((called?.column ?? 0) + 0.5) / Math.max(1, board.columns.length))}>{train}</span>
             </div>
-            <BoardTable {...{ board, states, chosen, day, heads, caption, isAwake }} people={party.adults + party.children + party.babes} headOf={(stopId) => headOf[stopId]} choose={choice} />
+            <BoardTable {...{ board, states, chosen, day, heads, caption, isAwake }} people={countPeople(party)} headOf={(stopId) => headOf[stopId]} choose={choice} />
             {board.stops.length === 0 ? <p className="py-4">No garden fits both. Untick one to see the others.</p> : null}
             {boardKey}
             {chosen.length === 0 ? null : <VisitorLine board={board} day={day} postOf={(stopId) => posts[stopId]} />}

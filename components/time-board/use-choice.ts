@@ -4,10 +4,10 @@ import { useState } from 'react';
 import type { FormState } from '@/lib/core/form-state';
 import type { Only } from '@/lib/opendays/rules/board';
 import { headsTyped } from '@/lib/opendays/rules/party';
-import type { Party } from '@/lib/opendays/rules/prices';
+import type { People } from '@/lib/bookings/rules/party';
 
 /** The people boxes as they were typed. */
-export type PartyTyped = Record<keyof Party, string>;
+export type PartyTyped = Record<keyof People, string>;
 /** What the address says, or a form that came back: the board's first setting. */
 export type FirstChoice = { typed: PartyTyped; only: Only; chosen: string[] };
 
@@ -27,7 +27,7 @@ export function firstChoice(state: FormState, first: FirstChoice): FirstChoice {
 }
 
 /** The people as numbers; a box that cannot be read counts as its last good figure would: nobody. */
-export function partyOf(typed: PartyTyped): { party: Party; isReadable: boolean } {
+export function partyOf(typed: PartyTyped): { party: People; isReadable: boolean } {
   const [adults, children, babes] = [headsTyped(typed.adults), headsTyped(typed.children), headsTyped(typed.babes)];
   return { party: { adults: adults ?? 0, children: children ?? 0, babes: babes ?? 0 }, isReadable: adults !== null && children !== null && babes !== null };
 }
@@ -40,7 +40,7 @@ export function useChoice(first: FirstChoice) {
   const [insisted, setInsisted] = useState<string[]>([]);
   return {
     typed, only, chosen, insisted,
-    type: (kind: keyof Party, text: string) => setTyped((before) => ({ ...before, [kind]: text })),
+    type: (kind: keyof People, text: string) => setTyped((before) => ({ ...before, [kind]: text })),
     show: (next: Only) => setOnly(next),
     toggle: (entryTimeId: string) => setChosen((before) => (before.includes(entryTimeId) ? before.filter((each) => each !== entryTimeId) : [...before, entryTimeId])),
     insist: (entryTimeId: string) => {

@@ -1,6 +1,10 @@
-import { addMinutes, formatTime, wallTime, type ClubTime } from '@/lib/core/time';
+import { addMinutes, formatDay, formatTime, wallTime, type ClubTime } from '@/lib/core/time';
 import type { Id } from '@/lib/core/ids';
-import type { PersonPrices } from './rules/prices';
+import { cautionsOf, type Hazards } from '@/lib/gardens/rules/cautions';
+import { powersInWords, scaleInWords } from '@/lib/gardens/rules/particulars';
+import { toFlowersOf, type FlowerView, type PlantRow } from '@/lib/gardens/views';
+import { figuresSentence, phaseOf, whenAndWhere, type DayFigures, type DayPhase } from './rules/day-words';
+import { priceSentence, type PersonPrices } from './rules/prices';
 import { minutesFor, minutesTable, type MinutesFact } from './rules/reach';
 
 /** The lettered notes of the board: live steam, step-free all the way round, a pond or pool. */
@@ -63,9 +67,8 @@ export type StopFacts = {
   isSteam: boolean;
   isStepFree: boolean;
   hasWater: boolean;
-  closedAt: Date | null;
 };
-export type EntryFacts = { entryTimeId: Id<'entryTime'>; stopId: Id<'stop'>; opensAt: Date; graceUntil: Date; closedAt: Date | null; places: number };
+export type EntryFacts = { entryTimeId: Id<'entryTime'>; stopId: Id<'stop'>; opensAt: Date; graceUntil: Date; closedAt: Date | null; stopClosedAt: Date | null; places: number };
 export type PriceFacts = { stopId: Id<'stop'> | null; kind: 'adult' | 'child' | 'babe'; amountMinor: number };
 
 export type BoardFacts = {
@@ -128,7 +131,7 @@ export function toBoard(facts: BoardFacts, club: BoardClub, now: Date): BoardVie
     return {
       entryTimeId: entry.entryTimeId, row, column: index, opens: column.opens, opensText: column.text,
       leavesText: formatTime(addMinutes(entry.opensAt, stop.stayMinutes), club),
-      places: Math.max(0, entry.places), isOver: isOver(entry, stop.closedAt, now),
+      places: Math.max(0, entry.places), isOver: isOver(entry, entry.stopClosedAt, now),
     };
   };
   return {
@@ -155,6 +158,60 @@ export function toBoard(facts: BoardFacts, club: BoardClub, now: Date): BoardVie
 export type PlacesLeft = { places: Record<string, number | null> };
 
 /** What the board fetches while someone looks: places left by entry time. */
-export function toPlacesLeft(entries: (EntryFacts & { stopClosedAt: Date | null })[], now: Date): PlacesLeft {
+export function toPlacesLeft(entries: readonly Pick<EntryFacts, 'entryTimeId' | 'graceUntil' | 'closedAt' | 'stopClosedAt' | 'places'>[], now: Date): PlacesLeft {
   return { places: Object.fromEntries(entries.map((entry) => [entry.entryTimeId, isOver(entry, entry.stopClosedAt, now) ? null : Math.max(0, entry.places)])) };
+}
+
+/** An open day as the database gives it to a list. */
+export type OpenDayFacts = {
+  id: Id<'openDay'>; slug: string; title: string; placeLine: string; howToCome: string | null; heldOn: string; opensAt: Date; closesAt: Date;
+  calledOffAt: Date | null; calledOffNote: string | null; gardens: number; figures: DayFigures;
+};
+/** An open day in the list of them. */
+export type OpenDayLine = { slug: string; title: string; line: string; sums: string; phase: DayPhase; note: string | null };
+
+/** Sets one line of the list of open days. */
+export const toOpenDayLine = (day: OpenDayFacts, club: ClubTime, now: Date): OpenDayLine => ({
+  slug: day.slug, title: day.title, line: whenAndWhere(day, club), sums: figuresSentence(day.figures, phaseOf(day, now), club.locale), phase: phaseOf(day, now), note: day.calledOffNote,
+});
+
+/** A stop with what its garden is, for the board, the map, the margin and the cautions. */
+export type OpenDayStop = Omit<StopFacts, 'subtitle' | 'isSteam' | 'hasWater'> & Hazards & { scaleOneTo: number; areaKey: string; areaName: string; plants: PlantRow[] };
+export type OpenDayRow = OpenDayFacts & { partyPeopleMax: number | null; stops: OpenDayStop[]; prices: PriceFacts[]; minutes: MinutesFact[] };
+
+/** Everything the page of an open day shows. Plain JSON. */
+export type OpenDayPage = OpenDayLine & {
+  caption: string;
+  howToCome: string | null;
+  board: BoardView;
+  gardens: { number: number; slug: string; name: string; areaKey: string; areaName: string }[];
+  flowers: FlowerView[];
+  cautions: { sentence: string; gardens: number[] }[];
+};
+
+/** What can hurt someone on the day, each thing once, with the numbers of its gardens. Steps and hosts' own words stand on the garden's page. */
+function cautionsOfDay(stops: readonly OpenDayStop[]): OpenDayPage['cautions'] {
+  const found = new Map<string, number[]>();
+  for (const stop of stops)
+    for (const sentence of cautionsOf({ ...stop, isStepFree: true, stepsNote: null, cautions: [] })) found.set(sentence, [...(found.get(sentence) ?? []), stop.number]);
+  return [...found].map(([sentence, gardens]) => ({ sentence, gardens }));
+}
+
+/** Sets the page of an open day. */
+export function toOpenDayPage(day: OpenDayRow, entries: EntryFacts[], club: BoardClub, now: Date): OpenDayPage {
+  const stops = day.stops.map((stop) => ({
+    stopId: stop.stopId, gardenId: stop.gardenId, number: stop.number, slug: stop.slug, name: stop.name, shortName: stop.shortName, stayMinutes: stop.stayMinutes,
+    subtitle: `${scaleInWords(stop.scaleOneTo)}, ${powersInWords(stop.powers)}`, isSteam: stop.powers.includes('live-steam'), isStepFree: stop.isStepFree, hasWater: stop.water !== 'none',
+  }));
+  const board = toBoard({ openDayId: day.id, stops, entries, prices: day.prices, minutes: day.minutes, partyPeopleMax: day.partyPeopleMax }, club, now);
+  const line = toOpenDayLine(day, club, now);
+  return {
+    ...line,
+    sums: line.phase === 'coming' ? `${line.sums} ${priceSentence(board.prices, board.stops.map((stop) => stop.prices), club)}` : line.sums,
+    caption: `Places left at each garden and entry time on ${formatDay(day.heldOn, club)}`,
+    howToCome: day.howToCome, board,
+    gardens: day.stops.map(({ number, slug, name, areaKey, areaName }) => ({ number, slug, name, areaKey, areaName })),
+    flowers: toFlowersOf(day.stops, day.heldOn, 5),
+    cautions: cautionsOfDay(day.stops),
+  };
 }

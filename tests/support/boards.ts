@@ -50,7 +50,7 @@ const stopAt = (row: number): StopFacts => {
   const [name, shortName, subtitle, notes] = GARDENS[row % GARDENS.length] ?? ['', '', '', ''];
   return {
     stopId: stopIdAt(row), gardenId: gardenIdAt(row), number: row + 1, slug: `garden-${row + 1}`, name, shortName, subtitle,
-    stayMinutes: 35, isSteam: notes.includes('s'), isStepFree: notes.includes('w'), hasWater: notes.includes('p'), closedAt: null,
+    stayMinutes: 35, isSteam: notes.includes('s'), isStepFree: notes.includes('w'), hasWater: notes.includes('p'),
   };
 };
 
@@ -65,7 +65,7 @@ export function boardFacts({ on = '2027-05-15', gardens = 7, starts = STARTS, pl
     entries: rows.flatMap((row) => starts.flatMap((time, column) => {
       const places = placesAt(row, column);
       const opensAt = instantOf(on, time, boardClub.timeZone);
-      return places === null ? [] : [{ entryTimeId: entryIdAt(row, time), stopId: stopIdAt(row), opensAt, graceUntil: new Date(opensAt.getTime() + 20 * 60_000), closedAt: null, places }];
+      return places === null ? [] : [{ entryTimeId: entryIdAt(row, time), stopId: stopIdAt(row), opensAt, graceUntil: new Date(opensAt.getTime() + 20 * 60_000), closedAt: null, stopClosedAt: null, places }];
     })),
     prices: [{ stopId: null, kind: 'adult', amountMinor: 800 }, { stopId: null, kind: 'child', amountMinor: 400 }, { stopId: null, kind: 'babe', amountMinor: 0 }],
     minutes: rows.flatMap((from) => rows.map((to) => ({ fromGardenId: gardenIdAt(from), toGardenId: gardenIdAt(to), minutes: MINUTES[from % 7]?.[to % 7] ?? 15 }))),

@@ -1,5 +1,4 @@
 import type { BoardCell, BoardStop, BoardView, PlacesLeft } from '../views';
-import type { Party } from './prices';
 import { clashWith, minutesFor, reasonForRun, reasonInFull, type Clash, type Naming, type Sitting } from './reach';
 import { counted } from './words';
 
@@ -46,9 +45,6 @@ export function onlyFitting(board: BoardView, only: Only, chosen: readonly strin
     minutes: kept.map((from) => kept.map((to) => minutesFor(board.minutes, from, to))),
   };
 }
-
-/** The people of a party that count against places: babes only when the club says so. */
-export const headsOf = (party: Party, babesTakePlace: boolean): number => party.adults + party.children + (babesTakePlace ? party.babes : 0);
 
 /** A cell as reachability sees it. */
 export const sittingOf = (board: BoardView, cell: BoardCell): Sitting => ({ row: cell.row, opens: cell.opens, stayMinutes: board.stops[cell.row]?.stayMinutes ?? 0 });

@@ -1,16 +1,15 @@
+import { costMinor, type People, type UnitPrices } from '@/lib/bookings/rules/party';
 import { formatMoney, formatPrice, sumMinor } from '@/lib/core/money';
 import { counted, inWordsFirst, listed } from './words';
 
 /** What one person of each kind pays for one visit, in minor units. */
-export type PersonPrices = { adultMinor: number; childMinor: number; babeMinor: number };
-/** The people of one booking. */
-export type Party = { adults: number; children: number; babes: number };
+export type PersonPrices = UnitPrices;
 /** How a club writes an amount. */
 export type Priced = { currency: string; locale: string };
 
 /** What a party pays for visits at these prices, in minor units. */
-export function partyTotalMinor(visits: readonly PersonPrices[], { adults, children, babes }: Party): number {
-  return sumMinor(visits.map((price) => price.adultMinor * adults + price.childMinor * children + price.babeMinor * babes));
+export function partyTotalMinor(visits: readonly PersonPrices[], party: People): number {
+  return sumMinor(visits.map((prices) => costMinor(party, prices)));
 }
 
 const isFree = (prices: PersonPrices) => prices.adultMinor === 0 && prices.childMinor === 0 && prices.babeMinor === 0;
@@ -32,7 +31,7 @@ export function priceSentence(prices: PersonPrices, overrides: readonly PersonPr
 }
 
 /** The people of a party: "2 adults and 1 child". */
-export function partyInWords({ adults, children, babes }: Party): string {
+export function partyInWords({ adults, children, babes }: People): string {
   return listed([
     ...(adults > 0 ? [counted(adults, 'adult', 'adults')] : []),
     ...(children > 0 ? [counted(children, 'child', 'children')] : []),
@@ -41,7 +40,7 @@ export function partyInWords({ adults, children, babes }: Party): string {
 }
 
 /** What a choice comes to: the sentence before the amount and the amount itself, "$60.00" or "free". */
-export function sumSentence(visits: readonly PersonPrices[], party: Party, priced: Priced): { words: string; amount: string } {
+export function sumSentence(visits: readonly PersonPrices[], party: People, priced: Priced): { words: string; amount: string } {
   const first = visits[0];
   const gardens = `${inWordsFirst(visits.length)} ${visits.length === 1 ? 'visit' : 'visits'}`;
   const totalMinor = partyTotalMinor(visits, party);

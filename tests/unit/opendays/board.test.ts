@@ -2,7 +2,7 @@ import { describe, expect, test } from 'vitest';
 import { boardStates, cellState, chosenCells, onlyFitting, runsOf, settingOf, spokenName, withPlaces } from '@/lib/opendays/rules/board';
 import { dayLine, journeyInWords, journeyNote, keepWords, visitsInLine } from '@/lib/opendays/rules/day-line';
 import { graphOf } from '@/lib/opendays/rules/day-graph';
-import { partyMistake, partyRefusal } from '@/lib/opendays/rules/party';
+import { headsTyped, partyMistake } from '@/lib/opendays/rules/party';
 import { partyTotalMinor, priceSentence, sumSentence } from '@/lib/opendays/rules/prices';
 import { toBoard, toPlacesLeft } from '@/lib/opendays/views';
 import { aBoard, boardClub, boardFacts, entryIdAt, longBefore, STARTS, stopIdAt } from '@/tests/support/boards';
@@ -106,7 +106,7 @@ describe('fresher places', () => {
     const [first] = boardFacts().entries;
     if (!first) throw new Error('the invented day has entry times');
 
-    expect(toPlacesLeft([{ ...first, places: -2, stopClosedAt: null }], longBefore).places).toEqual({ [first.entryTimeId]: 0 });
+    expect(toPlacesLeft([{ ...first, places: -2 }], longBefore).places).toEqual({ [first.entryTimeId]: 0 });
     expect(toPlacesLeft([{ ...first, stopClosedAt: longBefore }], longBefore).places).toEqual({ [first.entryTimeId]: null });
   });
 });
@@ -199,13 +199,8 @@ describe('prices', () => {
 });
 
 describe('a party', () => {
-  test.each([
-    [{ adults: 0, children: 0, babes: 0 }, 'nobody_in_party'],
-    [{ adults: 0, children: 2, babes: 0 }, 'child_needs_adult'],
-    [{ adults: 5, children: 4, babes: 0 }, null],
-    [{ adults: 5, children: 4, babes: 1 }, 'party_too_large'],
-  ])('of %o', (party, refusal) => {
-    expect(partyRefusal(party, boardClub.partyPeopleMax)).toBe(refusal);
+  test.each([['', 0], [' 3 ', 3], ['0', 0], ['99', 99], ['100', null], ['-1', null], ['3.5', null], ['1e9', null], ['three', null]])('typed as %j is read as %j', (text, heads) => {
+    expect(headsTyped(text)).toBe(heads);
   });
 
   test('that is too large is told the limit in words', () => {
