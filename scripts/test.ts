@@ -24,7 +24,7 @@ function say(line: string) {
 async function run(label: string, [file = '', ...args]: string[], env: Record<string, string> = {}): Promise<boolean> {
   say(label);
   const heartbeat = setInterval(() => say(`${label} …`), 30_000);
-  const child = spawn(file, args, { cwd: root, detached: true, stdio: ['ignore', 'pipe', 'pipe'], env: { ...process.env, ...env, FORCE_COLOR: '0' } });
+  const child = spawn(file, args, { cwd: root, detached: true, stdio: ['ignore', 'pipe', 'pipe'], env: { ...process.env, ...env, NO_COLOR: '1' } });
   if (child.pid) running.add(child.pid);
   for (const stream of [child.stdout, child.stderr]) {
     createInterface({ input: stream }).on('line', (line) => {
@@ -80,9 +80,7 @@ async function browser() {
 
 async function build() {
   say('Production build');
-  const ticking = setInterval(() => say('Production build …'), 15_000);
   const problem: unknown = await ensureBuild().then(() => null, (error: unknown) => error);
-  clearInterval(ticking);
   if (problem instanceof Error) say(problem.message);
   check('Production build', problem === null);
   return problem === null;
