@@ -59,8 +59,12 @@ async function lockCharge(tx: Tx, chargeId: Id<'charge'>) {
     amountMinor: charges.amountMinor, currency: charges.currency, waivedAt: charges.waivedAt,
   }).from(charges).where(eq(charges.id, chargeId)).for('no key update'));
   if (!charge || charge.waivedAt !== null) throw new Refusal('not_found');
-  const paid = only(await tx.select({ sum: sql<number>`coalesce(sum(${payments.amountMinor}), 0)::int` }).from(payments).where(eq(payments.chargeId, chargeId)));
-  return { ...charge, paidMinor: paid.sum };
+  return { ...charge, paidMinor: await paidMinor(tx, chargeId) };
+}
+
+/** What has come for a charge so far, in minor units. */
+export async function paidMinor(tx: Tx, chargeId: Id<'charge'>): Promise<number> {
+  return only(await tx.select({ sum: sql<number>`coalesce(sum(${payments.amountMinor}), 0)::int` }).from(payments).where(eq(payments.chargeId, chargeId))).sum;
 }
 
 async function makeTerm(tx: Tx, ctx: Ctx, charge: { householdId: Id<'household'>; classKey: string; termFrom: Day; termTo: Day }): Promise<void> {
