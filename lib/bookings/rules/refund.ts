@@ -42,6 +42,24 @@ export function refundRuleWords(entryAt: Date, rule: RefundRule, club: ClubTime)
   return sentences.join(' ');
 }
 
+/** The same rule for all of a party's visits at once, counted from each one's own time; what a letter says. */
+export function refundRuleForAll({ refundRules, changesEndMinutes }: RefundRule): string {
+  const end = lengthWords(changesEndMinutes);
+  const steps = [...refundRules].filter((step) => step.percent > 0).sort((a, b) => b.hoursBefore - a.hoursBefore);
+  const useful = steps.filter((step, at) => steps.slice(at + 1).every((later) => later.percent < step.percent));
+  if (useful.length === 0) return `Places may be given back until ${end} before each time; nothing is returned, and someone else can come.`;
+  const minutes = useful.map((step) => Math.max(step.hoursBefore * 60, changesEndMinutes));
+  const sentences = useful.map((step, at) => `${at === 0 ? 'Given back' : 'After that,'} until ${lengthWords(minutes[at] ?? 0)} before a time: ${shareWords(step.percent)} is returned.`);
+  if ((minutes.at(-1) ?? 0) > changesEndMinutes) sentences.push(`After that, until ${end} before: none of it.`);
+  return sentences.join(' ');
+}
+
+function lengthWords(minutes: number): string {
+  if (minutes % (7 * 1440) === 0 && minutes > 0) return minutes === 7 * 1440 ? 'a week' : `${minutes / (7 * 1440)} weeks`;
+  if (minutes % 1440 === 0 && minutes > 0) return minutes === 1440 ? 'a day' : `${minutes / 1440} days`;
+  return minutes % 60 === 0 && minutes > 60 ? `${minutes / 60} hours` : `${minutes} minutes`;
+}
+
 /** What pressing the button returns, said before it is pressed: "$30.00 of $60.00 comes back to your card: half of it." */
 export function refundWords({ amountMinor: paidMinor, currency }: Money, entryAt: Date, rule: RefundRule, club: ClubTime, now: Date): string {
   if (paidMinor === 0) return 'These places cost nothing, so nothing comes back. Someone else can come.';

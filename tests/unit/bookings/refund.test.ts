@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { changeRefusal, refundMinor, refundPercent, refundRuleWords, refundWords, type RefundRule } from '@/lib/bookings/rules/refund';
+import { changeRefusal, refundMinor, refundPercent, refundRuleForAll, refundRuleWords, refundWords, type RefundRule } from '@/lib/bookings/rules/refund';
 
 const club = { timeZone: 'America/New_York', locale: 'en-US', hourCycle: 'h23' } as const;
 const rule: RefundRule = { refundRules: [{ hoursBefore: 168, percent: 100 }, { hoursBefore: 1, percent: 50 }], changesEndMinutes: 60 };
@@ -43,6 +43,13 @@ describe('what it says before the button', () => {
       .toBe('Given back by 11:30 on Wednesday 12 May: 80 % of it. After that, and until 10:30 on Saturday 15 May: none of it, but someone else can come.');
     expect(refundRuleWords(entryAt, { refundRules: [], changesEndMinutes: 60 }, club))
       .toBe('Places may be given back until 10:30 on Saturday 15 May. Nothing is returned, and someone else can come.');
+  });
+
+  it('says the rule for all visits at once, counted from each one\'s own time', () => {
+    expect(refundRuleForAll(rule)).toBe('Given back until a week before a time: all of it is returned. After that, until 60 minutes before a time: half of it is returned.');
+    expect(refundRuleForAll({ refundRules: [{ hoursBefore: 48, percent: 80 }], changesEndMinutes: 120 }))
+      .toBe('Given back until 2 days before a time: 80 % of it is returned. After that, until 2 hours before: none of it.');
+    expect(refundRuleForAll({ refundRules: [], changesEndMinutes: 60 })).toBe('Places may be given back until 60 minutes before each time; nothing is returned, and someone else can come.');
   });
 
   it('keeps the wall clock when clocks change between the step and the visit', () => {
