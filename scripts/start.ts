@@ -79,14 +79,14 @@ async function hasClub(url: string): Promise<boolean> {
 
 function welcome(ports: StackSettings['ports'], { plantedOn, signIns }: Planted): string {
   const today = new Date().toISOString().slice(0, 10);
-  const widest = Math.max(...signIns.map((one) => one.email.length));
+  const wide = (field: 'email' | 'password') => Math.max(...signIns.map((one) => one[field].length));
   return `
   The club is open:   http://127.0.0.1:${ports.server}
   Letters it sends:   http://127.0.0.1:${ports.inbox}
   Card for trying:    4242 4242 4242 4242 (others stand on the pay page)
 
-  Sign in with one of these; the code comes as a letter:
-${signIns.map((one) => `    ${one.email.padEnd(widest)}  ${one.does}`).join('\n')}
+  Sign in as one of these, with the code that comes as a letter or with the password:
+${signIns.map((one) => `    ${one.email.padEnd(wide('email'))}  ${one.password.padEnd(wide('password'))}  ${one.does}`).join('\n')}
 ${plantedOn === today ? '' : `\n  The demo club's days count from ${plantedOn}. For days from today: scripts/start --fresh\n`}
   Ctrl-C stops all of it.
 `;

@@ -4,7 +4,7 @@ import { script } from './processes';
 import { root } from './places';
 import { command } from './step';
 
-const planted = z.object({ plantedOn: z.string(), signIns: z.array(z.object({ email: z.string(), does: z.string() })) });
+const planted = z.object({ plantedOn: z.string(), signIns: z.array(z.object({ name: z.string(), email: z.string(), does: z.string(), password: z.string() })) });
 
 export type Planted = z.output<typeof planted>;
 

@@ -1,7 +1,8 @@
 // Plants the demo club, once: the comment on the database says when it was complete, so a broken-off planting shows.
 // Run with the portal's settings and MIGRATE_DATABASE_URL; prints one line of JSON: the day, and the demo sign-ins.
 import { Client } from 'pg';
-import { seed, signIns } from '../seed/run';
+import { seed } from '../seed/run';
+import { DEMO_SIGN_INS } from '../seed/sign-ins';
 
 const owner = new Client({ connectionString: process.env['MIGRATE_DATABASE_URL'] });
 await owner.connect();
@@ -13,5 +14,5 @@ if (plantedOn === undefined) {
   await owner.query(`do $$ begin execute format('comment on database %I is %L', current_database(), 'planted ${plantedOn}'); end $$`);
 }
 await owner.end();
-console.log(JSON.stringify({ plantedOn, signIns }));
+console.log(JSON.stringify({ plantedOn, signIns: DEMO_SIGN_INS }));
 process.exit(0); // the seed's own pool may still hold a connection

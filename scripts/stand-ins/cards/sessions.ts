@@ -29,7 +29,8 @@ const createParams = z.strictObject({
   client_reference_id: z.string().max(200).optional(),
   customer_email: z.email().optional(),
   metadata,
-  payment_method_types: z.preprocess(asList, z.array(z.literal('card'))).default(['card']),
+  payment_method_types: z.preprocess(asList, z.array(z.literal('card'))).optional(),
+  allowed_payment_method_types: z.preprocess(asList, z.array(z.literal('card'))).optional(),
   allowed_payment_method_types: z.preprocess(asList, z.array(z.literal('card'))).optional(), // the newer name: only these are offered
   payment_intent_data: z.strictObject({
     metadata, description: z.string().max(1000).optional(), receipt_email: z.email().optional(),
@@ -42,7 +43,7 @@ const createParams = z.strictObject({
 });
 
 const NULLS = {
-  adaptive_pricing: null, after_expiration: null, allow_promotion_codes: null, allowed_payment_method_types: null, billing_address_collection: null,
+  adaptive_pricing: null, after_expiration: null, allow_promotion_codes: null, billing_address_collection: null,
   client_secret: null, collected_information: null, consent: null, consent_collection: null, currency_conversion: null, customer: null,
   customer_account: null, integration_identifier: null, invoice: null, invoice_creation: null, managed_payments: null, origin_context: null,
   payment_link: null, payment_method_configuration_details: null, permissions: null, recovered_from: null, saved_payment_method_options: null,
@@ -76,7 +77,7 @@ export class Sessions {
       url: `${this.origin()}/pay/${id}`, success_url: params.success_url, cancel_url: params.cancel_url ?? null,
       client_reference_id: params.client_reference_id ?? null, customer_email: params.customer_email ?? null,
       customer_details: params.customer_email ? customerDetails(params.customer_email, null) : null, customer_creation: 'if_required',
-      metadata: params.metadata, payment_method_types: ['card'], payment_method_collection: 'if_required', payment_method_options: {},
+      metadata: params.metadata, payment_method_types: ['card'], allowed_payment_method_types: params.allowed_payment_method_types ?? null, payment_method_collection: 'if_required', payment_method_options: {},
       locale: params.locale ?? null, submit_type: params.submit_type ?? null, custom_fields: [], shipping_options: [], discounts: [],
       custom_text: { after_submit: null, shipping_address: null, submit: null, terms_of_service_acceptance: null },
       phone_number_collection: { enabled: false }, total_details: { amount_discount: 0, amount_shipping: 0, amount_tax: 0 },
