@@ -1,4 +1,5 @@
 import { sumMinor } from '@/lib/core/money';
+import type { Method } from '@/lib/core/words';
 
 /** The accounts that the rules below post to; the migrations make them. */
 export const ACCOUNTS = [
@@ -20,8 +21,6 @@ export const FUNDS = [
 ] as const;
 export type FundKey = (typeof FUNDS)[number]['key'];
 
-/** How money comes in. */
-export type PayMethod = 'card' | 'cheque' | 'cash' | 'transfer';
 /** What it is for: tickets go to the open days' fund, dues to the general one. */
 export type MoneyFor = 'tickets' | 'dues';
 
@@ -31,17 +30,17 @@ export type MoneyFor = 'tickets' | 'dues';
  * came for places that are gone, so it is owed back at once. `fee`: what the card service kept of a payment.
  */
 export type BusinessEvent =
-  | { kind: 'received'; method: PayMethod; for: MoneyFor; amountMinor: number }
-  | { kind: 'unplaced'; amountMinor: number }
+  | { kind: 'received'; method: Method; for: MoneyFor; amountMinor: number }
+  | { kind: 'unplaced'; for: MoneyFor; amountMinor: number }
   | { kind: 'refund-owed'; for: MoneyFor; amountMinor: number }
-  | { kind: 'refund-paid'; method: PayMethod; for: MoneyFor; amountMinor: number }
-  | { kind: 'refund-failed'; method: PayMethod; for: MoneyFor; amountMinor: number }
+  | { kind: 'refund-paid'; method: Method; for: MoneyFor; amountMinor: number }
+  | { kind: 'refund-failed'; method: Method; for: MoneyFor; amountMinor: number }
   | { kind: 'fee'; for: MoneyFor; amountMinor: number };
 
 /** One side of an entry: debits are positive, credits negative. */
 export type PostingLine = { account: AccountCode; fund: FundKey; amountMinor: number };
 
-const HELD_IN = { card: 'cards-clearing', cheque: 'cheques-in-hand', cash: 'cash-in-hand', transfer: 'bank' } as const satisfies Record<PayMethod, AccountCode>;
+const HELD_IN = { card: 'cards-clearing', cheque: 'cheques-in-hand', cash: 'cash-in-hand', transfer: 'bank' } as const satisfies Record<Method, AccountCode>;
 const INCOME = { tickets: 'ticket-income', dues: 'dues-income' } as const satisfies Record<MoneyFor, AccountCode>;
 const FUND = { tickets: 'open-days', dues: 'general' } as const satisfies Record<MoneyFor, FundKey>;
 
@@ -55,7 +54,7 @@ function moved(from: AccountCode, to: AccountCode, fund: FundKey, amountMinor: n
 export function postingsFor(event: BusinessEvent): PostingLine[] {
   switch (event.kind) {
     case 'received': return moved(INCOME[event.for], HELD_IN[event.method], FUND[event.for], event.amountMinor);
-    case 'unplaced': return moved('refunds-owed', 'cards-clearing', 'open-days', event.amountMinor);
+    case 'unplaced': return moved('refunds-owed', 'cards-clearing', FUND[event.for], event.amountMinor);
     case 'refund-owed': return moved('refunds-owed', INCOME[event.for], FUND[event.for], event.amountMinor);
     case 'refund-paid': return moved(HELD_IN[event.method], 'refunds-owed', FUND[event.for], event.amountMinor);
     case 'refund-failed': return moved('refunds-owed', HELD_IN[event.method], FUND[event.for], event.amountMinor);
@@ -69,3 +68,6 @@ export const reversalOf = (lines: readonly PostingLine[]): PostingLine[] => line
 /** What an account holds after these postings. */
 export const balanceOf = (account: AccountCode, lines: readonly PostingLine[]): number =>
   sumMinor(lines.filter((line) => line.account === account).map((line) => line.amountMinor));
+
+/** Minutes until the next try after `tries` earlier ones: 1, 2, 4 … at most 12 hours, without a last try. */
+export const nextTryMinutes = (tries: number): number => Math.min(2 ** Math.min(tries, 10), 720);

@@ -66,9 +66,12 @@ async function asked<T>(call: () => Promise<T>): Promise<T> {
 
 const idOf = (object: string | { id: string } | null | undefined): string | null => (typeof object === 'string' ? object : object?.id ?? null);
 
+const OVER = ['complete', 'expired'] as const;
+
 function snapshotOf(session: Stripe.Checkout.Session): SessionSnapshot {
+  const status = OVER.find((over) => over === session.status) ?? 'open';
   return {
-    sessionId: session.id, attemptId: session.metadata?.['attempt'] ?? null, status: session.status === 'complete' || session.status === 'expired' ? session.status : 'open', isPaid: session.payment_status === 'paid',
+    sessionId: session.id, attemptId: session.metadata?.['attempt'] ?? null, status, isPaid: session.payment_status === 'paid',
     paymentIntentId: idOf(session.payment_intent), amountMinor: session.amount_total ?? 0, currency: (session.currency ?? '').toUpperCase(),
     expiresAt: new Date(session.expires_at * 1000), url: session.url,
   };

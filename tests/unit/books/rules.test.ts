@@ -9,7 +9,7 @@ const method = fc.constantFrom('card', 'cheque', 'cash', 'transfer' as const);
 const purpose = fc.constantFrom('tickets', 'dues' as const);
 const anEvent: fc.Arbitrary<BusinessEvent> = fc.oneof(
   fc.record({ kind: fc.constant('received' as const), method, for: purpose, amountMinor }),
-  fc.record({ kind: fc.constant('unplaced' as const), amountMinor }),
+  fc.record({ kind: fc.constant('unplaced' as const), for: purpose, amountMinor }),
   fc.record({ kind: fc.constant('refund-owed' as const), for: purpose, amountMinor }),
   fc.record({ kind: fc.constant('refund-paid' as const), method, for: purpose, amountMinor }),
   fc.record({ kind: fc.constant('refund-failed' as const), method, for: purpose, amountMinor }),

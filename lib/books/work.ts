@@ -1,0 +1,12 @@
+import 'server-only';
+import { workerContext } from '@/lib/club/queries';
+import { bookFees } from './commands/fees';
+import { sendRefunds } from './commands/refunds';
+
+export const tasks: Record<string, (payload: unknown) => Promise<void>> = {};
+
+/** Refunds that are due go to the processor; what it kept of each payment is booked. */
+export const sweeps: (() => Promise<void>)[] = [
+  async function refundsDue() { await sendRefunds(await workerContext('refunds')); },
+  async function cardFees() { await bookFees(await workerContext('card fees')); },
+];
