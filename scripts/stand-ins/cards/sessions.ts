@@ -31,7 +31,6 @@ const createParams = z.strictObject({
   metadata,
   payment_method_types: z.preprocess(asList, z.array(z.literal('card'))).optional(),
   allowed_payment_method_types: z.preprocess(asList, z.array(z.literal('card'))).optional(),
-  allowed_payment_method_types: z.preprocess(asList, z.array(z.literal('card'))).optional(), // the newer name: only these are offered
   payment_intent_data: z.strictObject({
     metadata, description: z.string().max(1000).optional(), receipt_email: z.email().optional(),
     statement_descriptor_suffix: z.string().max(22).optional(), capture_method: z.literal('automatic').optional(),
