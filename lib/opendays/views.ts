@@ -91,7 +91,8 @@ export type BoardClub = ClubTime & {
 
 const minuteOf = (at: Date) => Math.round(at.getTime() / 60_000);
 
-function pricesOf(facts: PriceFacts[], stopId: Id<'stop'> | null): PersonPrices {
+/** What a visit costs: a stop's own prices over the day's; `null` gives the day's. */
+export function pricesOf(facts: readonly PriceFacts[], stopId: Id<'stop'> | null): PersonPrices {
   const priceOf = (kind: PriceFacts['kind']) =>
     (facts.find((each) => each.stopId === stopId && each.kind === kind) ?? facts.find((each) => each.stopId === null && each.kind === kind))?.amountMinor ?? 0;
   return { adultMinor: priceOf('adult'), childMinor: priceOf('child'), babeMinor: priceOf('babe') };
