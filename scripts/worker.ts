@@ -3,47 +3,45 @@
 import { EventEmitter } from 'node:events';
 import { Logger, makeWorkerUtils, run, type Runner, type WorkerEvents } from 'graphile-worker';
 import { Pool } from 'pg';
+import { getDb } from '../db/client';
+import { env } from '../lib/infra/env';
+import { causeOf, log } from '../lib/infra/log';
 import { startHeartbeat } from './worker/heartbeat';
 import { allSweeps, allTasks, type Work } from './worker/tasks';
 
 const SWEEP_SECONDS = 15;
 const CONCURRENCY = 4;
 
-const queueUrl = process.env['QUEUE_DATABASE_URL'];
-if (!queueUrl) {
-  console.error('Set QUEUE_DATABASE_URL; .env.example explains it.');
-  process.exit(1);
+/** The settings, or one clear line and the end. */
+function settings() {
+  try {
+    const { QUEUE_DATABASE_URL: queueUrl } = env();
+    if (queueUrl === undefined) throw new Error('The environment is not right: QUEUE_DATABASE_URL is missing. See .env.example.');
+    return { queueUrl };
+  } catch (error) {
+    console.error(error instanceof Error ? error.message : error);
+    process.exit(1);
+  }
 }
+const { queueUrl } = settings();
 
-/** A failed query's message holds its parameters, so only what kind of failure it was is written down. */
-function kindOf(error: unknown): string {
-  if (!(error instanceof Error)) return typeof error;
-  const code = [error.cause, error].map((e) => (e && typeof e === 'object' && 'code' in e ? String(e.code) : null)).find((c) => c);
-  return [error.name, code].filter(Boolean).join(' ');
-}
-
-function say(event: string, facts: Record<string, unknown> = {}) {
-  console.log(JSON.stringify({ at: new Date().toISOString(), event, ...facts }));
-}
-
-/** The same tasks, whose failures carry no one's data into the queue's table or the log. */
+/** The same tasks, whose failures carry no one's data into the queue's table: only what kind of failure it was. */
 function discreet(tasks: Work['tasks']): Work['tasks'] {
   return Object.fromEntries(Object.entries(tasks).map(([name, task]) => [name, async (payload) => {
     try {
       await task(payload);
     } catch (error) {
-      const frames = error instanceof Error ? error.stack?.split('\n').filter((line) => /^\s+at /.test(line)).slice(0, 8) : [];
-      say('job failed', { task: name, kind: kindOf(error), frames });
-      throw new Error(`${name}: ${kindOf(error)}`);
+      log.error('job', error, { task: name });
+      throw new Error(`${name}: ${causeOf(error).code ?? (error instanceof Error ? error.name : 'failed')}`);
     }
   }]));
 }
 
 const quiet = new Logger(() => (level, message, meta) => {
-  if ((level === 'error' || level === 'warning') && !meta?.['failure']) say(message);
+  if ((level === 'error' || level === 'warning') && !meta?.['failure']) log.warn('queue', { message });
 });
 const pool = new Pool({ connectionString: queueUrl, max: CONCURRENCY + 3 });
-const lost = () => say('queue connection lost');
+const lost = (error: Error) => log.error('queue connection lost', error);
 pool.on('error', lost).on('connect', (client) => client.on('error', lost));
 
 let runner: Runner | null = null;
@@ -55,12 +53,12 @@ const heart = await startHeartbeat(queueUrl, utils, async () => {
   runner = await run({ pgPool: pool, taskList: discreet(allTasks()), concurrency: CONCURRENCY, noHandleSignals: true, logger: quiet, events, pollInterval: 1000 });
   return names;
 });
-say('worker ready', { tasks: Object.keys(allTasks()).length, sweeps: allSweeps().length });
+log.info('worker ready', { tasks: Object.keys(allTasks()).length, sweeps: allSweeps().length });
 
 let sweeping: Promise<void> | null = null;
 async function sweepOnce() {
-  await heart.beat().catch((error: unknown) => say('heartbeat failed', { kind: kindOf(error) }));
-  for (const sweep of allSweeps()) await sweep().catch((error: unknown) => say('sweep failed', { sweep: sweep.name, kind: kindOf(error) }));
+  await heart.beat().catch((error: unknown) => log.error('heartbeat', error));
+  for (const sweep of allSweeps()) await sweep().catch((error: unknown) => log.error('sweep', error, { sweep: sweep.name }));
 }
 const sweepNow = () => {
   sweeping ??= sweepOnce().finally(() => { sweeping = null; });
@@ -79,6 +77,7 @@ async function stop() {
   await heart.end();
   await utils.release();
   await pool.end();
+  await getDb().$client.end();
   process.exit(0);
 }
 process.on('SIGTERM', () => void stop());

@@ -51,9 +51,12 @@ need_debian() {
     as_root=(sudo -n)
   fi
   need_room / 1000
-  export DEBIAN_FRONTEND=noninteractive
+  if [ "$1" = postgresql ] && [ ! -e /etc/postgresql-common/createcluster.conf ]; then
+    # Debian would also make and start a database for the whole machine; this project has its own
+    "${as_root[@]}" sh -c 'mkdir -p /etc/postgresql-common && echo "create_main_cluster = false" >/etc/postgresql-common/createcluster.conf'
+  fi
   step "Fetching Debian's package lists" "${as_root[@]}" apt-get update -q || true # an old list may still do
-  step "Installing $*" "${as_root[@]}" env DEBIAN_FRONTEND=noninteractive apt-get install -y -q --no-install-recommends "$@" || {
+  step "Installing $*" "${as_root[@]}" env DEBIAN_FRONTEND=noninteractive apt-get install -y -q --no-install-recommends -o Dpkg::Options::=--force-confold "$@" || {
     ! full_disk || trouble "Installing $* did not work because the disk is full. Make room, then run this again."
     trouble "$* could not be had from Debian's package server ($(grep -m1 -E '^(E|Err):?' "$log" || tail -1 "$log")). Check the network, then run this again."
   }
