@@ -1,5 +1,8 @@
 // What the worker can do: each domain's `lib/<domain>/work.ts`, listed by hand so that a missing one is seen in review.
 // Add a domain: import its `work` here and put it into the list.
+import * as bookings from '../../lib/bookings/work';
+import * as books from '../../lib/books/work';
+import * as letters from '../../lib/letters/work';
 
 /** What `lib/<domain>/work.ts` exports: what is done for each job, and what looks every 15 seconds for rows that are due. */
 export type Work = {
@@ -7,7 +10,7 @@ export type Work = {
   sweeps?: (() => Promise<void>)[];
 };
 
-const domains: Work[] = [];
+const domains: Work[] = [bookings, books, letters];
 
 /** Every domain's tasks by name; two domains with one name is a mistake that stops the worker. */
 export function allTasks(): Work['tasks'] {
