@@ -60,7 +60,7 @@ async function settleUnanswered(ctx: SystemCtx, attempt: OpenAttempt): Promise<S
     await keepSession(ctx.db, attempt.id, session);
     return expireSession(session.sessionId);
   }
-  await ctx.db.update(paymentAttempts).set({ endedAt: ctx.now, outcome: 'failed' }).
+  await ctx.db.update(paymentAttempts).set({ endedAt: ctx.now, outcome: 'failed' })
     .where(and(eq(paymentAttempts.id, attempt.id), isNull(paymentAttempts.endedAt), isNull(paymentAttempts.sessionId)));
   return null;
 }
