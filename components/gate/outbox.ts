@@ -1,11 +1,12 @@
 import { z } from 'zod';
 import type { FactAnswers } from '@/lib/gate/schema';
-import { GATE_KINDS, type GateFact } from '@/lib/gate/rules/facts';
+import { FACT_KINDS } from '@/lib/core/words';
+import type { GateFact } from '@/lib/gate/rules/facts';
 import type { Keep } from './device';
 
 const heads = z.number().int();
 const keptFact = z.object({
-  id: z.string(), kind: z.enum(GATE_KINDS), undoesId: z.string().nullable(), visitId: z.string().nullable(), adults: heads, children: heads, babes: heads,
+  id: z.string(), kind: z.enum(FACT_KINDS), undoesId: z.string().nullable(), visitId: z.string().nullable(), adults: heads, children: heads, babes: heads,
   at: z.iso.datetime(), verdict: z.string().nullable(), reason: z.string().nullable(), isSent: z.boolean(),
 });
 /** A fact as this phone keeps it until the list holds it. `at` is by the phone's own clock. */

@@ -29,7 +29,7 @@ export async function makeGatePass({ db, actor, now }: AccountCtx, input: MakeGa
       stopId: stop.id, helper: input.helper, secretHash: hashSecret(secret), devicesAllowed: input.devices, madeAt: now, madeBy: actor.accountId,
     }).returning({ id: gatePasses.id }));
     const after = { stop: stop.number, helper: input.helper, devices: input.devices };
-    await recordChange(tx, { actor, now }, { action: 'makeGatePass', subjectKind: 'gatePass', subjectId: made.id, after });
+    await recordChange(tx, { actor, now }, { action: 'made a gate pass', subjectKind: 'gatePass', subjectId: made.id, after });
     return { gatePassId: made.id, helper: input.helper, secret };
   });
 }
@@ -43,7 +43,7 @@ export async function revokeGatePass({ db, actor, now }: AccountCtx, input: Revo
     if (pass.revokedAt !== null) return;
     await tx.update(gatePasses).set({ revokedAt: now }).where(eq(gatePasses.id, input.gatePassId));
     const after = { helper: pass.helper, why: input.why };
-    await recordChange(tx, { actor, now }, { action: 'revokeGatePass', subjectKind: 'gatePass', subjectId: input.gatePassId, after });
+    await recordChange(tx, { actor, now }, { action: 'took a gate pass back', subjectKind: 'gatePass', subjectId: input.gatePassId, after });
   });
 }
 

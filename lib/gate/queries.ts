@@ -1,8 +1,8 @@
 import 'server-only';
 import { createPublicKey, verify } from 'node:crypto';
-import { and, asc, count, desc, eq, isNotNull, isNull, lt, max, sum } from 'drizzle-orm';
+import { and, asc, count, eq, isNotNull, isNull, lt, max, sum } from 'drizzle-orm';
 import type { Queryable } from '@/db/client';
-import { bookingContacts, bookings, ticketKeys, visits } from '@/db/schema/bookings';
+import { bookingContacts, bookings, visits } from '@/db/schema/bookings';
 import { gardenPlaces, gardens, placeShowings } from '@/db/schema/gardens';
 import { gateFacts } from '@/db/schema/gate';
 import { entryTimes, openDays, stops } from '@/db/schema/opendays';
@@ -13,6 +13,7 @@ import { firstOrNull } from '@/lib/core/only';
 import { Refusal } from '@/lib/core/refusal';
 import { addMinutes } from '@/lib/core/time';
 import type { AccountCtx, Ctx, GateActor } from '@/lib/infra/context';
+import { ticketPublicKeys } from '@/lib/infra/ticket-keys';
 import type { GateFact } from './rules/facts';
 import type { GateTicket } from './rules/verdict';
 import type { GateList, GatePlace, ReadTicketInput } from './schema';
@@ -53,7 +54,7 @@ export async function gateList({ db, actor, now, club }: Ctx<GateActor>): Promis
   const here = await findHere(db, actor.stopId);
   await db.update(gateDevices).set({ seenAt: now }).where(and(eq(gateDevices.id, actor.deviceId), lt(gateDevices.seenAt, addMinutes(now, -1))));
   const parties = await tickets(db, [eq(entryTimes.stopId, actor.stopId)]).limit(PARTIES_MAX);
-  const keys = await ticketKeysKnown(db);
+  const keys = await ticketPublicKeys(db);
   return {
     version: now.toISOString(),
     madeAt: now,
@@ -80,12 +81,6 @@ async function findHere(db: Queryable, stopId: Id<'stop'>) {
   return here;
 }
 
-/** The club's ticket keys, raw (RFC 8032: 32 bytes; a wrapped key ends with them). Old ones too: tickets outlive a key. */
-async function ticketKeysKnown(db: Queryable): Promise<{ keyId: number; publicKey: Buffer }[]> {
-  const rows = await db.select({ keyId: ticketKeys.id, publicKey: ticketKeys.publicKey }).from(ticketKeys).orderBy(desc(ticketKeys.madeAt)).limit(50);
-  return rows.map(({ keyId, publicKey }) => ({ keyId, publicKey: publicKey.subarray(-32) }));
-}
-
 /** Verifies a ticket's signature with Node's own Ed25519. */
 const verifierOf = (keys: readonly { keyId: number; publicKey: Buffer }[]): TicketVerifier => (bytes, signature, keyId) => {
   const key = keys.find((each) => each.keyId === keyId);
@@ -99,7 +94,7 @@ const verifierOf = (keys: readonly { keyId: number; publicKey: Buffer }[]): Tick
  * not one of ours. For phones that cannot verify, and for tickets that their list does not hold. No name is told.
  */
 export async function readTicket({ db }: Ctx<GateActor>, { text }: ReadTicketInput): Promise<{ ticket: GateTicket | null }> {
-  const facts = await verifyTicket(text, verifierOf(await ticketKeysKnown(db)));
+  const facts = await verifyTicket(text, verifierOf(await ticketPublicKeys(db)));
   if (facts === null) return { ticket: null };
   const found = firstOrNull(await tickets(db, [eq(visits.id, asId<'visit'>(facts.visitId))]).limit(1));
   if (!found) return { ticket: null };

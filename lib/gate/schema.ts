@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { idField } from '@/lib/core/ids';
 import { optionalTextField, textField, wholeField } from '@/lib/core/fields';
-import { GATE_KINDS } from './rules/facts';
+import { FACT_KINDS } from '@/lib/core/words';
 
 /** How many facts one batch may bring: a phone that was without signal sends several. */
 export const FACTS_A_BATCH = 200;
@@ -23,7 +23,7 @@ export const deviceNumber = z.object({ number: z.number().int() });
 
 /** One fact as a phone sends it. A refusal and an admission name a visit; an undo names what it takes back. */
 export const sentFact = z
-  .object({ id: idField<'gateFact'>(), kind: z.enum(GATE_KINDS), undoesId: idField<'gateFact'>().nullable(), visitId: idField<'visit'>().nullable(), ...people, at: instant, verdict: z.string().max(40).nullable(), reason })
+  .object({ id: idField<'gateFact'>(), kind: z.enum(FACT_KINDS), undoesId: idField<'gateFact'>().nullable(), visitId: idField<'visit'>().nullable(), ...people, at: instant, verdict: z.string().max(40).nullable(), reason })
   .refine((fact) => (fact.kind === 'undo') === (fact.undoesId !== null), { error: 'An undo names what it takes back, and nothing else does.' })
   .refine((fact) => fact.kind !== 'admit' || fact.visitId !== null, { error: 'An admission names its ticket.' })
   .refine((fact) => fact.kind === 'undo' || fact.kind === 'refuse' || fact.adults + fact.children + fact.babes > 0, { error: 'Say how many people.' });
@@ -68,7 +68,7 @@ export const gateList = z.object({
   time: z.object({ timeZone: z.string(), locale: z.string(), hourCycle: z.enum(['h12', 'h23']) }),
   parties: z.array(listedParty),
   /** What was done at this stop, by every phone; times set right by the server's clock. */
-  facts: z.array(z.object({ id: z.string(), kind: z.enum(GATE_KINDS), undoesId: z.string().nullable(), visitId: z.string().nullable(), ...people, at: instant, deviceId: z.string(), reason: z.string().nullable() })),
+  facts: z.array(z.object({ id: z.string(), kind: z.enum(FACT_KINDS), undoesId: z.string().nullable(), visitId: z.string().nullable(), ...people, at: instant, deviceId: z.string(), reason: z.string().nullable() })),
   /** The club's ticket keys: raw Ed25519 public keys (RFC 8032) in base64url. */
   keys: z.array(z.object({ keyId: z.number().int(), publicKey: z.string() })),
 });

@@ -1,11 +1,12 @@
-import { headsFit, headsLeft, type GateKind, type Heads } from './facts';
+import type { FactKind } from '@/lib/core/words';
+import { headsFit, headsLeft, type Heads } from './facts';
 import { storyOf, type GateFold } from './fold';
 
 /** A ticket as the server reads it under the lock. */
 export type CarriedHeads = Heads & { givenBackAt: Date | null };
 
 /** What a phone asks to have written down. */
-export type AskedFact = Heads & { id: string; kind: GateKind; undoesId: string | null; visitId: string | null };
+export type AskedFact = Heads & { id: string; kind: FactKind; undoesId: string | null; visitId: string | null };
 
 /** Why an asked fact does not stand: `undone_before` and `unknown_fact` write nothing, the others become refusals. */
 export type TurnedDown = 'not_this_garden' | 'given_back' | 'not_on_ticket' | 'unknown_fact' | 'undone_before';

@@ -1,6 +1,4 @@
-/** The kinds of fact a gate writes down. Each is kept for good; what they mean together is a fold. */
-export const GATE_KINDS = ['admit', 'refuse', 'undo', 'count-out', 'walk-up'] as const;
-export type GateKind = (typeof GATE_KINDS)[number];
+import type { FactKind } from '@/lib/core/words';
 
 /** People of each kind. A count out names no kind: whoever came out is counted under adults. */
 export type Heads = { adults: number; children: number; babes: number };
@@ -10,7 +8,7 @@ export const NO_HEADS: Heads = { adults: 0, children: 0, babes: 0 };
 /** One thing that one phone did at one gate. The phone made the id, so a repeat is the same fact. */
 export type GateFact = Heads & {
   id: string;
-  kind: GateKind;
+  kind: FactKind;
   undoesId: string | null;
   visitId: string | null;
   /** When it happened, by the phone's clock set right by the server's. */

@@ -1,4 +1,5 @@
 import { formatDay, formatInstant, formatTime, type ClubTime } from '@/lib/core/time';
+import { counted } from '@/lib/opendays/rules/words';
 import { headCount, type GateFact } from '../rules/facts';
 import { foldFacts, headsInGarden } from '../rules/fold';
 
@@ -48,3 +49,11 @@ const toPass = (pass: PassFacts, club: ClubTime): OfficePass => ({
   seenText: pass.revokedAt ? `taken back ${formatInstant(pass.revokedAt, club, 'short')}` : pass.seenAt ? `seen ${formatTime(pass.seenAt, club)}` : 'not opened yet',
   isLive: pass.revokedAt === null,
 });
+
+/** The day's gates in one sentence for the bill. */
+export function gateSums({ gates, isCalledOff }: OfficeGates): string {
+  const sum = (of: (gate: OfficeGate) => number) => gates.reduce((total, gate) => total + of(gate), 0);
+  const passes = sum((gate) => gate.passes.filter((pass) => pass.isLive).length);
+  const counts = `${sum((gate) => gate.cameIn)} of ${counted(sum((gate) => gate.expected), 'head', 'heads')} let in, ${sum((gate) => gate.now)} in the gardens now, ${counted(passes, 'pass', 'passes')} handed out.`;
+  return isCalledOff ? `Called off. ${counts}` : counts;
+}

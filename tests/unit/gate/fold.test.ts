@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { GATE_KINDS, headCount, peopleCount, type GateFact } from '@/lib/gate/rules/facts';
+import { FACT_KINDS } from '@/lib/core/words';
+import { headCount, peopleCount, type GateFact } from '@/lib/gate/rules/facts';
 import { foldFacts, headsInGarden, storyOf } from '@/lib/gate/rules/fold';
 import { at, fact } from './cast';
 
@@ -22,7 +23,7 @@ const heads = fc.integer({ min: 0, max: 6 });
 const someFacts = fc.uniqueArray(
   fc.record({
     id: fc.integer({ min: 0, max: 40 }).map(String),
-    kind: fc.constantFrom(...GATE_KINDS),
+    kind: fc.constantFrom(...FACT_KINDS),
     undoesId: fc.integer({ min: 0, max: 40 }).map(String),
     visitId: fc.constantFrom('v1', 'v2', 'v3'),
     adults: heads, children: heads, babes: heads,
