@@ -3,13 +3,14 @@
 import { useState } from 'react';
 import type { FormState } from '@/lib/core/form-state';
 import type { Only } from '@/lib/opendays/rules/board';
+import type { BoardAsked } from '@/lib/opendays/rules/board-asked';
 import { headsTyped } from '@/lib/opendays/rules/party';
 import type { People } from '@/lib/bookings/rules/party';
 
 /** The people boxes as they were typed. */
-export type PartyTyped = Record<keyof People, string>;
+export type PartyTyped = BoardAsked['typed'];
 /** What the address says, or a form that came back: the board's first setting. */
-export type FirstChoice = { typed: PartyTyped; only: Only; chosen: string[] };
+export type FirstChoice = BoardAsked;
 
 const listOf = (value: string | string[] | undefined) => (value === undefined ? [] : Array.isArray(value) ? value : [value]);
 const textOf = (value: string | string[] | undefined, otherwise: string) => listOf(value)[0] ?? otherwise;

@@ -1,5 +1,5 @@
 import { formatDay, formatTime, type ClubTime } from '@/lib/core/time';
-import { counted, inWords } from './words';
+import { counted, inWords, inWordsFirst } from './words';
 
 /** How many places, parties and people an open day has. Places set aside for walk-ups are not counted. */
 export type DayFigures = { places: number; taken: number; parties: number; people: number };
@@ -28,4 +28,11 @@ export function figuresSentence({ places, taken, parties, people }: DayFigures, 
   if (taken === 0) return `All ${counted(places, 'place is', 'places are')} still to be had.`;
   if (taken >= places) return `All ${figure(places)} places are taken, ${by}.`;
   return `${figure(taken)} of ${figure(places)} places are taken${parties === 0 ? '' : `, ${by}`}.`;
+}
+
+/** The italic line over the list of days: "Two days to come, and one that was". */
+export function daysInWords(coming: number, past: number): string {
+  const days = (count: number) => `${inWords(count)} ${count === 1 ? 'day' : 'days'}`;
+  const first = coming === 0 ? 'No day is set yet' : `${inWordsFirst(coming)} ${coming === 1 ? 'day' : 'days'} to come`;
+  return past === 0 ? first : `${first}, and ${days(past)} that ${past === 1 ? 'was' : 'were'}`;
 }

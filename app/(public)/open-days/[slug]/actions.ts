@@ -1,0 +1,13 @@
+'use server';
+
+import { redirect } from 'next/navigation';
+import { holdPlaces } from '@/lib/bookings/commands/hold';
+import { boardFormInput } from '@/lib/bookings/schema';
+import { action } from '@/lib/web/action';
+
+export const holdPlacesAction = action({
+  requires: 'browser',
+  input: boardFormInput,
+  run: holdPlaces,
+  after: () => redirect('/hold'), // which hold is meant travels in the cookie, never in the address
+});
