@@ -2,7 +2,7 @@ import { describe, expect, test } from 'vitest';
 import { exchangePassInput, FACTS_A_BATCH, recordFactsInput, sentFact } from '@/lib/gate/schema';
 
 const id = '7a1f6b62-6c1e-4c39-9d43-0b6d3b6f1c11';
-const admit = { id, kind: 'admit', undoesId: null, visitId: id, adults: 2, children: 1, babes: 0, at: '2027-05-15T11:34:00.000Z', reason: null };
+const admit = { id, kind: 'admit', undoesId: null, visitId: id, adults: 2, children: 1, babes: 0, at: '2027-05-15T11:34:00.000Z', verdict: 'let_in', reason: null };
 
 describe('the wire format of gate facts', () => {
   test('an admission arrives with its time as an instant', () => {
