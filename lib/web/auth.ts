@@ -1,7 +1,7 @@
 import 'server-only';
-import { getServerSession, type NextAuthOptions } from 'next-auth';
+import type { NextAuthOptions } from 'next-auth';
 import CredentialsProvider from 'next-auth/providers/credentials';
-import { encode } from 'next-auth/jwt';
+import { decode, encode } from 'next-auth/jwt';
 import { cookies } from 'next/headers';
 import { asId, type Id } from '@/lib/core/ids';
 import { env } from '@/lib/infra/env';
@@ -27,11 +27,23 @@ export function authOptions(): NextAuthOptions {
   };
 }
 
-/** The sign-in that this browser's cookie names, or null. Whether it still lives is the actor's query to say. */
+/**
+ * The sign-in that this browser's cookie names, or null. Whether it still lives is the actor's query to say. The token is
+ * read, not renewed: renewing it on every request would cost an encryption a page.
+ */
 export async function currentSignIn(): Promise<Id<'signIn'> | null> {
-  const session = await getServerSession(authOptions());
-  const named = session && 'signInId' in session ? session.signInId : null;
+  const token = (await cookies()).get(sessionCookie())?.value;
+  if (token === undefined) return null;
+  const named = (await readToken(token))?.['signInId'];
   return typeof named === 'string' ? asId<'signIn'>(named) : null;
+}
+
+async function readToken(token: string) {
+  try {
+    return await decode({ token, secret: env().NEXTAUTH_SECRET });
+  } catch {
+    return null; // forged, from another secret, or too old: nobody is signed in
+  }
 }
 
 /** Gives this browser the session of a sign-in that a command has just made. */

@@ -1,0 +1,61 @@
+/** The actors of the authorization table. `other member` is a member of another household than the booking's. */
+export const ACTORS = ['visitor', 'holder', 'booking link', 'gate phone', 'member', 'other member', 'coordinator', 'secretary', 'treasurer', 'administrator'] as const;
+export type ActorName = (typeof ACTORS)[number];
+
+/** Who is let through to the command; everyone else is told no before it runs. */
+export type Who = 'everyone' | readonly ActorName[];
+
+const OFFICERS = ['coordinator', 'secretary', 'treasurer', 'administrator'] as const;
+const SIGNED_IN = ['member', 'other member', ...OFFICERS] as const;
+const COORDINATOR = ['coordinator'] as const;
+const BOOKING = ['booking link', 'member'] as const;
+
+/** Every server action and who may. The members of the cast have households, officers too. */
+export const ACTIONS: Readonly<Record<string, Who>> = {
+  // signing in and the account
+  askForCodeAction: 'everyone',
+  signInWithCodeAction: 'everyone',
+  signInWithLinkAction: 'everyone',
+  signInWithPasswordAction: 'everyone',
+  signOutAction: SIGNED_IN,
+  signOutEverywhereAction: SIGNED_IN,
+  setPasswordAction: SIGNED_IN,
+  dropPasswordAction: SIGNED_IN,
+  // booking
+  holdPlacesAction: 'everyone',
+  // members
+  saveContactAction: SIGNED_IN,
+  payDuesAction: SIGNED_IN,
+  // the office
+  makeOpenDayAction: COORDINATOR,
+  changeOpenDayAction: COORDINATOR,
+  publishOpenDayAction: COORDINATOR,
+  addStopAction: COORDINATOR,
+  changeStopAction: COORDINATOR,
+  makeEntryTimesAction: COORDINATOR,
+  changeEntryTimeAction: COORDINATOR,
+  closeEntryTimeAction: COORDINATOR,
+  reopenEntryTimeAction: COORDINATOR,
+  addPlanNoteAction: COORDINATOR,
+  writeToPartiesAction: ['coordinator', 'administrator'],
+  makeGatePassAction: COORDINATOR,
+  revokeGatePassAction: COORDINATOR,
+  recordPaymentAction: ['secretary', 'treasurer'],
+  inviteOfficerAction: ['administrator'],
+  takeRoleAction: ['administrator'],
+  saveSettingsAction: ['administrator'],
+};
+
+/** Every route handler but next-auth's own and the health answer. */
+export const ROUTES: Readonly<Record<string, Who>> = {
+  'GET /api/board/[openDay]': 'everyone',
+  'GET /gardens/[slug]/plate': 'everyone',
+  'GET /large-print': 'everyone',
+  'POST /api/gate/device': 'everyone',
+  'POST /api/gate/facts': ['gate phone'],
+  'GET /api/gate/list': ['gate phone'],
+  'POST /api/gate/place': ['gate phone'],
+  'POST /api/gate/ticket': ['gate phone'],
+  'GET /office/roll/csv': ['secretary', 'treasurer'],
+  'GET /office/books/csv': ['treasurer'],
+};
