@@ -1,5 +1,6 @@
 import { and, eq } from 'drizzle-orm';
 import ICAL from 'ical.js';
+import { Pool } from 'pg';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { getDb } from '@/db/client';
 import { bearerLinks } from '@/db/schema/people';
@@ -164,8 +165,10 @@ describe('the outbox', () => {
     await enqueueDueLetters(ctx);
     await enqueueDueLetters(ctx);
 
-    const jobs = await getDb().$client.query('select count(*)::int as n from queue.waiting_jobs($1)', [`letter:${id}`]).catch(() => null);
-    expect(jobs === null || jobs.rows[0].n === 1).toBe(true);
+    const queuePool = new Pool({ connectionString: process.env['QUEUE_DATABASE_URL'] }); // the application's own role may not look into the queue
+    const jobs = await queuePool.query('select task_identifier from graphile_worker.jobs where key = $1', [`letter:${id}`]);
+    await queuePool.end();
+    expect(jobs.rows).toEqual([{ task_identifier: 'sendLetter' }]);
     expect(await sendLetter(ctx, id)).toBe('sent');
   });
 
@@ -173,7 +176,7 @@ describe('the outbox', () => {
     ['an emoji and 4-byte letters', 'Zoë 🚂 𝔄da'], ['right-to-left text', 'שלום علي'], ['a script', '<script>alert(1)</script>'], ['quotes', '"Eve" \'the\' \\ Visitor'],
     ['a header of its own', 'Eve\r\nBcc: all@testvalley.example'], ['a turned-about tail', 'Eve \u202Egnp.exe'], ['300 characters', 'E'.repeat(300)],
   ])('shows a name with %s as text and never breaks a header', async (what, name) => {
-    const id = await queue({ key: `hostile: ${what}`, to: { name, address: '"odd name"+x@testvalley.example' }, facts: { subject: `For ${name}`, body: `Dear ${name}` } });
+    const id = await queue({ key: `hostile: ${what}`, to: { name, address: '"odd.name+x"@testvalley.example' }, facts: { subject: `For ${name}`, body: `Dear ${name}` } });
 
     expect(await sendLetter(await systemAt(), id)).toBe('sent');
 
