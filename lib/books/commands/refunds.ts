@@ -3,6 +3,7 @@ import { and, asc, eq, isNotNull, isNull, lte, sql } from 'drizzle-orm';
 import type { Tx } from '@/db/client';
 import { bookings } from '@/db/schema/bookings';
 import { cardPayments, paymentAttempts, payments, refunds } from '@/db/schema/books';
+import { charges } from '@/db/schema/dues';
 import type { Id } from '@/lib/core/ids';
 import { firstOrNull, only } from '@/lib/core/only';
 import { Refusal } from '@/lib/core/refusal';
@@ -17,11 +18,13 @@ import { postEntry } from '../commands';
 /** Money to give back of one payment, and why. */
 export type RefundWish = { paymentId: Id<'payment'>; amountMinor: number; reason: string };
 
-/** Owes a payer some of a payment back, in the caller's transaction: never more than was paid and not yet given back. Locks the payment. */
+/** Owes a payer some of a payment back, in the caller's transaction: never more than was paid and not yet given back. Locks what was paid for: payments themselves never change. */
 export async function oweRefund(tx: Tx, ctx: Ctx, wish: RefundWish): Promise<RefundId> {
   const payment = firstOrNull(await tx.select({ amountMinor: payments.amountMinor, currency: payments.currency, chargeId: payments.chargeId, householdId: payments.householdId, bookingId: payments.bookingId })
-    .from(payments).where(eq(payments.id, wish.paymentId)).for('no key update'));
+    .from(payments).where(eq(payments.id, wish.paymentId)));
   if (!payment) throw new Refusal('not_found');
+  if (payment.bookingId !== null) await tx.select({ id: bookings.id }).from(bookings).where(eq(bookings.id, payment.bookingId)).for('no key update');
+  if (payment.chargeId !== null) await tx.select({ id: charges.id }).from(charges).where(eq(charges.id, payment.chargeId)).for('no key update');
   const back = only(await tx.select({ sum: sql<number>`coalesce(sum(${refunds.amountMinor}) filter (where ${refunds.failedAt} is null), 0)::int` }).from(refunds).where(eq(refunds.paymentId, wish.paymentId)));
   if (wish.amountMinor > payment.amountMinor - back.sum) throw new Refusal('refund_too_large');
   const refund = only(await tx.insert(refunds).values({
