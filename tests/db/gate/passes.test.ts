@@ -65,12 +65,12 @@ describe('a gate pass', () => {
     await expect(exchangePass(office, { secret, deviceKey: newSecret() })).rejects.toMatchObject({ code: 'pass_full' });
   });
 
-  it('opens for one of five phones that ask for its last place at once, and tells the others so', async () => {
+  it('opens for one of 25 phones that ask for its last place at once, and tells the others so', async () => {
     const { office, secret } = await aPass(1);
 
-    const outcomes = await Promise.all(Array.from({ length: 5 }, () => exchangePass(office, { secret, deviceKey: newSecret() }).then(() => 'opened', (error: { code: string }) => error.code)));
+    const outcomes = await Promise.all(Array.from({ length: 25 }, () => exchangePass(office, { secret, deviceKey: newSecret() }).then(() => 'opened', (error: { code: string }) => error.code)));
 
-    expect(outcomes.sort()).toEqual(['opened', 'pass_full', 'pass_full', 'pass_full', 'pass_full']);
+    expect(outcomes.sort()).toEqual(['opened', ...Array(24).fill('pass_full')]);
   });
 
   it('that nobody made opens nothing', async () => {
