@@ -40,7 +40,7 @@ export function confirmationLetter(booking: BookingFacts, club: LetterClub): Let
   const cost = booking.totalMinor === 0 ? 'They cost nothing.' : `${formatMoney({ amountMinor: booking.totalMinor, currency: club.currency }, club.locale)} is paid.`;
   return {
     clubName: club.name, subject: `Your day in ${gardensWords(visits)}, ${formatDay(booking.heldOn, club)}`,
-    title: `Your day in ${gardensWords(visits)}`, line: dayLine(booking, club),
+    title: `Your day in\n${gardensWords(visits)}`, line: dayLine(booking, club),
     preview: `${spanWords(visits, club)}. Your tickets open without a signal once you have looked at them.`,
     lead: [{ kind: 'paragraph', parts: [`Places are yours: ${everyoneWords(visits)}. ${cost} If a phone fails, say this at the gate: `, spoken(booking), '.'] }],
     body: [...dayBlocks(visits, club), ...ticketBlocks(booking, visits, club), ...lastWords(booking, visits, club)],
@@ -142,8 +142,8 @@ function minutesOfDay(at: Date, club: ClubTime): number {
 
 function rowOf(visit: LetterVisit, next: LetterVisit | null, club: LetterClub): TimetableRow {
   const way = visit.isStepFree ? 'path all level' : (visit.stepsNote ?? '');
-  const place: Inline[] = visit.address === null ? [visit.area] : [{ address: [visit.address, visit.directions].filter(Boolean).join('\n') }];
-  const notes = [place, way === '' ? [] : [way], warningOf(visit)].filter((note) => note.length > 0);
+  const place: Inline[] = visit.address === null ? [[visit.area, way].filter(Boolean).join('; ')] : [{ address: [visit.address, visit.directions].filter(Boolean).join('. ').replaceAll('..', '.') }, way === '' ? '' : `\n${way}`];
+  const notes = [place, warningOf(visit)].filter((note) => note.length > 0);
   return { arrives: formatTime(visit.arrivesAt, club), leaves: formatTime(visit.leavesAt, club), stopNumber: visit.stopNumber, name: visit.gardenName, notes, journey: next ? journeyWords(visit, next) : null };
 }
 

@@ -12,7 +12,7 @@ const table = (attributes: string, rows: string) => `<table role="presentation" 
 export function letterHtml(letter: Letter): string {
   const sheet = [
     `<p class="ink" style="margin:0;font:600 16px/1.3 ${HEADING};color:${INK}">${escapeHtml(letter.clubName)}</p>`,
-    `<h1 class="ink h1" style="margin:12px 0 0;font:900 52px/1 ${HEADING};letter-spacing:-.02em;color:${INK}">${escapeHtml(letter.title)}</h1>`,
+    `<h1 class="ink h1" style="margin:12px 0 0;font:900 52px/1 ${HEADING};letter-spacing:-.02em;color:${INK}">${escapeHtml(letter.title).replaceAll('\n', '<br>')}</h1>`,
     `<p class="ink" style="margin:14px 0;font:italic 400 21px/1.3 ${HEADING};color:${INK}">${escapeHtml(letter.line)}</p>`,
     ...letter.lead.map(block),
     railRule(),
@@ -69,10 +69,10 @@ function timetable(rows: readonly TimetableRow[]): string {
     const time = (text: string, name: string, align: string) => `<td width="76" align="${align}" valign="top" class="ink ${name}" style="width:76px;font:600 20px/1.25 ${MONO};color:${INK};white-space:nowrap;padding:15px 0 0">${escapeHtml(text)}</td>`;
     const notes = row.notes.map((note) => `<div class="ink" style="${inkText};padding-top:3px">${inline(note)}</div>`).join('');
     const name = `<div class="ink" style="font:800 20px/1.15 ${HEADING};color:${INK}">${escapeHtml(row.name)}</div>${notes}`;
-    const garden = `<td valign="top" style="padding:11px 10px 0 0">${table('', `<tr><td width="48" valign="top" style="width:48px">${post(row.stopNumber)}</td><td valign="top" style="padding:3px 0 0">${name}</td></tr>`)}</td>`;
+    const garden = `<td valign="top" style="padding:11px 10px 0 0">${table('', `<tr><td class="po" width="48" valign="top" style="width:48px">${post(row.stopNumber)}</td><td valign="top" style="padding:3px 0 0">${name}</td></tr>`)}</td>`;
     const closing = isLast
       ? `<tr><td colspan="3" class="ib" style="height:14px;font-size:0;line-height:0;border-bottom:2px solid ${INK}">&nbsp;</td></tr>`
-      : `<tr><td class="rb" style="border-bottom:1px solid ${RULE};font-size:0">&nbsp;</td><td colspan="2" class="soft rb" style="${softItalic};padding:6px 0 10px 48px;border-bottom:1px solid ${RULE}">${row.journey === null ? '&nbsp;' : escapeHtml(row.journey)}</td></tr>`;
+      : `<tr><td class="rb" style="border-bottom:1px solid ${RULE};font-size:0">&nbsp;</td><td colspan="2" class="soft rb jo" style="${softItalic};padding:6px 0 10px 48px;border-bottom:1px solid ${RULE}">${row.journey === null ? '&nbsp;' : escapeHtml(row.journey)}</td></tr>`;
     return `<tr>${time(row.arrives, 'tt', 'left')}${garden}${time(row.leaves, 'td', 'right')}</tr>${closing}`;
   });
   return `${table('width="100%"', `<tr>${head}</tr>${body.join('')}`)}<div style="height:22px;font-size:0;line-height:0">&nbsp;</div>`;

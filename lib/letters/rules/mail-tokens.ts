@@ -20,7 +20,7 @@ export const MONO = "'Atkinson Hyperlegible Mono',Consolas,Menlo,monospace";
 
 /** The one style sheet of a letter: narrow phones, and the evening where the mail program asks for it. */
 export const STYLE_SHEET = `:root{color-scheme:light dark;supported-color-schemes:light dark}
-@media (max-width:480px){.pad{padding:22px 18px 22px!important}.h1{font-size:38px!important}.tt{width:58px!important;font-size:18px!important}.td{width:58px!important;font-size:18px!important}.gn{width:92px!important;font-size:16px!important}}
+@media (max-width:480px){.pad{padding:22px 18px 22px!important}.h1{font-size:38px!important}.tt,.td{width:56px!important;font-size:17px!important;letter-spacing:-.05em!important}.po{width:42px!important}.jo{padding-left:42px!important}.gn{width:104px!important;font-size:16px!important}.h2{font-size:0!important}}
 @media (prefers-color-scheme:dark){
 body,.mist{background:#15281f!important}.sheet{background:#0f1f18!important}
 .ink{color:#e4ece4!important}.soft{color:#a9b8ae!important}.dam{color:#e3a9d6!important}
