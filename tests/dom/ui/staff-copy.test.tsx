@@ -45,8 +45,8 @@ describe('the staff copy', () => {
 describe('a staff table', () => {
   const rows = [{ name: 'Abara', since: '2024' }];
   const columns = [
-    { key: 'name', head: 'Household', names: 'row', sorting: { href: '?sort=name', order: 'ascending' }, cell: (row: { name: string }) => row.name },
-    { key: 'since', head: 'Since', set: 'figures', sorting: { href: '?sort=since', order: 'none' }, cell: (row: { since: string }) => row.since },
+    { key: 'name', head: 'Household', names: 'row', sorting: { href: '?sort=name', order: 'ascending' }, cell: (row: { name: string; since: string }) => row.name },
+    { key: 'since', head: 'Since', set: 'figures', sorting: { href: '?sort=since', order: 'none' }, cell: (row: { name: string; since: string }) => row.since },
   ] as const;
 
   it('tells by which column it is sorted, and sorts by link', () => {
@@ -59,7 +59,7 @@ describe('a staff table', () => {
   });
 
   it('shows what to do first instead of an empty grid', () => {
-    const at = show(<Table caption="Households" columns={columns} rows={[]} rowKey={(row: { name: string }) => row.name} empty={<p>Invite the first household.</p>} />);
+    const at = show(<Table caption="Households" columns={columns} rows={[]} rowKey={(row: { name: string; since: string }) => row.name} empty={<p>Invite the first household.</p>} />);
 
     expect(at.querySelector('table')).toBeNull();
     expect(at.textContent).toBe('Invite the first household.');
