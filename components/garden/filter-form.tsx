@@ -48,9 +48,9 @@ type ChoiceProps = { name: string; label: string; value: string; any: string; op
 
 function Choice({ name, label, value, any, options }: ChoiceProps) {
   return (
-    <label className="inline-flex max-w-full items-center gap-2">
-      {label}
-      <select name={name} defaultValue={value} className={`${controlLook('short', 'text')} w-auto`}>
+    <label className="flex max-w-full items-center gap-2 max-sm:w-full">
+      <span className="shrink-0">{label}</span>
+      <select name={name} defaultValue={value} className={`${controlLook('full', 'text')} min-w-0 sm:w-auto`}>
         <option value="">{any}</option>
         {options.map(([key, words]) => (
           <option key={key} value={key}>

@@ -5,35 +5,77 @@ import { LinkButton } from '@/components/ui/link-button';
 import { RailRule } from '@/components/ui/rail-rule';
 import type { ListedGarden } from '@/lib/gardens/views';
 
-/** The index beside the map: it says the same in words, with each garden's plate. */
-export function GardenList({ gardens }: { gardens: readonly ListedGarden[] }) {
+const LETTERS = [['s', 'live steam', 'isSteam'], ['w', 'step-free all the way round', 'isStepFree'], ['p', 'pond, pool or brook: hold small hands', 'hasWater']] as const;
+
+/** The index beside the map, which says the same in words: where each garden is, what it is like, how many places are left. */
+export function GardenIndex({ gardens }: { gardens: readonly ListedGarden[] }) {
   return (
-    <ol className="border-b border-rule">
-      {gardens.map((garden) => (
-        <li key={garden.slug} className="relative grid grid-cols-[3rem_minmax(0,1fr)] gap-x-3 gap-y-3 border-t border-rule py-4 first:border-t-0 first:pt-1 sm:grid-cols-[3rem_minmax(0,1fr)_10.5rem] large-print:grid-cols-[4rem_minmax(0,1fr)]">
-          <Post stopNumber={garden.card} height={66} label={null} />
-          <div>
-            <h2 className="text-[1.3333rem] leading-tight font-bold">
-              <span className="sr-only">{garden.number}. </span>
-              <Link href={garden.href} className="text-ink hover:underline hover:decoration-[2px] hover:underline-offset-4 after:absolute after:inset-0">
+      <ol className="border-b border-rule">
+        {gardens.map((garden) => (
+          <li key={garden.slug} className="relative grid grid-cols-[2.2rem_minmax(0,1fr)_auto] items-center gap-x-3 border-t border-rule py-2 first:border-t-0 first:pt-0">
+            <Post stopNumber={garden.card} height={50} label={null} />
+            <div className="leading-tight">
+              <Link href={garden.href} className="font-heading text-[1.1667rem] font-bold text-ink after:absolute after:inset-0 hover:underline hover:underline-offset-4">
+                <span className="sr-only">Garden {garden.number}, </span>
                 {garden.name}
               </Link>
-            </h2>
-            <p className="note mt-0.5 leading-snug">{garden.subtitle}</p>
-            <p className="mt-1 leading-snug">{garden.line}</p>
-            <p className="leading-snug text-ink-soft">
-              {garden.area}
-              {garden.isStepFree ? ', step-free' : ''}
-              {garden.hasWater ? ', water' : ''}
-            </p>
-            {garden.places === null ? null : <p className="leading-snug font-semibold">{garden.places}</p>}
-          </div>
-          <div className="col-span-2 sm:col-span-1 large-print:col-span-2">
+              <p className="text-ink-soft">{garden.area}</p>
+            </div>
+            <div className="text-right leading-tight">
+              <Letters garden={garden} />
+              {garden.places === null ? null : <p className={garden.places === 'full' ? 'text-ink-soft' : 'font-semibold'}>{garden.places}</p>}
+            </div>
+          </li>
+        ))}
+      </ol>
+  );
+}
+
+/** What the letters of the index mean. */
+export function LetterKey() {
+  return (
+    <p className="note mt-3 leading-snug">
+      {LETTERS.map(([letter, words]) => (
+        <span key={letter} className="mr-4 inline-block">
+          <b className="figures font-bold not-italic">{letter}</b> {words}
+        </span>
+      ))}
+    </p>
+  );
+}
+
+function Letters({ garden }: { garden: ListedGarden }) {
+  const held = LETTERS.filter(([, , fact]) => garden[fact]);
+  return (
+    <p className="note tracking-[0.2em]">
+      <span aria-hidden="true">{held.map(([letter]) => letter).join(' ')}</span>
+      <span className="sr-only">{held.map(([, words]) => words).join(', ')}</span>
+    </p>
+  );
+}
+
+/** Each garden's plate with its number, its name and what it was cut from. */
+export function PlateWall({ gardens }: { gardens: readonly ListedGarden[] }) {
+  return (
+    <ul className="grid gap-x-7 gap-y-9 pt-8 sm:grid-cols-2 lg:grid-cols-3 large-print:grid-cols-1">
+      {gardens.map((garden) => (
+        <li key={garden.slug} className="relative">
+          <div className="large-print:max-w-[36rem]">
             <Plate plate={garden.plate} isRepeated />
+          </div>
+          <div className="mt-2 grid grid-cols-[2.1rem_minmax(0,1fr)] leading-tight">
+            <span className="font-heading text-[1.3333rem] font-extrabold tracking-[-0.04em]">{garden.number}</span>
+            <div>
+              <Link href={garden.href} className="font-heading text-[1.3333rem] leading-tight font-bold tracking-[-0.02em] text-ink after:absolute after:inset-0 hover:underline hover:underline-offset-4">
+                {garden.name}
+              </Link>
+              <p className="note mt-1 leading-snug">{garden.line}</p>
+              {garden.places === null ? null : <p className={garden.places === 'full' ? 'text-ink-soft' : 'font-semibold'}>{garden.places}</p>}
+            </div>
           </div>
         </li>
       ))}
-    </ol>
+    </ul>
   );
 }
 

@@ -12,7 +12,7 @@ export function GardenMap({ gardens }: { gardens: readonly ListedGarden[] }) {
     return area ? [{ number: card, areaKey, areaName: area.name, labelPoint: area.labelPoint, name, href }] : [];
   });
   return (
-    <LiveMap posts={posts} sheet={builtInValley.bbox}>
+    <LiveMap posts={posts} sheet={builtInValley.sheet}>
       <ValleyMap valley={builtInValley} gardens={posts} />
     </LiveMap>
   );

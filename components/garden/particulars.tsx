@@ -30,7 +30,7 @@ export function DrawnParticulars({ particulars, system, words }: DrawnProps) {
 /** Figures in three columns of hairlines: a name in italics, what is so in strong type. */
 export function Facts({ facts }: { facts: readonly Fact[] }) {
   return (
-    <dl className="mt-6 grid gap-x-7 sm:grid-cols-2 lg:grid-cols-3 large-print:block">
+    <dl className="mt-6 grid grid-cols-2 gap-x-5 sm:gap-x-7 lg:grid-cols-3 large-print:block">
       {facts.map(({ label, words }) => (
         <div key={label} className="border-t border-rule pt-2 pb-3">
           <dt className="note leading-snug text-ink-soft">{label}</dt>

@@ -9,7 +9,7 @@ const percent = (share: number): string => `${(share * 100).toFixed(2)}%`;
 
 type PlantingChartProps = { plants: readonly PlantView[]; on: string; dayText: string };
 
-/** What flowers when, a row a plant, the page's day as one black line down all of them. */
+/** What flowers when, a row a plant, the page's day as one strong line down all of them. */
 export function PlantingChart({ plants, on, dayText }: PlantingChartProps) {
   const prefix = `bloom${useId().replaceAll(/\W/g, '')}`;
   const blooming = plants.filter(({ bars }) => bars.length > 0);
@@ -27,7 +27,7 @@ export function PlantingChart({ plants, on, dayText }: PlantingChartProps) {
           ))}
         </ul>
       </div>
-      <p className="note mt-2.5 leading-snug">The black line is {dayText}. A filled bar is flower; a barbed line is green all year.</p>
+      <p className="note mt-2.5 leading-snug">The strong line is {dayText}. A filled bar is flower; a barbed line is green all year.</p>
     </div>
   );
 }
@@ -58,9 +58,9 @@ function Row({ plant, weave, prefix, day }: { plant: PlantView; weave: Weave; pr
           {MONTHS.slice(1).map((name, index) => (
             <line key={name} x1={percent((index + 1) / 12)} x2={percent((index + 1) / 12)} y1="0" y2="100%" stroke="var(--color-rule)" />
           ))}
-          {plant.isEvergreen ? <rect x="0" y="14" width="100%" height="14" fill={`url(#${prefix}-evergreen)`} /> : null}
+          {plant.isEvergreen ? <rect x="0" y="22" width="100%" height="14" fill={`url(#${prefix}-evergreen)`} /> : null}
           {plant.bars.map(({ from, to }) => (
-            <rect key={from} x={percent((from - 0.95) / 12)} width={percent((to - from + 0.9) / 12)} y={plant.isEvergreen ? 4 : 9} height={plant.isEvergreen ? 14 : 20} fill={`url(#${prefix}-${weave})`} stroke="var(--color-conifer)" strokeWidth="1.800" />
+            <rect key={from} x={percent((from - 0.95) / 12)} width={percent((to - from + 0.9) / 12)} y={plant.isEvergreen ? 4 : 9} height={plant.isEvergreen ? 16 : 20} fill={`url(#${prefix}-${weave})`} stroke="var(--color-conifer)" strokeWidth="1.800" />
           ))}
           <line x1={percent(day)} x2={percent(day)} y1="0" y2="100%" stroke="var(--color-ink)" strokeWidth="3" />
         </svg>
@@ -93,7 +93,7 @@ function Patterns({ prefix }: { prefix: string }) {
         <pattern id={`${prefix}-solid`} width="4" height="4" patternUnits="userSpaceOnUse">
           <rect width="4" height="4" fill="var(--color-conifer)" />
         </pattern>
-        <pattern id={`${prefix}-evergreen`} y="14" width="30" height="14" patternUnits="userSpaceOnUse">
+        <pattern id={`${prefix}-evergreen`} y="22" width="30" height="14" patternUnits="userSpaceOnUse">
           <path d="M0 3H30M15 3l-5 7M15 3l5 7" {...ink} strokeWidth="1.900" />
         </pattern>
       </defs>

@@ -22,7 +22,7 @@ export function TimesList({ day }: { day: TimesView }) {
           </li>
         ))}
       </ol>
-      <p className="mt-4 grid">
+      <p className="mt-4 flex flex-col">
         <LinkButton tone="main" href={day.href}>
           All gardens and times
         </LinkButton>

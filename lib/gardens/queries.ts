@@ -1,12 +1,11 @@
 import 'server-only';
-import { and, asc, desc, eq, gt, isNotNull, isNull, sql, type SQL } from 'drizzle-orm';
+import { and, asc, desc, eq, gt, isNotNull, isNull, lte, sql, type SQL } from 'drizzle-orm';
 import { alias } from 'drizzle-orm/pg-core';
-import { bookings, visits } from '@/db/schema/bookings';
-import { paymentAttempts } from '@/db/schema/books';
 import { gardenAreas, gardenPlants, gardens, plants } from '@/db/schema/gardens';
 import { areaMinutes, entryTimes, openDays, prices, stops } from '@/db/schema/opendays';
 import { firstOrNull } from '@/lib/core/only';
 import type { Ctx } from '@/lib/infra/context';
+import { placesLeft } from '@/lib/opendays/queries';
 import { isOver, type PriceFacts } from '@/lib/opendays/views';
 import type { GardenRow, ListedRow, NextDayRow, PlantRow } from './views';
 
@@ -28,13 +27,8 @@ const publicColumns = {
   areaKey: gardenAreas.areaKey, areaName: gardenAreas.name, areaCaption: gardenAreas.caption, plants: plantList,
 };
 
-/** Places left at an entry time: capacity − taken, and the heads of holds that ran out with no payment open. */
-const placesLeft = (now: Date): SQL<number> => sql<number>`(${entryTimes.capacity} - ${entryTimes.taken} + coalesce((
-  select sum(${visits.heads}) from ${visits} join ${bookings} on ${bookings.id} = ${visits.bookingId}
-  where ${visits.entryTimeId} = ${entryTimes.id} and ${visits.givenBackAt} is null and ${bookings.confirmedAt} is null and ${bookings.releasedAt} is null and ${bookings.heldUntil} <= ${now}
-    and not exists (select 1 from ${paymentAttempts} where ${paymentAttempts.bookingId} = ${bookings.id} and ${paymentAttempts.endedAt} is null)), 0))::int`;
-
-const isComing = (now: Date): SQL | undefined => and(isNotNull(openDays.publishedAt), gt(openDays.closesAt, now));
+/** Published, and its gates are not shut for good. */
+const isComing = (now: Date): SQL | undefined => and(isNotNull(openDays.publishedAt), lte(openDays.publishedAt, now), gt(openDays.closesAt, now));
 
 /** The number of a garden that takes no part in the next open day: after its stops, by name, as the index numbers it. */
 const restNumber = (now: Date): SQL<number> => sql<number>`(
@@ -90,7 +84,8 @@ export type ComingDay = {
 
 /** Published open days that are not over, soonest first, with their prices; at most 12. */
 export async function comingDays({ db, now }: Ctx): Promise<ComingDay[]> {
-  const priceList = sql<PriceFacts[]>`(select coalesce(json_agg(json_build_object('stopId', ${prices.stopId}, 'kind', ${prices.kind}, 'amountMinor', ${prices.amountMinor})), '[]') from ${prices} where ${prices.openDayId} = ${openDays.id})`;
+  const inner = sql`(select coalesce(json_agg(json_build_object('stopId', ${prices.stopId}, 'kind', ${prices.kind}, 'amountMinor', ${prices.amountMinor})), '[]') from ${prices} where ${prices.openDayId} = ${openDays.id})`;
+  const priceList = sql<PriceFacts[]>`${inner}`; // one level down, or drizzle drops the table names of a query without a join (0.45, buildSelection)
   const rows = await db.select({
     slug: openDays.slug, title: openDays.title, placeLine: openDays.placeLine, howToCome: openDays.howToCome, heldOn: openDays.heldOn, opensAt: openDays.opensAt, closesAt: openDays.closesAt,
     calledOffAt: openDays.calledOffAt, calledOffNote: openDays.calledOffNote, prices: priceList,

@@ -182,7 +182,7 @@ export function toListed(rows: readonly ListedRow[], club: ClubTime): ListedGard
 /** A coming open day as far as the public pages list it. */
 export type DayRow = { slug: string; title: string; heldOn: string };
 export type GardensPage = {
-  name: string; line: string; sums: string; shown: ListedGarden[]; flowers: FlowerView[]; isNarrowed: boolean;
+  name: string; line: string; sums: string; platesTitle: string; shown: ListedGarden[]; flowers: FlowerView[]; isNarrowed: boolean;
   choices: { scales: number[]; powers: string[]; days: { slug: string; words: string }[] };
 };
 
@@ -197,9 +197,9 @@ export function toGardensPage(rows: readonly ListedRow[], days: readonly DayRow[
   const narrowed = isNarrowed(filters);
   return {
     name: rows.length === 1 ? 'One garden' : `${inWordsFirst(rows.length)} gardens`,
-    line: 'Cut from what each host told us: scale, planting, bridges, water, and how it runs',
-    sums: `${day ? `${inWordsFirst(taking)} of them ${taking === 1 ? 'opens' : 'open'} on ${formatDay(day.heldOn, club)}.` : 'No open day is announced just now.'}${narrowed ? ` ${inWordsFirst(shown.length)} of ${rows.length} shown.` : ''}`,
-    shown, isNarrowed: narrowed,
+    line: 'Small railways in real gardens, and the people who water them',
+    sums: `${day ? `${inWordsFirst(taking)} of them ${taking === 1 ? 'opens' : 'open'} on ${formatDay(day.heldOn, club)}, with ${counted(rows.reduce((sum, row) => sum + row.allPlaces, 0), 'place', 'places')} left.` : 'No open day is announced just now.'}${narrowed ? ` ${inWordsFirst(shown.length)} of ${rows.length} shown.` : ''}`,
+    platesTitle: shown.length === 1 ? 'One block' : `${inWordsFirst(shown.length)} blocks`, shown, isNarrowed: narrowed,
     flowers: toFlowersOf(left.flatMap(({ row, listed }) => (listed ? [{ number: listed.number, plants: row.plants }] : [])), on, 4),
     choices: {
       scales: scalesOf(rows), powers: powersOf(rows, POWERS),

@@ -1,10 +1,11 @@
 import type { Metadata } from 'next';
 import { PublicSheet } from '@/app/(public)/public-sheet';
 import { FilterForm } from '@/components/garden/filter-form';
-import { GardenList, NoGardens } from '@/components/garden/garden-list';
-import { Bill } from '@/components/layout/bill';
-import { GardenFoot } from '@/components/layout/garden-margin';
+import { GardenIndex, LetterKey, NoGardens, PlateWall } from '@/components/garden/garden-list';
 import { GardenMap } from '@/components/garden/garden-map';
+import { Bill } from '@/components/layout/bill';
+import { Columns, Part } from '@/components/layout/columns';
+import { GardenFoot } from '@/components/layout/garden-margin';
 import { dayOf } from '@/lib/core/time';
 import { comingDays, listGardens } from '@/lib/gardens/queries';
 import { gardenFilters } from '@/lib/gardens/schema';
@@ -28,17 +29,22 @@ export default async function GardensPage({ searchParams }: Props) {
       {page.shown.length === 0 ? (
         <NoGardens isNarrowed={page.isNarrowed} />
       ) : (
-        <div className="columns-ruled columns-halves">
-          <div>
-            <div className="md:sticky md:top-4">
+        <>
+          <Columns split="halves">
+            <div>
               <GardenMap gardens={page.shown} />
               <p className="note mt-3 leading-snug">Each hatched patch is a neighbourhood and not a house. The address comes with your tickets.</p>
+              <LetterKey />
             </div>
-          </div>
-          <div>
-            <GardenList gardens={page.shown} />
-          </div>
-        </div>
+            <div>
+              <GardenIndex gardens={page.shown} />
+            </div>
+          </Columns>
+          <Part title={page.platesTitle}>
+            <p>Two inks, the black and the stop’s own card. Plants stand at their true height beside the trains, and one thing in each is life-sized.</p>
+            <PlateWall gardens={page.shown} />
+          </Part>
+        </>
       )}
     </PublicSheet>
   );

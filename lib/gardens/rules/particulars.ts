@@ -50,11 +50,11 @@ export const oneLine = (garden: Pick<Particulars, 'scaleOneTo' | 'powers' | 'tra
 export const trackSentence = ({ trackLengthMm, scaleOneTo }: Particulars, system: LengthSystem): string =>
   `${lengthInWords(trackLengthMm, system)} of track, which is ${scaleMilesInWords(scaleMiles(trackLengthMm, scaleOneTo))}.`;
 
-/** What the tightest curve would be at full size: "90 ft full size, 68° by the chord", in the club's units. */
+/** What the tightest curve would be at full size: "90 ft full size, or 68°" by the 100-ft chord, in the club's units. */
 export function curveInWords(radiusMm: number, scaleOneTo: number, system: LengthSystem): string {
   const feet = prototypeRadiusFeet(radiusMm, scaleOneTo);
   const degrees = degreeOfCurve(feet);
-  return `${longLength(feet * 304.8, system)} full size${degrees === undefined ? '' : `, a ${Math.round(degrees)}° curve`}`;
+  return `${longLength(feet * 304.8, system)} full size${degrees === undefined ? '' : `, or ${Math.round(degrees)}°`}`;
 }
 
 function gaugeFact({ scaleOneTo, gaugeMm }: Particulars): string {

@@ -29,7 +29,7 @@ describe('particulars in words', () => {
   });
 
   it('gives the curve at full size, with its degree only where a chord fits', () => {
-    expect(curveInWords(1219, 22.5, 'feet')).toBe('90 ft full size, a 68° curve');
+    expect(curveInWords(1219, 22.5, 'feet')).toBe('90 ft full size, or 68°');
     expect(curveInWords(600, 20.3, 'feet')).toBe('40 ft full size');
   });
 

@@ -1,6 +1,6 @@
 import { listed } from '@/lib/opendays/rules/words';
 import { compose, type PlateParticulars } from './compose';
-import { formOf, isFlower, isMat, isTree } from './forms';
+import { formOf, isMat } from './forms';
 import { JOKE_FACTS } from './jokes';
 
 const BRIDGE_WORDS: Readonly<Record<string, string>> = { trestle: 'a trestle', viaduct: 'a viaduct', girder: 'a girder bridge', truss: 'a truss', pier: 'a pier on trestles' };
@@ -17,10 +17,12 @@ export function captionOf(garden: PlateParticulars): string {
   const bridge = BRIDGE_WORDS[garden.bridge];
   const water = WATER_WORDS[garden.water];
   const crossing = bridge && water && garden.bridge !== 'pier' ? `${bridge} over ${water}` : bridge ?? water;
-  const forms = [...new Set(garden.plants.map(formOf))];
-  const order = [...forms.filter(isTree), ...forms.filter(isMat), ...forms.filter(isFlower)].slice(0, 3).flatMap((form) => PARTS[form] ?? []);
+  const block = compose(garden);
+  const listedMat = garden.plants.map(formOf).find(isMat);
+  const forms = [...new Set([...block.back.map(({ form }) => form), ...(listedMat ? [listedMat] : []), ...block.front.map(({ form }) => form)])]; // only what the block shows
+  const order = forms.slice(0, 3).flatMap((form) => PARTS[form] ?? []);
   const parts = [...(crossing ? [crossing] : []), ...order];
-  const things = compose(garden).oddments.map(({ name }) => JOKE_FACTS[name].words);
+  const things = block.oddments.map(({ name }) => JOKE_FACTS[name].words);
   const [first = 'boot', second] = things;
   const cutFrom = parts.length > 0 ? `Cut from the garden’s own particulars: ${listed(parts)}.` : 'Cut from the garden’s own particulars.';
   return `${cutFrom} The ${first} is life-sized${second ? `, and so is the ${second}` : ''}.`;

@@ -72,7 +72,7 @@ function railHeight(bridge: PlateParticulars['bridge'], centimetresAMetre: numbe
 function jokeFor(told: string | undefined, room: number, dice: Dice): JokeName {
   const known = JOKE_NAMES.find((name) => name === told);
   if (known) return known;
-  const fitting = JOKE_NAMES.filter((name) => name !== 'snail' && (JOKE_FACTS[name].height <= room || JOKE_FACTS[name].right < 31));
+  const fitting = JOKE_NAMES.filter((name) => name !== 'snail' && (JOKE_FACTS[name].height <= room - 2 || JOKE_FACTS[name].right < 31));
   return fitting[Math.floor(dice.next() * fitting.length)] ?? 'apple';
 }
 

@@ -7,7 +7,8 @@ type Stretch = { readonly from: number; readonly to: number };
 /** The sky before and behind the train, where black may stand without hiding it; `jokeStands` when a tall joke needs a part. */
 export type Room = { readonly ahead: Stretch; readonly behind: Stretch; readonly jokeStands: Stretch | null };
 
-const isTall = (joke: JokeName, rail: number): boolean => JOKE_FACTS[joke].height > HEIGHT - rail - 3;
+/** Whether a joke would reach up to the wheels, so that it must stand ahead of the engine. */
+const isTall = (joke: JokeName, rail: number): boolean => JOKE_FACTS[joke].height > HEIGHT - rail - 5;
 const widthOf = (joke: JokeName): number => JOKE_FACTS[joke].right - JOKE_FACTS[joke].left;
 
 /** Where trees and tall things may stand. No black train before a black tree, nor under its own smoke. */
@@ -16,7 +17,7 @@ export function roomBeside({ nose, tail, steamEnd, joke, rail }: { nose: number;
   const behind = { from: 0, to: Math.min(tail, steamEnd) - 3 };
   if (!isTall(joke, rail)) return { ahead, behind, jokeStands: null };
   const stands = { from: Math.min(ahead.from, WIDTH - 2 - widthOf(joke)), to: Math.min(ahead.from, WIDTH - 2 - widthOf(joke)) + widthOf(joke) };
-  return { ahead: { from: stands.to - 4, to: ahead.to }, behind, jokeStands: stands };
+  return { ahead: { from: stands.from + 14, to: ahead.to }, behind, jokeStands: stands }; // a tree may look over a boot's toe: the boot has its halo
 }
 
 type Tree = { readonly form: TreeForm; readonly heightCm: number };
@@ -76,6 +77,6 @@ export function plantInFront(input: FrontInput, dice: Dice): { front: Planting[]
     front.push({ form: plant.form, x: x + half, heightCm, foot: HEIGHT - dice.between(0.5, 2.5) });
     x += 2 * half + dice.between(4, 22);
   }
-  const perch = thing.name === 'boot' && dice.next() < 0.5 ? [{ name: 'robin' as const, x: thing.x + 1.5, foot: thing.foot - 31.5 }] : [];
+  const perch = thing.name === 'boot' && input.room.jokeStands && dice.next() < 0.7 ? [{ name: 'robin' as const, x: thing.x + 1.5, foot: thing.foot - 31.5 }] : [];
   return { front, oddments: [thing, ...perch] };
 }

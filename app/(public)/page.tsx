@@ -1,0 +1,30 @@
+import type { Metadata } from 'next';
+import { PublicSheet } from '@/app/(public)/public-sheet';
+import { HomeBody } from '@/components/garden/home-body';
+import { Bill } from '@/components/layout/bill';
+import { WithMargin } from '@/components/layout/columns';
+import { GardenMargin } from '@/components/layout/garden-margin';
+import { RailRule } from '@/components/ui/rail-rule';
+import { dayOf } from '@/lib/core/time';
+import { comingDays, listGardens } from '@/lib/gardens/queries';
+import { toHomePage } from '@/lib/gardens/home-view';
+import { pageContext } from '@/lib/web/context';
+
+export async function generateMetadata(): Promise<Metadata> {
+  const { club } = await pageContext('anyone');
+  return { title: { absolute: `${club.name}: open days` }, description: 'Garden railways to visit: the next open day, where it is, and how to come.' };
+}
+
+export default async function HomePage() {
+  const ctx = await pageContext('anyone');
+  const days = await comingDays(ctx);
+  const page = toHomePage(days, await listGardens(ctx, days[0]?.slug ?? null), dayOf(ctx.now, ctx.club.timeZone), ctx.club);
+  return (
+    <PublicSheet club={ctx.club} here="/">
+      <Bill name={page.name} line={page.line} sums={page.sums} rail={page.day ? <RailRule trainAt={0.72} coaches={2} /> : <RailRule state="empty" />} />
+      <WithMargin margin={<GardenMargin plants={page.flowers} />}>
+        <HomeBody page={page} />
+      </WithMargin>
+    </PublicSheet>
+  );
+}
