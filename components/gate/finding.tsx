@@ -8,6 +8,7 @@ import type { ListedParty } from '@/lib/gate/schema';
 import { peopleInWords } from '@/lib/gate/views/screen';
 import { SmallShutGate } from './gate-drawings';
 import { GateKey, PadKey } from './gate-key';
+import { takeFocus } from './take-focus';
 import type { Gate } from './use-gate';
 
 const SHOWN = 3;
@@ -31,6 +32,7 @@ export function Finding({ gate, onFound, onDone }: FindingProps) {
         <label className="flex min-h-14 flex-wrap items-center gap-x-3 border-[2.5px] border-current bg-sun-paper px-3 group-data-[sun=yes]:border-[3.5px]">
           <span className="sr-only">{by === 'name' ? 'The beginning of a name' : 'The beginning of a code'}</span>
           <input
+            ref={takeFocus}
             value={typed}
             onChange={(event) => setTyped(event.target.value.toUpperCase().slice(0, 40))}
             inputMode="none"

@@ -9,6 +9,7 @@ import { GateButton } from './gate-button';
 import { AjarGate, FullGate, OpenGate, ShutGate } from './gate-drawings';
 import { Track } from './gate-parts';
 import { countOut, letIn, nameOf, takeBack, ticketNow, verdictNow, type Place, type Showing } from './showing';
+import { takeFocus } from './take-focus';
 import type { Gate } from './use-gate';
 
 type VerdictScreenProps = { gate: Gate; showing: Showing; cab: ReactNode; go: (place: Place) => void; next: () => void };
@@ -56,7 +57,7 @@ function LetInScene({ gate, fact }: { gate: Gate; fact: GateFact }) {
   const [first = '', second = ''] = sentence.split(/ (?=at )/);
   return (
     <div className="relative min-h-[288px] landscape:min-h-0 flex-1">
-      <p role="status" className="sr-only">{sentence}</p>
+      <p ref={takeFocus} tabIndex={-1} role="status" className="sr-only">{sentence}</p>
       <OpenGate lines={[first, second]} number={count} isFramed={false} />
     </div>
   );
@@ -71,7 +72,7 @@ function Scene({ gate, verdict, onLetIn }: SceneProps) {
   if (verdict.kind === 'let_in') {
     return (
       <div className="flex flex-1 flex-col">
-        <p role="status" className="sr-only">{sentence}. Press the number.</p>
+        <p ref={takeFocus} tabIndex={-1} role="status" className="sr-only">{sentence}. Press the number.</p>
         <button type="button" aria-label={sentence} onClick={() => onLetIn(verdict.heads)} className="relative min-h-[288px] landscape:min-h-0 w-full flex-1 cursor-pointer">
           <OpenGate lines={['Let in']} number={verdict.number} isFramed />
         </button>
@@ -80,7 +81,7 @@ function Scene({ gate, verdict, onLetIn }: SceneProps) {
   }
   return (
     <>
-      <p role="status" className={SENTENCE}>{sentence}</p>
+      <p ref={takeFocus} tabIndex={-1} role="status" className={SENTENCE}>{sentence}</p>
       <div className="relative mt-2 min-h-40 landscape:min-h-0 flex-1"><Drawing verdict={verdict} minutesOfDay={minutesOf(wallTime(now, list.time.timeZone))} stopNumber={list.here.stopNumber} /></div>
     </>
   );

@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
 import { useState } from 'react';
+import { dayOf, formatDay } from '@/lib/core/time';
 import { crowdSentence, dueNow } from '@/lib/gate/views/screen';
 import { GateButton } from './gate-button';
 import { WaitingGate } from './gate-drawings';
@@ -36,6 +37,7 @@ export function Watching({ gate, cab, camera, note, go, sun }: WatchingProps) {
         <div role="status" className="mb-4 flex-1 space-y-2 text-xl leading-snug">
           {note && <p className="font-bold">{note}</p>}
           {(camera === 'refused' || camera === 'none') && <p className="font-bold">{camera === 'refused' ? 'The camera is not allowed here: find each party by name or code.' : 'This phone shows no camera here: find each party by name or code.'}</p>}
+          {dayOf(now, list.time.timeZone) !== list.here.heldOn && <p className="font-bold">This gate is for {formatDay(list.here.heldOn, list.time)}.</p>}
           {list.here.calledOff && <p className="font-bold">This open day is called off. Nobody is let in.</p>}
           <p>{crowdSentence(fold, list.here, due, list.time)}</p>
         </div>
