@@ -2,7 +2,7 @@ import { distanceMeters, type Place } from './geodesic';
 import { type LonLat, type RoadClass, type Valley, featuresOf } from './valley';
 
 /** Kilometres an hour, stops and bends included, on the demo valley's three classes of road. Common practice, no source. */
-export const SPEED_KMH: Readonly<Record<RoadClass, number>> = { main: 45, road: 32, lane: 22 };
+export const SPEED_KMH: Readonly<Record<RoadClass, number>> = { main: 55, road: 42, lane: 30 };
 
 /** How far from a road a place may lie and still be driven to, in metres; beyond it the road network says nothing. */
 export const SNAP_REACH_METERS = 2000;

@@ -35,9 +35,9 @@ export function reachFrom(graph: RoadGraph, starts: readonly { readonly node: nu
   return { minutes, before };
 }
 
-/** The quickest way between two joined places; null when no road leads there. Off the road the lane's speed counts. */
+/** The quickest way between two joined places; null when no road leads there. Off the drawn roads lie streets like any other road. */
 export function quickestWay(graph: RoadGraph, from: Snap, to: Snap): Way | null {
-  const off = minutesFor(from.offMeters + to.offMeters, SPEED_KMH.lane);
+  const off = minutesFor(from.offMeters + to.offMeters, SPEED_KMH.road);
   const reached = reachFrom(graph, [
     { node: from.edge.from, minutes: from.along * from.edge.minutes },
     { node: from.edge.to, minutes: (1 - from.along) * from.edge.minutes },
