@@ -101,7 +101,7 @@ export const gateDevices = pgTable('gate_devices', {
   seenAt: instant().notNull(),
 }, (t) => [uniqueIndex('gate_devices_numbered').on(t.passId, t.number)]);
 
-export const LINK_KINDS = ['booking', 'calendar'] as const;
+export const LINK_KINDS = ['booking', 'browser', 'calendar'] as const; // from a letter; from the browser that paid; a calendar's feed
 
 /** A link that is itself the permission. Hashed, expiring, revocable. */
 export const bearerLinks = pgTable('bearer_links', {

@@ -40,8 +40,8 @@ export type AccountActor = {
 };
 /** A browser that holds places, known by its cookie. */
 export type HolderActor = { kind: 'holder'; holderHash: string; householdId: Id<'household'> | null };
-/** Whoever followed a booking's private link. */
-export type BookingActor = { kind: 'booking'; bookingId: Id<'booking'> };
+/** Whoever followed a booking's private link; `provesMailbox` when that link came in a letter. */
+export type BookingActor = { kind: 'booking'; bookingId: Id<'booking'>; provesMailbox?: true };
 /** A phone that opened a gate pass. */
 export type GateActor = { kind: 'gate'; passId: Id<'gatePass'>; deviceId: Id<'device'>; stopId: Id<'stop'>; openDayId: Id<'openDay'> };
 /** A handler, job or script: machines have no role. */

@@ -68,7 +68,7 @@ async function booking(code: string): Promise<BookingActor> {
   const hash = await readBookingLink(code);
   const { db, now } = await base();
   const byLink = hash === null ? null : await findBookingByLink(db, code, hash, now);
-  if (byLink) return { kind: 'booking', bookingId: byLink };
+  if (byLink) return byLink;
   const actor = await account();
   const own = actor?.householdId ? await findOwnBooking(db, code, actor.householdId) : null;
   if (!own) throw new Refusal('not_found');
@@ -97,6 +97,13 @@ export async function pageContext<R extends Requires>(requires: R, options: { co
     if (error.code === 'not_allowed' && (await account()) === null) redirect('/sign-in');
     notFound();
   }
+}
+
+/** The context of a page for a browser that may have kept places: null when it never did, since a page may not make the cookie. */
+export async function holderContext(): Promise<Ctx<HolderActor> | null> {
+  const holderHash = await readHolder();
+  if (holderHash === null) return null;
+  return { ...(await base()), actor: { kind: 'holder', holderHash, householdId: (await account())?.householdId ?? null } };
 }
 
 /** The context of a machine: a webhook, a job, a script. Machines have no role. */

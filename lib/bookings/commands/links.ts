@@ -1,0 +1,56 @@
+import 'server-only';
+import { and, eq, isNotNull, isNull } from 'drizzle-orm';
+import type { Queryable } from '@/db/client';
+import { bookings } from '@/db/schema/bookings';
+import { bookingContacts } from '@/db/schema/bookings';
+import { openDays } from '@/db/schema/opendays';
+import { bearerLinks } from '@/db/schema/people';
+import type { Id } from '@/lib/core/ids';
+import { firstOrNull, only } from '@/lib/core/only';
+import { Refusal } from '@/lib/core/refusal';
+import { addMinutes } from '@/lib/core/time';
+import type { BookingActor, Ctx, HolderActor } from '@/lib/infra/context';
+import { hashSecret, newSecret } from '@/lib/infra/secrets';
+import { inTransaction } from '@/lib/infra/transaction';
+import type { HoldIdInput } from '../schema';
+
+const LINK_DAYS = 60; // after the day, as in the letters
+
+/** A secret whose hash alone is kept; `kind` says how it was handed over. */
+async function newLink(db: Queryable, kind: 'browser' | 'calendar', code: string, now: Date, expiresAt: Date): Promise<string> {
+  const secret = newSecret();
+  await db.insert(bearerLinks).values({ kind, subjectId: code, secretHash: hashSecret(secret), madeAt: now, expiresAt });
+  return secret;
+}
+
+/** Lets the browser that kept and paid for places open its booking's page. Such a link says nothing about whose mailbox it is. */
+export async function openBooking({ db, actor, now }: Ctx<HolderActor>, input: HoldIdInput): Promise<{ code: string; secret: string }> {
+  const own = firstOrNull(await db.select({ code: bookings.code, closesAt: openDays.closesAt }).from(bookings).innerJoin(openDays, eq(openDays.id, bookings.openDayId))
+    .where(and(eq(bookings.id, input.bookingId), eq(bookings.holderHash, actor.holderHash), isNotNull(bookings.confirmedAt))));
+  if (!own) throw new Refusal('not_found');
+  return { code: own.code, secret: await newLink(db, 'browser', own.code, now, addMinutes(own.closesAt, LINK_DAYS * 1440)) };
+}
+
+/** Makes the private calendar feed of a booking, once; an earlier link stops working. Answers the secret, which is shown this once. */
+export async function makeFeed(ctx: Ctx<BookingActor>): Promise<string> {
+  return inTransaction(ctx.db, async (tx) => {
+    const own = await findOwn(tx, ctx.actor.bookingId);
+    await tx.update(bearerLinks).set({ revokedAt: ctx.now }).where(and(eq(bearerLinks.kind, 'calendar'), eq(bearerLinks.subjectId, own.code), isNull(bearerLinks.revokedAt)));
+    return newLink(tx, 'calendar', own.code, ctx.now, addMinutes(own.closesAt, LINK_DAYS * 1440));
+  });
+}
+
+/** Takes the private calendar feed back: calendars that read it find nothing any more. */
+export async function revokeFeed(ctx: Ctx<BookingActor>): Promise<void> {
+  const own = await findOwn(ctx.db, ctx.actor.bookingId);
+  await ctx.db.update(bearerLinks).set({ revokedAt: ctx.now }).where(and(eq(bearerLinks.kind, 'calendar'), eq(bearerLinks.subjectId, own.code), isNull(bearerLinks.revokedAt)));
+}
+
+/** Confirms that the letters reach the party: only for whoever followed a link that came in one. */
+export async function confirmEmail({ db, actor, now }: Ctx<BookingActor>): Promise<void> {
+  if (actor.provesMailbox !== true) throw new Refusal('not_allowed', { sentence: 'Open this page from the letter we sent to that address, then press the button here.' });
+  await db.update(bookingContacts).set({ emailConfirmedAt: now }).where(and(eq(bookingContacts.bookingId, actor.bookingId), isNull(bookingContacts.emailConfirmedAt)));
+}
+
+const findOwn = async (db: Queryable, bookingId: Id<'booking'>) =>
+  only(await db.select({ code: bookings.code, closesAt: openDays.closesAt }).from(bookings).innerJoin(openDays, eq(openDays.id, bookings.openDayId)).where(eq(bookings.id, bookingId)));
