@@ -7,7 +7,7 @@ import { GardenMargin } from '@/components/layout/garden-margin';
 import { RailRule } from '@/components/ui/rail-rule';
 import { dayOf } from '@/lib/core/time';
 import { comingDays, listGardens } from '@/lib/gardens/queries';
-import { toHomePage } from '@/lib/gardens/home-view';
+import { toHomePage } from '@/lib/gardens/views/home';
 import { pageContext } from '@/lib/web/context';
 
 export async function generateMetadata(): Promise<Metadata> {

@@ -3,7 +3,7 @@ import { Columns, Part } from '@/components/layout/columns';
 import { Plate } from '@/components/plate/plate';
 import { LinkButton } from '@/components/ui/link-button';
 import { Notice } from '@/components/ui/notice';
-import type { HomePage } from '@/lib/gardens/home-view';
+import type { HomePage } from '@/lib/gardens/views/home';
 import { PlateWall } from './garden-list';
 import { Handbill } from './handbill';
 

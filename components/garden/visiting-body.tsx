@@ -1,5 +1,5 @@
 import { Columns, Part } from '@/components/layout/columns';
-import type { VisitingPage, VisitingPart } from '@/lib/gardens/visiting-view';
+import type { VisitingPage, VisitingPart } from '@/lib/gardens/views/visiting';
 import { CautionList } from './care-list';
 
 /** How a visit works, in two columns: what everybody needs on the left, what some need on the right. */

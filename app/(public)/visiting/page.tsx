@@ -2,7 +2,7 @@ import type { Metadata } from 'next';
 import { PublicSheet } from '@/app/(public)/public-sheet';
 import { VisitingBody } from '@/components/garden/visiting-body';
 import { Bill } from '@/components/layout/bill';
-import { toVisitingPage } from '@/lib/gardens/visiting-view';
+import { toVisitingPage } from '@/lib/gardens/views/visiting';
 import { pageContext } from '@/lib/web/context';
 
 export const metadata: Metadata = { title: 'Visiting', description: 'How a visit works, what to mind, and how to get there.' };

@@ -3,7 +3,7 @@ import { whenAndWhere } from '@/lib/opendays/rules/day-words';
 import { priceSentence } from '@/lib/opendays/rules/prices';
 import { counted, inWords, inWordsFirst } from '@/lib/opendays/rules/words';
 import { pricesOf, type PriceFacts } from '@/lib/opendays/views';
-import { toFlowersOf, toListed, type FlowerView, type ListedGarden, type ListedRow } from './views';
+import { toFlowersOf, toListed, type FlowerView, type ListedGarden, type ListedRow } from '../views';
 
 /** A coming open day as the home page is given it. */
 export type HomeDayRow = {
