@@ -33,9 +33,9 @@ const say = (status: number, body: object) => NextResponse.json(body, { status, 
 
 /** Builds a route handler, the one way there is: origin, size, actor, schema, command, status. */
 export function route<R extends RouteRequires, S extends z.ZodType = z.ZodType<undefined>>(parts: RouteParts<R, S>) {
-  return async function handle(request: NextRequest, segment: { params: Promise<Record<string, string>> }): Promise<Response> {
+  return async function handle(request: NextRequest, segment: { params: Promise<Record<string, string> | undefined> }): Promise<Response> {
     try {
-      const asked = await readRequest(parts, request, await segment.params);
+      const asked = await readRequest(parts, request, (await segment.params) ?? {}); // a path without a variable part has none
       if (asked instanceof Response) return asked;
       const answer = await parts.run(asked);
       return answer instanceof Response ? answer : NextResponse.json(answer, { headers: privately });
