@@ -32,7 +32,7 @@ async function main() {
   const settings: Omit<StackSettings, 'build'> = { mode: 'demo', folder: FOLDER, database, ports, remembers: true };
   await step('Bringing the database up to date', () => prepare(database));
   const env = portalEnv({ ...settings, build: '.next' });
-  const planted = await step('Planting the demo club', () => plant(env, database.MIGRATE_DATABASE_URL, stopped.signal));
+  const planted = await step('Planting the demo club', () => plant({ ...env, CARDS_FILE: join(root, FOLDER, 'cards.jsonl') }, database.MIGRATE_DATABASE_URL, stopped.signal));
   const build = await ensureBuild(stopped.signal);
   stopped.signal.throwIfAborted();
   processes = await step('Starting', () => startStack({ ...settings, build }, (why) => void stop(1, why.message)));

@@ -16,6 +16,7 @@ import { addMinutes } from '@/lib/core/time';
 import { env } from '@/lib/infra/env';
 import { hashPassword } from '@/lib/people/commands/password';
 import { bookingRows } from './booking-rows';
+import { cardMemory, type MemoryLine, rememberCards } from './card-memory';
 import { seedCalendar, type SeedCalendar } from './calendar';
 import { CLASSES, CLUB, duesRows as classDuesRows } from './club';
 import { dayRows, seedDays } from './days';
@@ -31,15 +32,16 @@ import { DEMO_SIGN_INS } from './sign-ins';
 
 export { DEMO_SIGN_INS as signIns };
 
-/** Plants the whole demo club in one transaction, dated from `now`. Throws when a club is there already. */
-export async function seed({ now = new Date() }: { now?: Date } = {}): Promise<void> {
+/** Plants the whole demo club in one transaction, dated from `now`, and tells the card stand-in's file of its payments. Throws when a club is there already. */
+export async function seed({ now = new Date(), cardsFile }: { now?: Date; cardsFile?: string | undefined } = {}): Promise<void> {
   const mode = env().LEAFHALT_MODE;
   if (mode !== 'demo' && mode !== 'test') throw new Error('The demo club is planted only by scripts/start and by tests.');
   const hashes = await Promise.all(DEMO_SIGN_INS.map(async ({ email, password }) => ({ email, hash: await hashPassword(password) })));
-  await getDb().transaction(async (tx) => {
+  const payments = await getDb().transaction(async (tx) => {
     if ((await tx.select({ id: club.id }).from(club)).length > 0) throw new Error('There is a club in this database already.');
-    await plantClub(tx, seedCalendar(now), hashes);
+    return plantClub(tx, seedCalendar(now), hashes);
   });
+  if (cardsFile) rememberCards(cardsFile, payments);
 }
 
 const accountOf = (roll: readonly Member[], email: string): Id<'account'> => {
@@ -48,14 +50,14 @@ const accountOf = (roll: readonly Member[], email: string): Id<'account'> => {
   return member.accountId;
 };
 
-async function plantClub(tx: Tx, calendar: SeedCalendar, hashes: readonly { email: string; hash: string }[]): Promise<void> {
+async function plantClub(tx: Tx, calendar: SeedCalendar, hashes: readonly { email: string; hash: string }[]): Promise<MemoryLine[]> {
   const roll = members(calendar);
   await tx.insert(club).values(CLUB);
   await tx.insert(membershipClasses).values([...CLASSES]);
   await tx.insert(classDues).values(classDuesRows(calendar.year));
   await plantRoll(tx, calendar, roll, hashes);
   await plantGardens(tx, roll, calendar.year);
-  await plantDays(tx, calendar, roll);
+  return plantDays(tx, calendar, roll);
 }
 
 async function plantRoll(tx: Tx, calendar: SeedCalendar, roll: readonly Member[], hashes: readonly { email: string; hash: string }[]): Promise<void> {
@@ -80,7 +82,7 @@ async function plantGardens(tx: Tx, roll: readonly Member[], year: number): Prom
   await tx.insert(placeMinutes).values(minutes.place);
 }
 
-async function plantDays(tx: Tx, calendar: SeedCalendar, roll: readonly Member[]): Promise<void> {
+async function plantDays(tx: Tx, calendar: SeedCalendar, roll: readonly Member[]): Promise<MemoryLine[]> {
   const cleo = accountOf(roll, 'cleo@alderfork.example');
   const days = seedDays(calendar);
   const seated = seatEveryone(days, roll, minutesRows().area, calendar);
@@ -90,16 +92,17 @@ async function plantDays(tx: Tx, calendar: SeedCalendar, roll: readonly Member[]
   await tx.insert(entryTimes).values(day.times);
   await tx.insert(prices).values(day.prices);
   await tx.insert(planChanges).values(day.notes);
-  await plantMoney(tx, calendar, roll, bookingRows(seated.bookings, calendar.now));
+  const payments = await plantMoney(tx, calendar, roll, bookingRows(seated.bookings, calendar.now));
   const gate = gateRows(days.past, seated.bookings.filter((booking) => booking.day === days.past), cleo);
   await tx.insert(gatePasses).values(gate.passes);
   await tx.insert(gateDevices).values(gate.devices);
   await tx.insert(gateFacts).values(gate.facts);
   await plantAudit(tx, calendar, cleo, days.next.stops.find(({ number }) => number === 5)?.id ?? null);
+  return payments;
 }
 
 /** Dues and bookings lie in one set of books, with one run of receipt numbers a year. */
-async function plantMoney(tx: Tx, calendar: SeedCalendar, roll: readonly Member[], booked: ReturnType<typeof bookingRows>): Promise<void> {
+async function plantMoney(tx: Tx, calendar: SeedCalendar, roll: readonly Member[], booked: ReturnType<typeof bookingRows>): Promise<MemoryLine[]> {
   const dues = duesRows(roll, calendar, accountOf(roll, 'dov@alderfork.example'));
   const receipts = numberedReceipts([...dues.payments, ...booked.payments]);
   const ledger = bookedRows([...dues.events, ...booked.events]);
@@ -120,6 +123,16 @@ async function plantMoney(tx: Tx, calendar: SeedCalendar, roll: readonly Member[
   await tx.insert(letters).values(written.letters);
   await tx.insert(letterTexts).values(written.texts);
   await tx.insert(sendings).values(written.sendings);
+  return cardMemory([...dues.attempts, ...booked.attempts], [...dues.cards, ...booked.cards], refundedBy(booked));
+}
+
+/** What went back of each card payment, by its intent. */
+function refundedBy({ refunds: back, payments: paid, attempts }: ReturnType<typeof bookingRows>): Map<string, number> {
+  return new Map(back.flatMap(({ paymentId, amountMinor }) => {
+    const attemptId = paid.find(({ id }) => id === paymentId)?.attemptId;
+    const intent = attempts.find(({ id }) => id === attemptId)?.paymentIntentId;
+    return intent ? [[intent, amountMinor]] : [];
+  }));
 }
 
 async function plantAudit(tx: Tx, { now }: SeedCalendar, cleo: Id<'account'>, stopId: Id<'stop'> | null): Promise<void> {

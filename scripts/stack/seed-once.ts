@@ -9,7 +9,7 @@ await owner.connect();
 const { rows } = await owner.query<{ note: string | null }>("select shobj_description(oid, 'pg_database') as note from pg_database where datname = current_database()");
 let plantedOn = /^planted (\S+)/.exec(rows[0]?.note ?? '')?.[1];
 if (plantedOn === undefined) {
-  await seed();
+  await seed({ cardsFile: process.env['CARDS_FILE'] });
   plantedOn = new Date().toISOString().slice(0, 10);
   await owner.query(`do $$ begin execute format('comment on database %I is %L', current_database(), 'planted ${plantedOn}'); end $$`);
 }

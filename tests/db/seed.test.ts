@@ -1,5 +1,8 @@
+import { mkdtempSync, rmSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { dirname, join } from 'node:path';
 import { and, eq, gt, isNull, lt, sql } from 'drizzle-orm';
-import { beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { getDb } from '@/db/client';
 import { bookings, visits } from '@/db/schema/bookings';
 import { payments, postings } from '@/db/schema/books';
@@ -13,6 +16,7 @@ import { only } from '@/lib/core/only';
 import { householdDues } from '@/lib/dues/queries';
 import type { SystemCtx } from '@/lib/infra/context';
 import { signInWithPassword } from './seed-sign-in';
+import { Cards } from '@/scripts/stand-ins/cards/cards';
 import { seed } from '@/scripts/seed/run';
 import { DEMO_SIGN_INS } from '@/scripts/seed/sign-ins';
 
@@ -20,7 +24,10 @@ const NOW = new Date('2026-12-01T17:00:00Z');
 const db = getDb();
 const count = async (query: ReturnType<typeof sql>): Promise<number> => only((await db.execute<{ n: number }>(sql`select (${query})::int as n`)).rows).n;
 
-beforeAll(() => seed({ now: NOW }));
+const cardsFile = join(mkdtempSync(join(tmpdir(), 'leafhalt-seed-')), 'cards.jsonl');
+
+beforeAll(() => seed({ now: NOW, cardsFile }));
+afterAll(() => rmSync(dirname(cardsFile), { recursive: true }));
 
 describe('the demo club', () => {
   it('is planted once and never over another club', async () => {
@@ -109,6 +116,21 @@ describe('the demo club', () => {
   it('lets everyone on the printed list sign in with the printed password', async () => {
     for (const { email, password } of DEMO_SIGN_INS) expect(await signInWithPassword(email, password)).toBe(true);
     expect(await signInWithPassword('cleo@alderfork.example', 'not her password')).toBe(false);
+  });
+
+  it('has card payments that the card stand-in can refund, up to what is left of them', async () => {
+    const cards = new Cards({ file: cardsFile, hook: null, clockOffsetFile: null });
+    const paid = await db.execute<{ intent: string; amount: number; back: number }>(sql`select a.payment_intent_id as intent, a.amount_minor as amount,
+      coalesce((select sum(r.amount_minor) from refunds r join payments p on p.id = r.payment_id where p.attempt_id = a.id), 0)::int as back from payment_attempts a`);
+
+    const left = paid.rows.map(({ intent }) => {
+      const charge = cards.store.find('charge', cards.store.find('intent', intent)?.latest_charge ?? '');
+      return charge ? charge.amount - charge.amount_refunded : null;
+    });
+    cards.stop();
+
+    expect(paid.rows.length).toBeGreaterThan(100);
+    expect(left).toEqual(paid.rows.map(({ amount, back }) => amount - back));
   });
 
   it('has nothing dated after today but what is to come, and owes nobody a letter', async () => {
