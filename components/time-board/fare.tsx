@@ -24,7 +24,7 @@ export function Fare({ board, chosen, party, heads, state, problem, isSending, i
             <span className={styles.wideOnly}>{sum.words} </span>
             <b className="font-heading text-[1.5rem] font-extrabold">{sum.amount}</b>
           </p>
-        ) : <p className="max-w-none">Choose one time, or several at different gardens.</p>}
+        ) : <p className="max-w-none">Choose one time, or several at different gardens.{isAwake ? '' : ' The price stands on the next page.'}</p>}
         <p className={`max-w-none text-ink-soft ${styles.wideOnly ?? ''}`}>We keep them for you for {board.holdMinutes} minutes while you give a name{prices.length > 0 && sum.amount === 'free' ? '' : ' and pay'}.</p>
       </div>
       <Button type="submit" tone="main" aria-disabled={isSending}>{isAwake ? keepWords(chosen, heads) : 'Keep places at these times'}</Button>

@@ -72,11 +72,11 @@ function Board({ board: served, action, first, path, caption, heads: headOf, pos
   const called = chosen.find((cell) => cell.entryTimeId === choice.chosen.at(-1)) ?? chosen.at(-1);
   const setting = settingOf(board);
   return (
-    <form action={submit} onSubmit={send} className={styles.board} data-size={setting} noValidate>
+    <form ref={choice.adopt} action={submit} onSubmit={send} className={styles.board} data-size={setting} noValidate>
       <input type="hidden" name="openDayId" value={board.openDayId} />
       {insists ? <input type="hidden" name="insists" value="on" /> : null}
       <PeopleLine typed={choice.typed} only={choice.only} mistake={mistake} path={path} acts={choice} />
-      <div className={styles.sides} data-beside={setting === 'few'}>
+      <div className={styles.sides} data-beside={setting !== 'many'}>
         <div className={styles.measure}>
           <div className={styles.sheet}>
             <div className={`rail ${styles.rail ?? ''}`} aria-hidden="true">

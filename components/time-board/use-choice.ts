@@ -1,9 +1,9 @@
 'use client';
 
-import { useState } from 'react';
+import { useCallback, useState } from 'react';
 import type { FormState } from '@/lib/core/form-state';
 import type { Only } from '@/lib/opendays/rules/board';
-import type { BoardAsked } from '@/lib/opendays/rules/board-asked';
+import { readBoardAsked, type BoardAsked } from '@/lib/opendays/rules/board-asked';
 import { headsTyped } from '@/lib/opendays/rules/party';
 import type { People } from '@/lib/bookings/rules/party';
 
@@ -33,14 +33,30 @@ export function partyOf(typed: PartyTyped): { party: People; isReadable: boolean
   return { party: { adults: adults ?? 0, children: children ?? 0, babes: babes ?? 0 }, isReadable: adults !== null && children !== null && babes !== null };
 }
 
+/** What stands in the boxes of the page right now. */
+function readTyped(form: FormData): FirstChoice {
+  const text = (name: string) => form.getAll(name).filter((value) => typeof value === 'string');
+  const query = Object.fromEntries([...new Set(form.keys())].map((name) => [name, text(name)]));
+  return readBoardAsked(query);
+}
+
+const isSame = (a: readonly string[], b: readonly string[]) => a.length === b.length && a.every((each) => b.includes(each));
+
 /** Everything the party decides on the board: people, times, and which it insisted on. The last chosen time calls the train. */
 export function useChoice(first: FirstChoice) {
   const [typed, setTyped] = useState(first.typed);
   const [only, setOnly] = useState(first.only);
   const [chosen, setChosen] = useState(first.chosen);
   const [insisted, setInsisted] = useState<string[]>([]);
+  const adopt = useCallback((form: HTMLFormElement | null) => {
+    if (!form) return;
+    const before = readTyped(new FormData(form));
+    setChosen((chosenNow) => (isSame(chosenNow, before.chosen) ? chosenNow : before.chosen));
+    setTyped(before.typed);
+    setOnly(before.only);
+  }, []);
   return {
-    typed, only, chosen, insisted,
+    typed, only, chosen, insisted, adopt,
     type: (kind: keyof People, text: string) => setTyped((before) => ({ ...before, [kind]: text })),
     show: (next: Only) => setOnly(next),
     toggle: (entryTimeId: string) => setChosen((before) => (before.includes(entryTimeId) ? before.filter((each) => each !== entryTimeId) : [...before, entryTimeId])),

@@ -202,7 +202,7 @@ function cautionsOfDay(stops: readonly OpenDayStop[]): OpenDayPage['cautions'] {
 export function toOpenDayPage(day: OpenDayRow, entries: EntryFacts[], club: BoardClub, now: Date): OpenDayPage {
   const stops = day.stops.map((stop) => ({
     stopId: stop.stopId, gardenId: stop.gardenId, number: stop.number, slug: stop.slug, name: stop.name, shortName: stop.shortName, stayMinutes: stop.stayMinutes,
-    subtitle: `${scaleInWords(stop.scaleOneTo)}, ${powersInWords(stop.powers)}`, isSteam: stop.powers.includes('live-steam'), isStepFree: stop.isStepFree, hasWater: stop.water !== 'none',
+    subtitle: `${scaleInWords(stop.scaleOneTo)}, ${powersInWords(stop.powers.slice(0, 1))}`, isSteam: stop.powers.includes('live-steam'), isStepFree: stop.isStepFree, hasWater: stop.water !== 'none',
   }));
   const board = toBoard({ openDayId: day.id, stops, entries, prices: day.prices, minutes: day.minutes, partyPeopleMax: day.partyPeopleMax }, club, now);
   const line = toOpenDayLine(day, club, now);

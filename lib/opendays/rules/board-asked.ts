@@ -1,5 +1,3 @@
-import { z } from 'zod';
-
 /** The query of a page as the framework gives it. */
 export type Query = Record<string, string | string[] | undefined>;
 
@@ -11,7 +9,7 @@ export type BoardAsked = {
 };
 
 const listOf = (value: string | string[] | undefined): string[] => (value === undefined ? [] : Array.isArray(value) ? value : [value]);
-const uuid = z.uuid();
+const UUID = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/i; // this goes to the browser, a schema library does not
 const TYPED_MOST = 9;
 const TIMES_MOST = 14;
 
@@ -19,7 +17,7 @@ const TIMES_MOST = 14;
 export function readBoardAsked(query: Query): BoardAsked {
   const typed = (name: string, otherwise: string) => (listOf(query[name])[0] ?? otherwise).slice(0, TYPED_MOST);
   const isOnly = (name: string) => listOf(query[name]).includes('only');
-  const times = [...listOf(query['with']), ...listOf(query['entryTimeId[]'])].filter((id) => uuid.safeParse(id).success);
+  const times = [...listOf(query['with']), ...listOf(query['entryTimeId[]'])].filter((id) => UUID.test(id));
   return {
     typed: { adults: typed('adults', '2'), children: typed('children', '0'), babes: typed('babes', '0') },
     only: { stepFree: isOnly('step-free'), steam: isOnly('steam') },

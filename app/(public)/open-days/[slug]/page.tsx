@@ -41,7 +41,7 @@ export default async function OpenDayPage({ params, searchParams }: Props) {
       {day.phase === 'called-off' ? <DayCalledOff note={day.note} /> : null}
       {day.phase === 'past' ? <DayDone /> : null}
       {day.phase === 'coming' ? <OpenDayBoard day={day} action={holdPlacesAction} first={first} path={path} /> : null}
-      {day.phase === 'coming' ? <TakeCare cautions={day.cautions} howToCome={day.howToCome} /> : null}
+      {day.phase === 'coming' ? <TakeCare cautions={day.cautions} howToCome={day.howToCome} count={day.gardens.length} /> : null}
       <WhereTheyAre valley={builtInValley} gardens={day.gardens} visited={day.phase === 'coming' ? first.chosen : []} board={day.board} />
     </PublicSheet>
   );
