@@ -17,6 +17,9 @@ export type DuesRows = {
 /** Renewals are asked for 45 days before the year ends. */
 const ASKED_DAYS_BEFORE = 45;
 
+/** Ben likes to pay next year's dues early, so that there is always somebody with dues to pay. */
+const ASKED_EARLY = 2;
+
 type Year = { member: Member; year: number; madeOn: Day; paidOn: Day | null };
 
 /** Which years a household was asked to pay, and when it did. What would be paid after today is not paid yet. */
@@ -33,7 +36,8 @@ function yearsOf(member: Member, { today, year }: SeedCalendar): Year[] {
   };
   const last = one(year - 1, true);
   const present = one(year, member.standing !== 'lapsed' && member.standing !== 'left');
-  const coming = one(year + 1, false);
+  const nextYear = one(year + 1, false);
+  const coming = member.number === ASKED_EARLY && nextYear.madeOn > today ? { ...nextYear, madeOn: addDays(today, -3) } : nextYear;
   const isAsked = coming.madeOn <= today && (member.standing === 'paid' || member.standing === 'ahead') && present.paidOn !== null;
   const ahead: Year = { ...coming, paidOn: member.standing === 'ahead' && addDays(coming.madeOn, 5) <= today ? addDays(coming.madeOn, 5) : null };
   return [...(joinedYear < year ? [last] : []), ...(member.standing === 'left' ? [] : [present]), ...(isAsked ? [ahead] : [])];
