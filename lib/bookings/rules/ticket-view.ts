@@ -45,7 +45,7 @@ export function toTicketView(facts: TicketViewFacts, club: ClubTime): TicketView
   const { adults, children, babes } = facts;
   const parts = [adults > 0 ? counted(adults, 'adult', 'adults') : '', children > 0 ? counted(children, 'child', 'children') : '', babes > 0 ? counted(babes, 'babe in arms', 'babes in arms') : ''];
   return {
-    visitId: facts.visitId, stopNumber: facts.stopNumber, gardenName: facts.gardenName, day: formatDay(on, club, 'bare'), year: on.slice(0, 4), time, timeSuffix,
+    visitId: facts.visitId, stopNumber: facts.stopNumber, gardenName: facts.gardenName, day: formatDay(on, club, 'short').replace(/ \d{4}$/, ''), year: on.slice(0, 4), time, timeSuffix,
     inBy: formatTime(facts.graceUntil, club), people: adults + children + babes, peopleWords: listed(parts.filter((part) => part !== '')),
     number: String(facts.ticketNumber).padStart(6, '0'), code: showSpokenCode(facts.code), state: facts.state,
     qr: facts.payload === null || facts.state.kind === 'given-back' ? null : qrOf(facts.payload),

@@ -14,8 +14,8 @@ export function dayCells(visits: readonly DayVisit[], hour: (minutes: number) =>
   const from = Math.floor(Math.min(...visits.map((visit) => visit.arrives)) / 60);
   const to = Math.max(from + 2, Math.ceil(Math.max(...visits.map((visit) => visit.leaves)) / 60));
   const hours = Array.from({ length: to - from }, (_, at) => (from + at) * 60);
-  const every = hours.length > 7 ? 2 : 1; // figures that would touch are left out; on a phone from six hours on
-  const labels = hours.map((minutes, at) => `<td colspan="6" class="ink${hours.length > 5 && at % 2 === 1 ? ' h2' : ''}" style="font:600 16px ${MONO};letter-spacing:-.04em;color:${INK};padding:0 0 4px;white-space:nowrap">${at % every === 0 ? escapeHtml(hour(minutes)) : ''}</td>`);
+  const every = hours.length > 7 ? 2 : 1; // figures that would touch are left out; on a phone from five hours on
+  const labels = hours.map((minutes, at) => `<td colspan="6" class="ink${hours.length > 4 && at % 2 === 1 ? ' h2' : ''}" style="font:600 16px ${MONO};letter-spacing:-.04em;color:${INK};padding:0 0 4px;white-space:nowrap">${at % every === 0 ? escapeHtml(hour(minutes)) : ''}</td>`);
   const lines = rows.map((row, at) => `<tr><td class="ink gn" align="right" width="140" style="width:140px;font:600 17px/1.1 ${HEADING};color:${INK};padding:0 8px 0 0">${escapeHtml(oneLine(row.name))} ${row.stopNumber}</td>${cells(rows, inTime, at, from * 60, to * 60).map(cellHtml).join('')}</tr>`);
   return `<table role="presentation" width="100%" cellpadding="0" cellspacing="0" style="table-layout:fixed;border-collapse:separate"><tr><td class="gn" width="140" style="width:140px"></td>${labels.join('')}</tr>${lines.join('')}</table>
 <p class="soft" style="margin:8px 0 20px;font:italic 400 16px/1.35 ${HEADING};color:${SOFT}">The same day as a line: time across, gardens down.</p>`;
