@@ -23,6 +23,12 @@ const SUN = 'leafhalt-gate-sun';
 export function GateScreen({ gate, keep }: { gate: Gate; keep: Keep }) {
   const [place, go] = useState<Place>({ at: 'watching', note: null });
   const [scheme, setScheme] = useState<'day' | 'sun'>(() => (keep.getItem(SUN) === 'yes' ? 'sun' : 'day'));
+  const camera = useCamera((text) => {
+    void readCode(text, gate.list, gate.readTicket).then(
+      (ticket) => go({ at: 'ticket', showing: show(gate, ticket) }),
+      () => go({ at: 'watching', note: 'This ticket cannot be read without a signal. Find the party by name or code.' }),
+    );
+  });
   const { here, garden, madeAt, time } = gate.list;
   const kept = gate.keptHere === 0 ? 'No signal' : `No signal: ${gate.keptHere} kept here`;
   const words = gate.hasSignal ? `list from ${formatTime(madeAt, time)}` : kept;
@@ -34,7 +40,7 @@ export function GateScreen({ gate, keep }: { gate: Gate; keep: Keep }) {
     <GateSheet stopNumber={here.stopNumber} ground={isOpen(gate, place) ? 'card' : 'white'} scheme={scheme}>
       <div className="mx-auto flex min-h-dvh max-w-md flex-col landscape:max-w-5xl">
         <StatusLine stopNumber={here.stopNumber} garden={garden} hasSignal={gate.hasSignal} words={words} />
-        {place.at === 'watching' || place.at === 'ticket' ? <AtTheGate gate={gate} place={place} go={go} sun={{ scheme, toggle: toggleSun }} /> : <Aside gate={gate} place={place} go={go} />}
+        {place.at === 'watching' || place.at === 'ticket' ? <AtTheGate gate={gate} place={place} go={go} camera={camera} sun={{ scheme, toggle: toggleSun }} /> : <Aside gate={gate} place={place} go={go} />}
       </div>
     </GateSheet>
   );
@@ -48,16 +54,10 @@ function isOpen(gate: Gate, place: Place): boolean {
   return gate.fold.standing.has(place.showing.admitId) || drawingOf(verdictNow(gate, place.showing)) === 'open';
 }
 
-type AtTheGateProps = { gate: Gate; place: Extract<Place, { at: 'watching' | 'ticket' }>; go: Go; sun: { scheme: 'day' | 'sun'; toggle: () => void } };
+type AtTheGateProps = { gate: Gate; place: Extract<Place, { at: 'watching' | 'ticket' }>; go: Go; camera: ReturnType<typeof useCamera>; sun: { scheme: 'day' | 'sun'; toggle: () => void } };
 
 /** The two screens with the camera: nobody at the gate, or a ticket. */
-function AtTheGate({ gate, place, go, sun }: AtTheGateProps) {
-  const camera = useCamera((text) => {
-    void readCode(text, gate.list, gate.readTicket).then(
-      (ticket) => go({ at: 'ticket', showing: show(gate, ticket) }),
-      () => go({ at: 'watching', note: 'This ticket cannot be read without a signal. Find the party by name or code.' }),
-    );
-  });
+function AtTheGate({ gate, place, go, camera, sun }: AtTheGateProps) {
   const cab = <CabWindow show={camera.show} state={camera.state} />;
   const next = () => {
     camera.forget();

@@ -4,16 +4,21 @@ import { useCallback, useEffect, useEffectEvent, useRef, useState } from 'react'
 export type CameraState = 'starting' | 'watching' | 'refused' | 'none';
 
 const EVERY_MS = 140;
-/** A code that stays in view is one showing; it counts as shown again after it was away this long. */
-const AWAY_MS = 4_000;
+/** A code that stays in view is one showing; it counts as shown again after so many looks without it, about 4 s. */
+const LOOKS_AWAY = 28;
+
+const NOTHING = { text: '', looksAway: 0 };
 
 type Camera = { show: (screen: HTMLVideoElement | null) => void; state: CameraState; forget: () => void };
 
-/** Watches through the camera for codes. The scanner is fetched only here, and only when a camera may be used. */
+/**
+ * Watches through the camera for codes, while a screen shows what it sees. The scanner is fetched only here, and only
+ * when a camera may be used.
+ */
 export function useCamera(onCode: (text: string) => void): Camera {
   const screen = useRef<HTMLVideoElement | null>(null);
   const stream = useRef<MediaStream | null>(null);
-  const last = useRef({ text: '', at: 0 });
+  const last = useRef({ text: '', looksAway: 0 });
   const [state, setState] = useState<CameraState>('starting');
   const play = useCallback(() => {
     if (screen.current === null || stream.current === null) return;
@@ -24,10 +29,11 @@ export function useCamera(onCode: (text: string) => void): Camera {
     screen.current = element;
     play();
   }, [play]);
-  const see = useEffectEvent((text: string, at: number) => {
-    const isSame = text === last.current.text && at - last.current.at < AWAY_MS;
-    last.current = { text, at };
-    if (!isSame) onCode(text);
+  const look = useEffectEvent((text: string | null) => {
+    const { text: before, looksAway } = last.current;
+    if (text === null) last.current = looksAway + 1 >= LOOKS_AWAY ? NOTHING : { text: before, looksAway: looksAway + 1 };
+    else last.current = { text, looksAway: 0 };
+    if (text !== null && text !== before) onCode(text);
   });
   useEffect(() => {
     const ended = new AbortController();
@@ -41,15 +47,17 @@ export function useCamera(onCode: (text: string) => void): Camera {
       const detector = await loadScanner();
       setState(detector === null ? 'none' : 'watching');
       while (detector !== null && !ended.signal.aborted) {
-        const code = await readCode(detector, screen.current);
-        if (code !== null && !ended.signal.aborted) see(code, performance.now());
+        if (screen.current !== null) {
+          const code = await readCode(detector, screen.current);
+          if (!ended.signal.aborted) look(code);
+        }
         await new Promise((resolve) => setTimeout(resolve, EVERY_MS));
       }
     };
     void begin();
     return () => ended.abort();
   }, [play]);
-  return { show, state, forget: () => (last.current = { text: '', at: 0 }) };
+  return { show, state, forget: () => (last.current = NOTHING) };
 }
 
 async function openCamera(tell: (state: CameraState) => void): Promise<MediaStream | null> {
@@ -78,8 +86,8 @@ async function loadScanner(): Promise<Detector | null> {
   }
 }
 
-async function readCode(detector: Detector, screen: HTMLVideoElement | null): Promise<string | null> {
-  if (screen === null || screen.readyState < HTMLMediaElement.HAVE_CURRENT_DATA) return null;
+async function readCode(detector: Detector, screen: HTMLVideoElement): Promise<string | null> {
+  if (screen.readyState < HTMLMediaElement.HAVE_CURRENT_DATA) return null;
   const [code] = await detector.detect(screen).catch(() => []); // a frame between two states of the camera
   return code?.rawValue ?? null;
 }
