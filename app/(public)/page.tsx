@@ -1,6 +1,6 @@
 import type { Metadata } from 'next';
 import { PublicSheet } from '@/app/(public)/public-sheet';
-import { HomeBody } from '@/components/garden/home-body';
+import { HomeDay, HomeRest } from '@/components/garden/home-body';
 import { Bill } from '@/components/layout/bill';
 import { WithMargin } from '@/components/layout/columns';
 import { GardenMargin } from '@/components/layout/garden-margin';
@@ -22,8 +22,9 @@ export default async function HomePage() {
   return (
     <PublicSheet club={ctx.club} here="/">
       <Bill name={page.name} line={page.line} sums={page.sums} rail={page.day ? <RailRule trainAt={0.72} coaches={2} /> : <RailRule state="empty" />} />
+      <HomeDay page={page} />
       <WithMargin margin={<GardenMargin plants={page.flowers} />}>
-        <HomeBody page={page} />
+        <HomeRest page={page} />
       </WithMargin>
     </PublicSheet>
   );

@@ -7,8 +7,8 @@ import type { HomePage } from '@/lib/gardens/views/home';
 import { PlateWall } from './garden-list';
 import { Handbill } from './handbill';
 
-/** The home page below its bill: the next open day as a handbill, its gardens, the days after it, and joining. */
-export function HomeBody({ page }: { page: HomePage }) {
+/** The next open day as a handbill: one plate, and beside it what, when, where and how to come. */
+export function HomeDay({ page }: { page: HomePage }) {
   const { day, first } = page;
   return (
     <>
@@ -48,6 +48,14 @@ export function HomeBody({ page }: { page: HomePage }) {
       ) : (
         <EmptyDay />
       )}
+    </>
+  );
+}
+
+/** Below the handbill: its gardens, the days after it, and joining. */
+export function HomeRest({ page }: { page: HomePage }) {
+  return (
+    <>
       {page.gardens.length === 0 ? null : (
         <Part title={page.gardensTitle}>
           <p>

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { FilterForm } from '@/components/garden/filter-form';
 import { GardenIndex, NoGardens } from '@/components/garden/garden-list';
-import { HomeBody } from '@/components/garden/home-body';
+import { HomeDay, HomeRest } from '@/components/garden/home-body';
 import { DrawnParticulars } from '@/components/garden/particulars';
 import { PlantingChart } from '@/components/garden/planting-chart';
 import { TimesList } from '@/components/garden/times-list';
@@ -114,7 +114,7 @@ describe('the index of gardens', () => {
 describe('the home page', () => {
   it('without a coming day says so, and shows the gardens meanwhile', () => {
     const page = toHomePage([], [{ ...garden, number: null, placesLeft: null, allPlaces: 0 }], '2027-01-10', club);
-    const at = show(<HomeBody page={page} />);
+    const at = show(<><HomeDay page={page} /><HomeRest page={page} /></>);
 
     expect(page.name).toBe('No open day just now');
     expect(at.textContent).toContain('The sleepers are down');

@@ -33,6 +33,13 @@ describe('a plate', () => {
     expect(plateSvg(pineBarrow, 'rose', 'x')).not.toBe(plateSvg({ ...pineBarrow, slug: 'mossgill' }, 'rose', 'x'));
   });
 
+  it('keeps its sky and its side when a plant is added', () => {
+    const more = compose({ ...pineBarrow, notes: {}, plants: [...pineBarrow.plants, { key: 'iris', drawing: 'iris', heightMm: 200 }] });
+    const before = compose({ ...pineBarrow, notes: {} });
+
+    expect([more.sky, more.tintedSky, more.runsLeft]).toEqual([before.sky, before.tintedSky, before.runsLeft]);
+  });
+
   it('can be cut from any particulars, without stray numbers', () => {
     fc.assert(fc.property(anyGarden, (garden) => {
       expect(/NaN|undefined|Infinity/.test(plateSvg(garden, cardOf(null, garden.slug), 'A & B'))).toBe(false);

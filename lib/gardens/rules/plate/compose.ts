@@ -83,6 +83,7 @@ const TUFTS: Record<MatName, number> = { thyme: 560, star: 240, moss: 230, sedum
 export function compose(garden: PlateParticulars): Block {
   const seed = seedOf(garden.slug);
   const dice = diceFrom(seed);
+  const weather = diceFrom(seed + 7); // of its own, so that a new plant does not change the sky
   const centimetresAMetre = 100 / garden.scaleOneTo;
   const asked = trainFor(garden, dice);
   const steaming = garden.powers[0] === 'live-steam' && (asked[0] === 'tank' || asked[0] === 'saddle');
@@ -100,16 +101,16 @@ export function compose(garden: PlateParticulars): Block {
   const low = plants.flatMap(({ form, heightCm }) => (isFlower(form) || (isTree(form) && heightCm <= HEIGHT - rail - 6) ? [{ form, heightCm }] : []));
   const pond = gap ? ([gap[0] + 4, gap[1]] as const) : ([34 + dice.between(-4, 4), 84 + dice.between(-4, 4)] as const);
   const laid = plantInFront({ low, joke, room, rail, wet: water === 'sea' ? [24, 97] : water === 'pond' ? pond : null }, dice);
-  const sky = SKIES.find((known) => known === garden.notes.sky) ?? pick(dice, SKY_CHOICES);
+  const sky = SKIES.find((known) => known === garden.notes.sky) ?? pick(weather, SKY_CHOICES);
   const mat = plants.map(({ form }) => form).find(isMat);
-  const runsLeft = dice.next() < 0.3;
+  const runsLeft = weather.next() < 0.3;
   const bridge = garden.bridge === 'pier' ? 'trestle' : garden.bridge;
   const block: Block = {
     seed, scale: garden.scaleOneTo, rail, floor: Math.min(64, bridge === 'viaduct' ? 61 : rail + 26), gap, bridge, water, pond, sky,
-    tintedSky: sky === 'clouds' || ((sky === 'rings' || sky === 'drizzle') && dice.next() < 0.5),
-    sun: [dice.between(17, 30), dice.between(11, 14)], far: sky === 'stars' ? 17 : rail - 7 - Math.round(dice.between(0, 4)),
+    tintedSky: sky === 'clouds' || ((sky === 'rings' || sky === 'drizzle') && weather.next() < 0.5),
+    sun: [weather.between(17, 30), weather.between(11, 14)], far: sky === 'stars' ? 17 : rail - 7 - Math.round(weather.between(0, 4)),
     train, nose, runsLeft: false, steaming, overheadWire: garden.powers[0] === 'overhead', back, front: laid.front, oddments: laid.oddments,
-    mat: mat ?? 'chips', tuftCount: mat ? TUFTS[mat] : 70, drifts: [8, 26, 46, 62, 78, 112].map((x) => x + dice.between(-6, 6)),
+    mat: mat ?? 'chips', tuftCount: mat ? TUFTS[mat] : 70, drifts: [8, 26, 46, 62, 78, 112].map((x) => x + weather.between(-6, 6)),
   };
   return runsLeft ? mirrored(block) : block;
 }

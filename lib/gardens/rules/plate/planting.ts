@@ -63,19 +63,25 @@ export function plantInFront(input: FrontInput, dice: Dice): { front: Planting[]
   if (input.wet) taken.push({ from: input.wet[0] + 2, to: input.wet[1] - 2 });
   const front: Planting[] = [];
   let x = dice.between(0, 4);
-  for (let i = 0; i < 40 && x < WIDTH - 4 && front.length < 5; i++) {
-    const plant = input.low[i % Math.max(1, input.low.length)];
+  let tries = 0; // at one place, the plants of the list take their turn until one fits
+  while (x < WIDTH - 4 && front.length < 5) {
+    const plant = input.low[(front.length + tries) % Math.max(1, input.low.length)];
     if (!plant) break;
-    const heightCm = Math.min(plant.heightCm * (i < input.low.length ? 1 : dice.between(0.75, 1)), HEIGHT - input.rail - 3);
+    const heightCm = Math.min(plant.heightCm * (front.length < input.low.length ? 1 : dice.between(0.75, 1)), HEIGHT - input.rail - 3);
     const half = Math.min(24, halfWidthCm(plant.form, heightCm));
     const blocker = taken.find((stretch) => x < stretch.to && x + 2 * half > stretch.from);
-    if (blocker) {
-      if (i % 3 === 2 || input.low.length < 2) x = blocker.to;
+    const isOut = x + half * 1.6 > WIDTH;
+    if (blocker || isOut) {
+      tries += 1;
+      if (tries < input.low.length) continue;
+      if (!blocker) break;
+      x = blocker.to;
+      tries = 0;
       continue;
     }
-    if (x + half * 1.6 > WIDTH) break;
     front.push({ form: plant.form, x: x + half, heightCm, foot: HEIGHT - dice.between(0.5, 2.5) });
     x += 2 * half + dice.between(4, 22);
+    tries = 0;
   }
   const perch = thing.name === 'boot' && input.room.jokeStands && dice.next() < 0.7 ? [{ name: 'robin' as const, x: thing.x + 1.5, foot: thing.foot - 31.5 }] : [];
   return { front, oddments: [thing, ...perch] };
