@@ -36,7 +36,7 @@ export async function sendLetter(ctx: SystemCtx, letterId: Id<'letter'>): Promis
   const outbox = await findOutbox(ctx, letterId);
   const composed: Composed = outbox ? await composeLetter(ctx, outbox) : { dropped: 'Its words were erased.' };
   if ('dropped' in composed) {
-    await settle(ctx, letterId, taken.tries, 'dropped', composed.dropped);
+    await settle(ctx, letterId, taken.nextAt, 'dropped', composed.dropped);
     return 'dropped';
   }
   try {
@@ -47,18 +47,19 @@ export async function sendLetter(ctx: SystemCtx, letterId: Id<'letter'>): Promis
     await ctx.db.insert(sendings).values({ letterId, triedAt: ctx.now, outcome: 'failed', detail });
     return 'failed';
   }
-  await settle(ctx, letterId, taken.tries, 'sent', null, async (tx) => keepWords(tx, ctx, outbox, composed));
+  await settle(ctx, letterId, taken.nextAt, 'sent', null, async (tx) => keepWords(tx, ctx, outbox, composed));
   return 'sent';
 }
 
-async function takeDue({ db, now }: SystemCtx, letterId: Id<'letter'>): Promise<{ tries: number; key: string } | null> {
+async function takeDue({ db, now }: SystemCtx, letterId: Id<'letter'>): Promise<{ tries: number; nextAt: Date; key: string } | null> {
   return inTransaction(db, async (tx) => {
     const row = firstOrNull(await tx.select({ tries: lettersDue.tries, key: letters.key }).from(lettersDue).innerJoin(letters, eq(letters.id, lettersDue.letterId))
       .where(and(eq(lettersDue.letterId, letterId), lte(lettersDue.dueAt, now))).for('no key update', { of: lettersDue, skipLocked: true }));
     if (!row) return null;
     const tries = row.tries + 1;
-    await tx.update(lettersDue).set({ tries, dueAt: addMinutes(now, waitMinutes(tries)) }).where(eq(lettersDue.letterId, letterId));
-    return { tries, key: row.key };
+    const nextAt = addMinutes(now, waitMinutes(tries));
+    await tx.update(lettersDue).set({ tries, dueAt: nextAt }).where(eq(lettersDue.letterId, letterId));
+    return { tries, nextAt, key: row.key };
   });
 }
 
@@ -79,10 +80,10 @@ function toMail({ club }: SystemCtx, key: string, outbox: OutboxLetter | null, {
 }
 
 /** Records how a try ended and, in the same transaction, that the letter is due no more, unless an officer asked again meanwhile. */
-async function settle({ db, now }: SystemCtx, letterId: Id<'letter'>, tries: number, outcome: 'sent' | 'dropped', detail: string | null, also?: (tx: Tx) => Promise<void>): Promise<void> {
+async function settle({ db, now }: SystemCtx, letterId: Id<'letter'>, nextAt: Date, outcome: 'sent' | 'dropped', detail: string | null, also?: (tx: Tx) => Promise<void>): Promise<void> {
   await inTransaction(db, async (tx) => {
     await tx.insert(sendings).values({ letterId, triedAt: now, outcome, detail });
-    await tx.delete(lettersDue).where(and(eq(lettersDue.letterId, letterId), eq(lettersDue.tries, tries)));
+    await tx.delete(lettersDue).where(and(eq(lettersDue.letterId, letterId), eq(lettersDue.dueAt, nextAt)));
     await also?.(tx);
   });
 }
