@@ -1,3 +1,4 @@
+import Link from 'next/link';
 import { Notice } from '@/components/ui/notice';
 
 /** A day whose gates are shut. */
@@ -5,7 +6,7 @@ export function DayDone() {
   return (
     <section className="mt-6">
       <h2>The day is done</h2>
-      <p className="mt-2">The gates are shut and the trains are in their shed. Thank you to everyone who came, and to the hosts. <a href="/open-days">See the days to come</a>.</p>
+      <p className="mt-2">The gates are shut and the trains are in their shed. Thank you to everyone who came, and to the hosts. <Link href="/open-days">See the days to come</Link>.</p>
     </section>
   );
 }
@@ -20,7 +21,7 @@ export function DayCalledOff({ note }: { note: string | null }) {
           <p>This open day will not run. {note} Everyone with tickets has a letter from us that says what happens to them.</p>
         </Notice>
       </div>
-      <p className="mt-4"><a href="/open-days">See the other days</a>.</p>
+      <p className="mt-4"><Link href="/open-days">See the other days</Link>.</p>
     </section>
   );
 }

@@ -32,7 +32,7 @@ export function OpenDayBoard({ day, action, first, path }: OpenDayBoardProps) {
       heads={Object.fromEntries(board.stops.map((stop) => [stop.stopId, <GardenHead key={stop.stopId} stop={stop} />]))}
       posts={Object.fromEntries(board.stops.map((stop) => [stop.stopId, <Post key={stop.stopId} stopNumber={stop.number} label={null} />]))}
       train={<Train />}
-      boardKey={<BoardKey hasFree={board.rows.flat().some((cell) => cell !== null && cell.places > 0)} />}
+      boardKey={<BoardKey />}
       beside={<GardenMargin plants={day.flowers.map(({ plantKey, name, gardens }) => ({ plantKey, name, gardens }))} />}
     />
   );

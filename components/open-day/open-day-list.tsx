@@ -1,3 +1,4 @@
+import Link from 'next/link';
 import type { OpenDayLine } from '@/lib/opendays/views';
 
 /** Open days to come and open days past, each a line that leads to its page. */
@@ -6,7 +7,7 @@ export function OpenDayList({ coming, past }: { coming: readonly OpenDayLine[]; 
     <>
       <section className="pt-6">
         <h2>To come</h2>
-        {coming.length === 0 ? <p className="mt-3">The sleepers are down; the first rail is a date. Look again soon, or see <a href="/gardens">the gardens</a>.</p> : <Days days={coming} />}
+        {coming.length === 0 ? <p className="mt-3">The sleepers are down; the first rail is a date. Look again soon, or see <Link href="/gardens">the gardens</Link>.</p> : <Days days={coming} />}
       </section>
       {past.length === 0 ? null : (
         <section className="mt-9 border-t border-edge pt-5">

@@ -156,7 +156,7 @@ function Barred({ board, cell, state, run, runIds, spoken, tabIndex, acts, isAsk
       </button>
       {isAsked || isOpened ? (
         <span className={styles.why}>
-          <span className={styles.whyReason}>{reason}:</span>
+          <span className={styles.whyReason}>{reason}: </span>
           <button type="button" className={styles.choose} aria-label={`Choose ${cell.opensText} all the same`} onClick={() => acts.insist(cell.entryTimeId)}>
             choose it all the same
           </button>

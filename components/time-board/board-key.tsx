@@ -5,10 +5,10 @@ import { Pegs } from '@/components/drawing/pegs';
 const boxed = 'grid h-[30px] w-11 place-items-center border-[1.5px] border-edge';
 
 /** What the signs of the board mean. Drawn on the server. */
-export function BoardKey({ hasFree }: { hasFree: boolean }) {
+export function BoardKey() {
   return (
     <ul className="mt-4 grid list-none gap-x-9 gap-y-1 p-0 text-[0.9444rem] leading-snug md:grid-cols-2 lg:grid-cols-3 large-print:grid-cols-1">
-      {hasFree ? <Line sign={<span className={`${boxed} figures font-semibold`}>12</span>}>places left: choose it</Line> : null}
+      <Line sign={<span className={`${boxed} figures font-semibold`}>12</span>}>places left: choose it</Line>
       <Line sign={<span className={boxed}><Pegs count={4} /></span>}>five or fewer, a peg for each</Line>
       <Line sign={<Pegs count={2} />}>fewer places than you are</Line>
       <Line sign={<span className="figures font-semibold">–</span>}>full</Line>

@@ -50,7 +50,7 @@ function Board({ board: served, action, first, path, caption, heads: headOf, pos
   const isAwake = useSyncExternalStore(never, () => true, () => false);
   const [state, submit, isSending] = useActionState(action, idleForm);
   const [hasTried, setTried] = useState(false);
-  const choice = useChoice(firstChoice(state, first));
+  const { adopt, ...choice } = useChoice(firstChoice(state, first));
   const { fresh, changes } = useFreshBoard(served);
   const board = onlyFitting(fresh, choice.only, choice.chosen);
   const { party, isReadable } = partyOf(choice.typed);
@@ -72,7 +72,7 @@ function Board({ board: served, action, first, path, caption, heads: headOf, pos
   const called = chosen.find((cell) => cell.entryTimeId === choice.chosen.at(-1)) ?? chosen.at(-1);
   const setting = settingOf(board);
   return (
-    <form ref={choice.adopt} action={submit} onSubmit={send} className={styles.board} data-size={setting} noValidate>
+    <form ref={adopt} action={submit} onSubmit={send} className={styles.board} data-size={setting} noValidate>
       <input type="hidden" name="openDayId" value={board.openDayId} />
       {insists ? <input type="hidden" name="insists" value="on" /> : null}
       <PeopleLine typed={choice.typed} only={choice.only} mistake={mistake} path={path} acts={choice} />
