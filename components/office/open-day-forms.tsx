@@ -4,6 +4,7 @@ import { ActionForm } from '@/components/forms/action-form';
 import { Input } from '@/components/ui/input';
 import { Select, type Choice } from '@/components/ui/select';
 import { Textarea } from '@/components/ui/textarea';
+import { Row } from './row';
 import type { FormAction } from '@/lib/core/form-state';
 import { entryTimeChangeInput, entryTimesInput, noticeInput, openDayChangeInput, openDayInput, planNoteInput, stopChangeInput, stopInput } from '@/lib/opendays/schema';
 
@@ -14,12 +15,16 @@ function DayFields({ day }: { day: DayParts }) {
     <>
       <Input name="title" label="Name" hint="It fills the top of the page: Spring Open Gardens" defaultValue={day.title} required />
       <Input name="placeLine" label="Where, in a few words" hint="in and around Alder Fork" defaultValue={day.placeLine} required />
-      <Input name="heldOn" label="Day" type="date" defaultValue={day.heldOn} width="short" required />
-      <Input name="opensAt" label="Gates open" type="time" defaultValue={day.opensAt} width="short" required />
-      <Input name="closesAt" label="Gates close" type="time" defaultValue={day.closesAt} width="short" required />
-      <Input name="adult" label="An adult pays for each visit" inputMode="decimal" defaultValue={day.adult} width="short" required />
-      <Input name="child" label="A child pays" inputMode="decimal" defaultValue={day.child} width="short" required />
-      <Input name="babe" label="A babe in arms pays" inputMode="decimal" defaultValue={day.babe} width="short" required />
+      <Row>
+        <Input name="heldOn" label="Day" type="date" defaultValue={day.heldOn} width="short" required />
+        <Input name="opensAt" label="Gates open" type="time" defaultValue={day.opensAt} width="short" required />
+        <Input name="closesAt" label="Gates close" type="time" defaultValue={day.closesAt} width="short" required />
+      </Row>
+      <Row>
+        <Input name="adult" label="An adult pays a visit" inputMode="decimal" defaultValue={day.adult} width="short" required />
+        <Input name="child" label="A child pays" inputMode="decimal" defaultValue={day.child} width="short" required />
+        <Input name="babe" label="A babe in arms pays" inputMode="decimal" defaultValue={day.babe} width="short" required />
+      </Row>
       <Textarea name="howToCome" label="How to come" rows={3} defaultValue={day.howToCome} />
     </>
   );
@@ -51,9 +56,11 @@ export function StopForm({ action, openDayId, gardens, number }: { action: FormA
     <ActionForm action={action} schema={stopInput} submit="Add this garden" tone="plain" whenDone="clear">
       <input type="hidden" name="openDayId" value={openDayId} />
       <Select name="gardenId" label="Garden" choices={gardens} />
-      <Input name="number" label="Number: its card and its nip" inputMode="numeric" defaultValue={String(number)} width="heads" required />
-      <Input name="stayMinutes" label="Usual stay in minutes" inputMode="numeric" defaultValue="35" width="heads" required />
-      <Input name="headsLimit" label="People at once, at most" hint="Never above what the host said." inputMode="numeric" defaultValue="20" width="heads" required />
+      <Row>
+        <Input name="number" label="Number, for its card and nip" inputMode="numeric" defaultValue={String(number)} width="heads" required />
+        <Input name="stayMinutes" label="Usual stay in minutes" inputMode="numeric" defaultValue="35" width="heads" required />
+        <Input name="headsLimit" label="People at once, at most" inputMode="numeric" defaultValue="20" width="heads" required />
+      </Row>
     </ActionForm>
   );
 }
@@ -63,22 +70,26 @@ export function StopChangeForm({ action, stop }: { action: FormAction; stop: { i
   return (
     <ActionForm action={action} schema={stopChangeInput} submit="Keep these" tone="plain">
       <input type="hidden" name="stopId" value={stop.id} />
-      <Input name="stayMinutes" label="Usual stay in minutes" inputMode="numeric" defaultValue={String(stop.stayMinutes)} width="heads" required />
-      <Input name="headsLimit" label="People at once, at most" hint={`The host said ${stop.hostLimit}.`} inputMode="numeric" defaultValue={String(stop.headsLimit)} width="heads" required />
+      <Row>
+        <Input name="stayMinutes" label="Usual stay in minutes" inputMode="numeric" defaultValue={String(stop.stayMinutes)} width="heads" required />
+        <Input name="headsLimit" label={`People at once, at most (the host said ${stop.hostLimit})`} inputMode="numeric" defaultValue={String(stop.headsLimit)} width="heads" required />
+      </Row>
     </ActionForm>
   );
 }
 
 /** Makes a row of entry times. */
-export function EntryTimesForm({ action, stopId }: { action: FormAction; stopId: string }) {
+export function EntryTimesForm({ action, stopId, headsLimit }: { action: FormAction; stopId: string; headsLimit: number }) {
   return (
     <ActionForm action={action} schema={entryTimesInput} submit="Make these entry times">
       <input type="hidden" name="stopId" value={stopId} />
-      <Input name="firstAt" label="First start" type="time" defaultValue="10:00" width="short" required />
-      <Input name="lastAt" label="Last start" type="time" defaultValue="15:15" width="short" required />
-      <Input name="everyMinutes" label="Every so many minutes" inputMode="numeric" defaultValue="45" width="heads" required />
-      <Input name="graceMinutes" label="Minutes of grace" inputMode="numeric" defaultValue="20" width="heads" required />
-      <Input name="capacity" label="Places at each" inputMode="numeric" defaultValue="12" width="heads" required />
+      <Row>
+        <Input name="firstAt" label="First start" type="time" defaultValue="10:00" width="short" required />
+        <Input name="lastAt" label="Last start" type="time" defaultValue="15:15" width="short" required />
+        <Input name="everyMinutes" label="Minutes between" inputMode="numeric" defaultValue="45" width="heads" required />
+        <Input name="graceMinutes" label="Minutes of grace" inputMode="numeric" defaultValue="20" width="heads" required />
+        <Input name="capacity" label="Places at each" inputMode="numeric" defaultValue={String(Math.min(12, headsLimit))} width="heads" required />
+      </Row>
     </ActionForm>
   );
 }
@@ -88,9 +99,11 @@ export function EntryTimeChangeForm({ action, time }: { action: FormAction; time
   return (
     <ActionForm action={action} schema={entryTimeChangeInput} submit="Change it, and write to those affected" tone="plain">
       <input type="hidden" name="entryTimeId" value={time.id} />
-      <Input name="opensAt" label="Start" type="time" defaultValue={time.opensAt} width="short" required />
-      <Input name="graceMinutes" label="Minutes of grace" inputMode="numeric" defaultValue={String(time.graceMinutes)} width="heads" required />
-      <Input name="capacity" label="Places" inputMode="numeric" defaultValue={String(time.capacity)} width="heads" required />
+      <Row>
+        <Input name="opensAt" label="Start" type="time" defaultValue={time.opensAt} width="short" required />
+        <Input name="graceMinutes" label="Minutes of grace" inputMode="numeric" defaultValue={String(time.graceMinutes)} width="heads" required />
+        <Input name="capacity" label="Places" inputMode="numeric" defaultValue={String(time.capacity)} width="heads" required />
+      </Row>
       <Input name="reason" label="Why, for the letter" hint="May stay empty." />
     </ActionForm>
   );

@@ -21,6 +21,8 @@ type TableProps<Row> = {
   columns: readonly Column<Row>[];
   rows: readonly Row[];
   rowKey: (row: Row) => string;
+  /** The row's own address on the page, for a pencil note's arrow. */
+  rowId?: (row: Row) => string;
   /** A row opens to its line, below it and as wide as the table. */
   opened?: (row: Row) => ReactNode;
   /** What stands there when there are no rows: a sentence and what to do first. */
@@ -28,7 +30,7 @@ type TableProps<Row> = {
 };
 
 /** A staff table: hairlines, figures in columns, heads that sort by link. Scrolls in its own frame on a phone. */
-export function Table<Row>({ caption, captionShown = 'spoken', columns, rows, rowKey, opened, empty }: TableProps<Row>) {
+export function Table<Row>({ caption, captionShown = 'spoken', columns, rows, rowKey, rowId, opened, empty }: TableProps<Row>) {
   if (rows.length === 0) return <div className="py-3">{empty}</div>;
   return (
     <div className="scroll-frame" role="region" aria-label={typeof caption === 'string' ? caption : 'Table'} tabIndex={0}>
@@ -44,7 +46,7 @@ export function Table<Row>({ caption, captionShown = 'spoken', columns, rows, ro
         <tbody>
           {rows.map((row) => (
             <Fragment key={rowKey(row)}>
-              <tr className="border-b border-rule">
+              <tr className="border-b border-rule" {...(rowId === undefined ? {} : { id: rowId(row) })}>
                 {columns.map((column) => (
                   <Cell key={column.key} column={column} row={row} />
                 ))}

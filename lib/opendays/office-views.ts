@@ -24,3 +24,47 @@ export function toOfficeStops(rows: readonly Row[]): OfficeStop[] {
   }
   return [...stops.values()];
 }
+
+/** What one garden has at one moment of the day; null where it has no entry time then. */
+export type PlaceCell = { number: number; time: OfficeTime | null };
+export type PlaceRow = { at: Date; cells: PlaceCell[]; taken: number; people: number };
+
+/** The union of all starts down, the stops across: the timetable of places and people. */
+export function placesByTime(stops: readonly OfficeStop[]): PlaceRow[] {
+  const starts = [...new Set(stops.flatMap((stop) => stop.times.map((time) => time.opensAt.getTime())))].sort((a, b) => a - b);
+  return starts.map((start) => {
+    const cells = stops.map((stop): PlaceCell => ({ number: stop.number, time: stop.times.find((time) => time.opensAt.getTime() === start) ?? null }));
+    const times = cells.flatMap(({ time }) => (time === null ? [] : [time]));
+    return { at: new Date(start), cells, taken: times.reduce((sum, time) => sum + time.taken, 0), people: times.reduce((sum, time) => sum + time.people, 0) };
+  });
+}
+
+/** All the stops' figures in one. */
+export function sumsOf(stops: readonly OfficeStop[]) {
+  const times = stops.flatMap((stop) => stop.times);
+  const sum = (of: (time: OfficeTime) => number) => times.reduce((total, time) => total + of(time), 0);
+  return { capacity: sum((time) => time.capacity), taken: sum((time) => time.taken), held: sum((time) => time.held) };
+}
+
+type DayLine = { slug: string; parties: number; passes: number; lettersWritten: number };
+
+/** The contents of one open day: the day, its stops, its gates, its letters, its bookings. */
+export const dayContents = (day: DayLine, stops: readonly { number: number; shortName: string; times: readonly unknown[] }[]) => {
+  const path = `/office/open-days/${day.slug}`;
+  return [
+    { href: path, label: 'The day' },
+    { href: `${path}/plan`, label: 'Words, hours, prices' },
+    ...stops.map((stop) => ({ href: `${path}/stops/${stop.number}`, label: `${stop.number} ${stop.shortName}`, count: stop.times.length })),
+    { href: `${path}/gates`, label: 'Gates', count: day.passes },
+    { href: `${path}/letter`, label: 'Letters to parties', count: day.lettersWritten },
+    { href: `/office/bookings?day=${day.slug}`, label: 'Bookings', count: day.parties },
+  ];
+};
+
+type Moving = { entryTimeId: Id<'entryTime'>; heads: number };
+
+/** Where an officer may move a visit: every other open entry time with room for its heads, by garden and start. `say` writes the time. */
+export const moveChoices = (stops: readonly OfficeStop[], visit: Moving, now: Date, say: (at: Date) => string) =>
+  stops.flatMap((stop) => stop.times
+    .filter((time) => time.id !== visit.entryTimeId && time.closedAt === null && time.graceUntil > now && time.capacity - time.taken >= visit.heads)
+    .map((time) => ({ value: time.id, label: `${stop.number} ${stop.shortName}, ${say(time.opensAt)} (${time.capacity - time.taken} places left)` })));

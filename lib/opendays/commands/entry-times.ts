@@ -16,6 +16,8 @@ import { constraintOf } from '@/lib/infra/sql-state';
 import { inTransaction } from '@/lib/infra/transaction';
 import { queueLetter } from '@/lib/letters/commands';
 import { entryStarts } from '../rules/entry-starts';
+import { counted } from '../rules/words';
+import { pencil } from './pencil';
 import type { entryTimeChangeInput, entryTimeIdInput, entryTimesInput } from '../schema';
 
 /** Makes entry times at a stop; a start that is there already refuses all. Returns how many were made. */
@@ -67,6 +69,7 @@ async function change(tx: Tx, ctx: AccountCtx, input: z.output<typeof entryTimeC
     after: { start: formatTime(opensAt, ctx.club), grace: input.graceMinutes, capacity: input.capacity },
   });
   if (opensAt.getTime() === before.opensAt.getTime()) return 0;
+  await pencil(tx, ctx, { openDayId: before.openDayId, stopId: before.stopId, note: `${before.garden}: ${formatTime(before.opensAt, ctx.club)} is now ${formatTime(opensAt, ctx.club)}. ${counted(affected.length, 'party', 'parties')} written to.` });
   const was = `${before.garden} at ${formatTime(before.opensAt, ctx.club)}`;
   for (const visit of affected) await tellMoved(tx, ctx, visit, { was, reason: input.reason });
   return affected.length;
@@ -83,7 +86,8 @@ async function lockBookingsAt(tx: Tx, entryTimeId: Id<'entryTime'>): Promise<Aff
 
 async function lockEntryTime(tx: Tx, entryTimeId: Id<'entryTime'>) {
   const row = firstOrNull(await tx.select({
-    opensAt: entryTimes.opensAt, graceUntil: entryTimes.graceUntil, capacity: entryTimes.capacity, heldOn: openDays.heldOn, headsLimit: stops.headsLimit, garden: gardens.railwayName,
+    openDayId: entryTimes.openDayId, stopId: entryTimes.stopId, opensAt: entryTimes.opensAt, graceUntil: entryTimes.graceUntil, capacity: entryTimes.capacity,
+    heldOn: openDays.heldOn, headsLimit: stops.headsLimit, garden: gardens.railwayName,
   }).from(entryTimes)
     .innerJoin(stops, eq(stops.id, entryTimes.stopId)).innerJoin(openDays, eq(openDays.id, stops.openDayId)).innerJoin(gardens, eq(gardens.id, stops.gardenId))
     .where(eq(entryTimes.id, entryTimeId)).for('no key update', { of: entryTimes }));
@@ -111,8 +115,9 @@ export async function reopenEntryTime(ctx: AccountCtx, { entryTimeId }: z.output
 
 async function setClosed(ctx: AccountCtx, entryTimeId: Id<'entryTime'>, closedAt: Date | null): Promise<void> {
   await inTransaction(ctx.db, async (tx) => {
-    const rows = await tx.update(entryTimes).set({ closedAt }).where(eq(entryTimes.id, entryTimeId)).returning({ id: entryTimes.id });
-    if (rows.length === 0) throw new Refusal('not_found');
+    const before = await lockEntryTime(tx, entryTimeId);
+    await tx.update(entryTimes).set({ closedAt }).where(eq(entryTimes.id, entryTimeId));
+    await pencil(tx, ctx, { openDayId: before.openDayId, stopId: before.stopId, note: `${before.garden}: ${formatTime(before.opensAt, ctx.club)} is ${closedAt === null ? 'open again' : 'closed to new parties'}.` });
     await recordChange(tx, ctx, { action: closedAt === null ? 'opened an entry time again' : 'closed an entry time', subjectKind: 'entry time', subjectId: entryTimeId });
   });
 }

@@ -3,7 +3,7 @@ import { and, eq, isNull, sql } from 'drizzle-orm';
 import type { z } from 'zod';
 import type { Tx } from '@/db/client';
 import { gardens } from '@/db/schema/gardens';
-import { openDays, planChanges, prices, stops } from '@/db/schema/opendays';
+import { openDays, prices, stops } from '@/db/schema/opendays';
 import { recordChange } from '@/lib/club/commands';
 import type { Id } from '@/lib/core/ids';
 import { parseMoney } from '@/lib/core/money';
@@ -13,6 +13,7 @@ import { instantOf } from '@/lib/core/time';
 import type { AccountCtx } from '@/lib/infra/context';
 import { constraintOf } from '@/lib/infra/sql-state';
 import { inTransaction } from '@/lib/infra/transaction';
+import { pencil } from './pencil';
 import type { openDayChangeInput, openDayIdInput, openDayInput, planNoteInput, stopChangeInput, stopInput } from '../schema';
 
 type Prices = { adult: string; child: string; babe: string };
@@ -108,8 +109,10 @@ async function refuseOverLimit(tx: Tx, gardenId: Id<'garden'>, headsLimit: numbe
 
 /** Pencils a dated note into the margin of an open day's staff copy. */
 export async function addPlanNote(ctx: AccountCtx, input: z.output<typeof planNoteInput>): Promise<void> {
-  const initials = ctx.actor.name.split(/\s+/).map((part) => `${Array.from(part)[0] ?? ''}.`).join('').slice(0, 12);
-  await ctx.db.insert(planChanges).values({ openDayId: input.openDayId, at: ctx.now, accountId: ctx.actor.accountId, initials, note: input.note });
+  await inTransaction(ctx.db, async (tx) => {
+    await lockDay(tx, input.openDayId);
+    await pencil(tx, ctx, { openDayId: input.openDayId, stopId: null, note: input.note });
+  });
 }
 
 /** Runs an insert whose unique constraint decides, and says so beside the field when it is broken. */
