@@ -2,6 +2,7 @@ import 'server-only';
 import { and, count, eq, inArray, isNotNull } from 'drizzle-orm';
 import type { Tx } from '@/db/client';
 import { bookings, visits } from '@/db/schema/bookings';
+import { gardens } from '@/db/schema/gardens';
 import { gateFacts } from '@/db/schema/gate';
 import { entryTimes, stops } from '@/db/schema/opendays';
 import { gateDevices, gatePasses } from '@/db/schema/people';
@@ -20,17 +21,18 @@ import { foldFacts } from './rules/fold';
 import type { ExchangePassInput, FactAnswers, MakeGatePassInput, RecordFactsInput, RevokeGatePassInput, SentFact } from './schema';
 
 /** Makes a pass for one gate on one day. The secret is in the answer and nowhere else: it is shown once. */
-export async function makeGatePass({ db, actor, now }: AccountCtx, input: MakeGatePassInput): Promise<{ gatePassId: Id<'gatePass'>; helper: string; secret: string }> {
+export async function makeGatePass({ db, actor, now }: AccountCtx, input: MakeGatePassInput): Promise<{ gatePassId: Id<'gatePass'>; helper: string; garden: string; secret: string }> {
   const secret = newSecret();
   return inTransaction(db, async (tx) => {
-    const stop = firstOrNull(await tx.select({ id: stops.id, number: stops.number }).from(stops).where(eq(stops.id, input.stopId)));
+    const stop = firstOrNull(await tx.select({ id: stops.id, number: stops.number, garden: gardens.shortName }).from(stops)
+      .innerJoin(gardens, eq(gardens.id, stops.gardenId)).where(eq(stops.id, input.stopId)));
     if (!stop) throw new Refusal('not_found');
     const made = only(await tx.insert(gatePasses).values({
       stopId: stop.id, helper: input.helper, secretHash: hashSecret(secret), devicesAllowed: input.devices, madeAt: now, madeBy: actor.accountId,
     }).returning({ id: gatePasses.id }));
     const after = { stop: stop.number, helper: input.helper, devices: input.devices };
     await recordChange(tx, { actor, now }, { action: 'made a gate pass', subjectKind: 'gatePass', subjectId: made.id, after });
-    return { gatePassId: made.id, helper: input.helper, secret };
+    return { gatePassId: made.id, helper: input.helper, garden: stop.garden, secret };
   });
 }
 
