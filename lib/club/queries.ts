@@ -1,9 +1,7 @@
 import 'server-only';
-import { randomUUID } from 'node:crypto';
-import { getDb, type Queryable } from '@/db/client';
+import type { Queryable } from '@/db/client';
 import { club } from '@/db/schema/club';
-import { readClock } from '@/lib/infra/clock';
-import type { ClubSettings, SystemCtx } from '@/lib/infra/context';
+import type { ClubSettings } from '@/lib/infra/context';
 import { firstOrNull } from '@/lib/core/only';
 
 /** The club's settings; an empty database is a mistake in setting up, said so. */
@@ -11,12 +9,6 @@ export async function getClub(db: Queryable): Promise<ClubSettings> {
   const found = firstOrNull(await db.select(settings).from(club).limit(1));
   if (!found) throw new Error('The club is not set up: the table club is empty.');
   return found;
-}
-
-/** The context of a job or sweep: machines have no role. `name` says which one, in log and audit. */
-export async function workerContext(name: string): Promise<SystemCtx> {
-  const db = getDb();
-  return { db, club: await getClub(db), now: readClock(), requestId: randomUUID(), client: null, actor: { kind: 'system', name } };
 }
 
 const settings = {

@@ -4,7 +4,7 @@ import { eq } from 'drizzle-orm';
 import { NextRequest } from 'next/server';
 import { beforeAll, describe, expect, it, vi } from 'vitest';
 import { getDb } from '@/db/client';
-import { bookings } from '@/db/schema/bookings';
+import { bookingContacts, bookings } from '@/db/schema/bookings';
 import { bearerLinks, gateDevices, gatePasses, signIns } from '@/db/schema/people';
 import { idleForm, type FormState } from '@/lib/core/form-state';
 import { newId } from '@/lib/core/ids';
@@ -37,6 +37,7 @@ beforeAll(async () => {
   const day = await anOpenDay({ heldOn: dayOf(now, 'America/New_York'), opensAt: addMinutes(now, -60), closesAt: addMinutes(now, 240) }); // going on: the gate's phone may see its place
   const stop = await aStop(day.id);
   const booking = only(await getDb().insert(bookings).values({ openDayId: day.id, code: CODE, madeAt: now, heldUntil: now, confirmedAt: now, totalMinor: 0, currency: 'USD' }).returning({ id: bookings.id }));
+  await getDb().insert(bookingContacts).values({ bookingId: booking.id, name: 'Eve Marlow', email: 'eve@visitors.example' });
   const link = newSecret();
   await getDb().insert(bearerLinks).values({ kind: 'booking', subjectId: CODE, secretHash: hashSecret(link), madeAt: now, expiresAt: addMinutes(now, 600) });
   const gateKey = newSecret();

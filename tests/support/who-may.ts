@@ -23,6 +23,16 @@ export const ACTIONS: Readonly<Record<string, Who>> = {
   dropPasswordAction: SIGNED_IN,
   // booking
   holdPlacesAction: 'everyone',
+  keepLongerAction: 'everyone', // each reaches only its own browser's hold
+  letGoAction: 'everyone',
+  keepAgainAction: 'everyone',
+  payAction: 'everyone',
+  openBookingAction: 'everyone',
+  giveBackAction: BOOKING,
+  changeVisitAction: BOOKING,
+  confirmEmailAction: ['booking link'], // only whoever reads the mailbox
+  makeFeedAction: BOOKING,
+  revokeFeedAction: BOOKING,
   // members
   saveContactAction: SIGNED_IN,
   payDuesAction: SIGNED_IN,
@@ -50,6 +60,11 @@ export const ACTIONS: Readonly<Record<string, Who>> = {
 export const ROUTES: Readonly<Record<string, Who>> = {
   'GET /api/board/[openDay]': 'everyone',
   'GET /gardens/[slug]/plate': 'everyone',
+  'POST /api/holds': 'everyone',
+  'POST /api/stripe': 'everyone', // believed only with the processor's signature
+  'GET /api/calendar/[secret]': 'everyone', // the secret is the permission
+  'GET /bookings/[code]/link/[secret]': 'everyone',
+  'GET /bookings/[code]/calendar.ics': BOOKING,
   'GET /large-print': 'everyone',
   'POST /api/gate/device': 'everyone',
   'POST /api/gate/facts': ['gate phone'],

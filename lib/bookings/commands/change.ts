@@ -20,7 +20,7 @@ import { lockVisit, queueChangeLetters, refundOf, type Standing } from './standi
  * Moves one visit to another entry time of the same day at the same or a lower price. What it costs less comes back by
  * the refund rule's percent of this moment, as for people given back. The visit keeps its id, UID and code; its version rises.
  */
-export async function changeEntryTime(ctx: Ctx<BookingActor>, input: ChangeInput): Promise<{ refundMinor: number }> {
+export async function changeVisit(ctx: Ctx<BookingActor>, input: ChangeInput): Promise<{ refundMinor: number }> {
   return inTransaction(ctx.db, async (tx) => {
     const visit = await lockVisit(tx, ctx.actor.bookingId, input);
     refuseIf(changeRefusal(visit.opensAt, ctx.club, ctx.now));

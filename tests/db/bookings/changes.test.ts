@@ -10,7 +10,7 @@ import { prices } from '@/db/schema/opendays';
 import { sendRefunds, applyRefund } from '@/lib/books/commands/refunds';
 import { bookFees } from '@/lib/books/commands/fees';
 import { applyPayment } from '@/lib/bookings/commands/apply-payment';
-import { changeEntryTime, moveVisit } from '@/lib/bookings/commands/change';
+import { changeVisit, moveVisit } from '@/lib/bookings/commands/change';
 import { giveBack, giveBackForParty } from '@/lib/bookings/commands/give-back';
 import { newId, type Id } from '@/lib/core/ids';
 import { only } from '@/lib/core/only';
@@ -114,7 +114,7 @@ describe('changing the entry time', () => {
     const { stop, time, bookingId, visitId, by } = await eveBooked();
     const later = await anEntryTime(stop, { capacity: 4, atMinutes: 120 });
 
-    await changeEntryTime(await ctxOf(by), { visitId, version: 1, entryTimeId: later.id, insists: false });
+    await changeVisit(await ctxOf(by), { visitId, version: 1, entryTimeId: later.id, insists: false });
 
     expect(await visitOf(visitId)).toMatchObject({ entryTimeId: later.id, version: 2, movedAt: NOON });
     expect([await takenAt(time.id), await takenAt(later.id)]).toEqual([0, 4]);
@@ -129,7 +129,7 @@ describe('changing the entry time', () => {
     const [full, shut, dear, elsewhere] = [await anEntryTime(stop, { capacity: 3, atMinutes: 60 }), await anEntryTime(stop, { atMinutes: 120, closedAt: NOON }), await anEntryTime(other, { atMinutes: 120 }), (await aDayAhead()).time];
     const ctx = await ctxOf(by);
     const ends = [];
-    for (const target of [full, shut, dear, elsewhere, time]) ends.push(await refusalOf(changeEntryTime(ctx, { visitId, version: 1, entryTimeId: target.id, insists: false })));
+    for (const target of [full, shut, dear, elsewhere, time]) ends.push(await refusalOf(changeVisit(ctx, { visitId, version: 1, entryTimeId: target.id, insists: false })));
 
     expect(ends).toEqual(['places_gone', 'entry_time_closed', 'dearer', 'wrong_open_day', 'clash']);
     expect([await takenAt(time.id), await takenAt(dear.id)]).toEqual([4, 0]);
@@ -143,7 +143,7 @@ describe('changing the entry time', () => {
     const cheap = await anEntryTime(other, { atMinutes: 120 });
 
     const inTime = addMinutes(MAY_15.opensAt, -24 * 60);
-    expect(await changeEntryTime(await ctxOf(by, inTime), { visitId, version: 1, entryTimeId: cheap.id, insists: false })).toEqual({ refundMinor: 450 });
+    expect(await changeVisit(await ctxOf(by, inTime), { visitId, version: 1, entryTimeId: cheap.id, insists: false })).toEqual({ refundMinor: 450 });
 
     expect((await refundsOf(bookingId)).map((refund) => refund.amount)).toEqual([450]);
     expect(await visitOf(visitId)).toMatchObject({ adultMinor: 500, childMinor: 400 });
@@ -154,7 +154,7 @@ describe('changing the entry time', () => {
     const noon = await anEntryTime(eve.stop, { capacity: 4, atMinutes: 120 });
     await keep(eve.day.id, [noon.id], aBrowser(), { people: FOUR });
 
-    expect(await refusalOf(changeEntryTime(await ctxOf(eve.by), { visitId: eve.visitId, version: 1, entryTimeId: noon.id, insists: false }))).toBe('places_gone');
+    expect(await refusalOf(changeVisit(await ctxOf(eve.by), { visitId: eve.visitId, version: 1, entryTimeId: noon.id, insists: false }))).toBe('places_gone');
     expect([await takenAt(eve.time.id), await takenAt(noon.id)]).toEqual([4, 4]);
   });
 
