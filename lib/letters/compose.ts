@@ -84,7 +84,7 @@ async function composeInvitation({ db, club, now }: Pick<SystemCtx, 'db' | 'club
 /** The highest SEQUENCE that other letters have carried to the party for this visit; null when none has gone. */
 async function sequenceGone(db: Queryable, outbox: OutboxLetter, visitId: string): Promise<number | null> {
   if (outbox.bookingId === null) return null;
-  const rows = await db.select({ gone: sql<number | null>`max((${letterTexts.facts}->>'gone')::int)` }).from(letters)
+  const rows = await db.select({ gone: sql<number | null>`max((${letterTexts.facts}->>'sentSequence')::int)` }).from(letters)
     .innerJoin(letterTexts, eq(letterTexts.letterId, letters.id))
     .where(and(eq(letters.bookingId, outbox.bookingId), eq(letters.kind, 'calendar'), ne(letters.id, outbox.id), sql`${letterTexts.facts}->>'visitId' = ${visitId}`));
   return rows[0]?.gone ?? null;

@@ -20,7 +20,7 @@ export const letterFacts = {
   /** The day is near: addresses for a confirmed e-mail, only the link for another. */
   reminder: none,
   /** One visit for the party's calendar: REQUEST, or CANCEL when it was given back. Built when it is sent. */
-  calendar: z.looseObject({ visitId: z.uuid(), gone: count.optional() }),
+  calendar: z.looseObject({ visitId: z.uuid(), sentSequence: count.optional() }),
   /** A code and a link to sign in with. */
   'sign-in': z.looseObject({ code: line, secret: line, minutes: count }),
   /** An officer's role was given. */

@@ -92,8 +92,8 @@ async function settle({ db, now }: SystemCtx, letterId: Id<'letter'>, nextAt: Da
 async function keepWords(tx: Tx, { now }: SystemCtx, outbox: OutboxLetter | null, composed: Exclude<Composed, { dropped: string }>): Promise<void> {
   if (!outbox) return;
   const shown = blanked(composed.letter);
-  const gone = composed.gone === undefined ? {} : { gone: composed.gone };
-  await tx.update(letterTexts).set({ subject: oneLine(shown.subject), html: letterHtml(shown), text: letterText(shown), facts: { ...withoutSecrets(outbox.facts), ...gone } })
+  const sequence = composed.gone === undefined ? {} : { sentSequence: composed.gone };
+  await tx.update(letterTexts).set({ subject: oneLine(shown.subject), html: letterHtml(shown), text: letterText(shown), facts: { ...withoutSecrets(outbox.facts), ...sequence } })
     .where(and(eq(letterTexts.letterId, outbox.id), sql`${letterTexts.toAddress} is not null`));
   if (composed.shown.length > 0) await tx.insert(placeShowings).values(composed.shown.map((gardenId) => ({ gardenId, at: now, viewerKind: 'letter', viewerId: outbox.id })));
 }

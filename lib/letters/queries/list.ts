@@ -39,10 +39,17 @@ function conditions(db: AccountCtx['db'], { state, kind, find }: LetterListInput
 }
 
 /** One letter as the office may read it, with each try to send it. */
-export async function getLetter({ db }: AccountCtx, letterId: Id<'letter'>): Promise<LetterView> {
+export async function getLetter(ctx: AccountCtx, letterId: Id<'letter'>): Promise<LetterView> {
+  const letter = await findLetter(ctx, letterId);
+  if (!letter) throw new Refusal('not_found');
+  return letter;
+}
+
+/** As `getLetter`, but null when there is none. */
+export async function findLetter({ db }: AccountCtx, letterId: Id<'letter'>): Promise<LetterView | null> {
   const row = firstOrNull(await db.select({ ...rowColumns, text: letterTexts.text }).from(letters)
     .leftJoin(letterTexts, eq(letterTexts.letterId, letters.id)).leftJoin(lettersDue, eq(lettersDue.letterId, letters.id)).where(eq(letters.id, letterId)));
-  if (!row) throw new Refusal('not_found');
+  if (!row) return null;
   const tries = await db.select({ triedAt: sendings.triedAt, outcome: sendings.outcome, detail: sendings.detail }).from(sendings)
     .where(eq(sendings.letterId, letterId)).orderBy(desc(sendings.triedAt)).limit(100);
   return { ...toLetterRow(row), text: row.text, tries };

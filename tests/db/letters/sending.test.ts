@@ -3,6 +3,9 @@ import ICAL from 'ical.js';
 import { Pool } from 'pg';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { getDb } from '@/db/client';
+import { payments } from '@/db/schema/books';
+import { charges } from '@/db/schema/dues';
+import { openDays } from '@/db/schema/opendays';
 import { bearerLinks } from '@/db/schema/people';
 import { bookingContacts, bookings, visits } from '@/db/schema/bookings';
 import { placeShowings } from '@/db/schema/gardens';
@@ -16,7 +19,7 @@ import { getLetter, letterPage } from '@/lib/letters/queries/list';
 import { letterListInput } from '@/lib/letters/schema';
 import { sendLetter } from '@/lib/letters/sending';
 import { enqueueDueLetters } from '@/lib/letters/work';
-import { aClub, anEntryTime, anOpenDay, apart, aStop, cleo, ctxOf, NOON } from '../../support/cast';
+import { aClub, anAccount, anEntryTime, anOpenDay, apart, aStop, cleo, ctxOf, NOON } from '../../support/cast';
 import { aMailServer } from '../../support/mail-server';
 
 let server: Awaited<ReturnType<typeof aMailServer>>;
@@ -275,6 +278,18 @@ describe('an invitation', () => {
     expect(file).toContain('SEQUENCE:3');
   });
 
+  it('is taken back when the open day is called off', async () => {
+    const booking = await aBooking();
+    await sendLetter(await systemAt(), await invite(booking, 0, 'still on'));
+    await getDb().update(openDays).set({ calledOffAt: NOON, calledOffNote: 'thunder' }).where(eq(openDays.id, booking.openDayId));
+
+    expect(await sendLetter(await systemAt(), await invite(booking, 0, 'called off'))).toBe('sent');
+
+    const file = server.arrived[1]?.mail.attachments[0]?.content.toString() ?? '';
+    expect(file).toContain('METHOD:CANCEL');
+    expect(file).toContain('SEQUENCE:4');
+  });
+
   it('is not sent to a party that wants none', async () => {
     const booking = await aBooking({}, { wantsInvitations: false });
 
@@ -312,6 +327,39 @@ describe('a reminder', () => {
     await getDb().update(visits).set({ givenBackAt: NOON }).where(eq(visits.bookingId, booking.id));
 
     expect(await sendLetter(await systemAt(release), await about(booking, 'reminder', 'gone'))).toBe('dropped');
+  });
+});
+
+describe('a letter to a household or an officer', () => {
+  it('is the receipt of a payment, with its number, what it was for and to when it is paid', async () => {
+    const ben = await anAccount('Ben Okonjo');
+    if (ben.householdId === null) throw new Error('Ben has a household');
+    const charge = only(await getDb().insert(charges).values({ householdId: ben.householdId, classKey: 'household', termFrom: '2027-01-01', termTo: '2027-12-31', amountMinor: 6200, currency: 'USD', dueOn: '2027-01-01', madeAt: NOON }).returning({ id: charges.id }));
+    const payment = only(await getDb().insert(payments).values({ chargeId: charge.id, householdId: ben.householdId, method: 'cheque', amountMinor: 6200, currency: 'USD', receivedOn: '2027-05-01', receiptYear: 2027, receiptNumber: 41, recordedAt: NOON }).returning({ id: payments.id }));
+    const id = await queue({ key: 'receipt', kind: 'dues-receipt', householdId: ben.householdId, facts: { paymentId: payment.id } });
+
+    expect(await sendLetter(await systemAt(), id)).toBe('sent');
+
+    for (const words of ['2027/0041', '$62.00', '1 May 2027, cheque', 'dues, Household', 'paid to 31 Dec 2027']) expect(oneArrived().mail.text).toContain(words);
+  });
+
+  it('tells an officer of the role and where to sign in', async () => {
+    const id = await queue({ key: 'invited', kind: 'invitation', facts: { role: 'treasurer', invitedBy: 'Nell Abara' } });
+
+    expect(await sendLetter(await systemAt(), id)).toBe('sent');
+
+    expect(oneArrived().mail.text).toContain('Nell Abara gave you the role of treasurer.');
+    expect(oneArrived().mail.text).toContain('/sign-in');
+  });
+
+  it.each([
+    ['refund', { amountMinor: 2400, reason: 'the garden is called off' }, '$24.00 is on its way back'], ['places-lost', { refundMinor: 4000 }, 'all $40.00 is on its way back'],
+  ] as const)('says what comes back: %s', async (kind, facts, words) => {
+    const id = await queue({ key: `money: ${kind}`, kind, facts });
+
+    expect(await sendLetter(await systemAt(), id)).toBe('sent');
+
+    expect(`${oneArrived().mail.subject} ${oneArrived().mail.text}`).toContain(words);
   });
 });
 
