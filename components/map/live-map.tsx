@@ -6,6 +6,7 @@ import { type ReactNode, useEffect, useRef, useState } from 'react';
 import { createPortal } from 'react-dom';
 import { PlaceName } from './lettering';
 import { liveStyle } from './live-style';
+import { MapFrame } from './map-frame';
 import { hatchTile, TILE_RATIO, treeImage } from './map-images';
 import { inksAt } from './map-inks';
 import { MapPost } from './map-post';
@@ -27,6 +28,9 @@ interface LiveMapProps {
   /** The printed map, which stays where no live one can be drawn. */
   readonly children: ReactNode;
 }
+
+/** How wide the printed map is drawn, in points. */
+const PRINTED_WIDTH = 700;
 
 const canDraw = (): boolean => 'WebGL2RenderingContext' in window && document.createElement('canvas').getContext('webgl2') !== null;
 
@@ -117,29 +121,32 @@ export function LiveMap({ posts, sheet, children }: LiveMapProps) {
   }, [posts, sheet]);
 
   return (
-    <div className="relative">
-      <div inert={places !== null} className={places === null ? '' : 'invisible'}>{children}</div>
-      <div className={`absolute inset-0 border-3 border-ink font-text ${places === null ? 'invisible' : ''}`}>
-        <div ref={frame} className="size-full" />
-      </div>
-      {places && (
-        <div className="absolute bottom-4 right-4 flex gap-2">
-          <MagnifyButton label="Closer" sign="M4 10H16M10 4V16" press={() => live.current?.zoomIn()} />
-          <MagnifyButton label="Wider" sign="M4 10H16" press={() => live.current?.zoomOut()} />
+    <MapFrame>
+      <div className="relative">
+        <div inert={places !== null} className={places === null ? '' : 'invisible'}>{children}</div>
+        <div className={`absolute inset-0 border-3 border-ink font-text ${places === null ? 'invisible' : ''}`}>
+          <div ref={frame} className="size-full" />
         </div>
-      )}
-      {places?.map((place, i) => {
-        const post = posts[i];
-        return post && createPortal(<PostMarker {...post} />, place, String(post.number));
-      })}
-    </div>
+        {places && (
+          <div className="absolute bottom-3 left-3 flex gap-2">
+            <MagnifyButton label="Closer" sign="M4 10H16M10 4V16" press={() => live.current?.zoomIn()} />
+            <MagnifyButton label="Wider" sign="M4 10H16" press={() => live.current?.zoomOut()} />
+          </div>
+        )}
+        {places?.map((place, i) => {
+          const post = posts[i];
+          return post && createPortal(<PostMarker {...post} share={Math.min(1, place.offsetParent ? place.offsetParent.clientWidth / PRINTED_WIDTH : 1)} />, place, String(post.number));
+        })}
+      </div>
+    </MapFrame>
   );
 }
 
-function PostMarker({ number, name, areaName, href }: LivePost) {
+/** A post and its neighbourhood's name, as large beside the ground as on the printed map. */
+function PostMarker({ number, name, areaName, href, share }: LivePost & { readonly share: number }) {
   return (
-    <a href={href} aria-label={`Garden ${number}, ${name}: ${areaName}`} className="flex min-w-11 justify-center">
-      <svg width="35" height="54" viewBox="-17.500 -54 35 54" aria-hidden="true" className="overflow-visible">
+    <a href={href} aria-label={`Garden ${number}, ${name}: ${areaName}`} className="flex min-h-11 min-w-11 items-end justify-center">
+      <svg width={35 * share} height={54 * share} viewBox="-17.500 -54 35 54" aria-hidden="true" className="overflow-visible">
         <MapPost number={number} height={54} />
         <PlaceName x={0} y={17} name={areaName} size={17.5} within={130} />
       </svg>

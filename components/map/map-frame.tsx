@@ -4,7 +4,7 @@ import type { ReactNode } from 'react';
 export function MapFrame({ children }: { readonly children: ReactNode }) {
   return (
     <div className="scroll-frame">
-      <div className="min-w-136">{children}</div>
+      <div className="min-w-120">{children}</div>
     </div>
   );
 }
