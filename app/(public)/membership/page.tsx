@@ -5,6 +5,7 @@ import { Columns, Part } from '@/components/layout/columns';
 import { Money } from '@/components/ui/money';
 import { membershipOffer } from '@/lib/dues/class-queries';
 import { pageContext } from '@/lib/web/context';
+import { FootFlowers } from '../foot-flowers';
 import { PublicSheet } from '../public-sheet';
 
 export const metadata: Metadata = { title: 'Membership' };
@@ -14,7 +15,7 @@ export default async function MembershipPage() {
   const { club } = ctx;
   const classes = await membershipOffer(ctx);
   return (
-    <PublicSheet club={club} here="/membership">
+    <PublicSheet club={club} here="/membership" foot={<FootFlowers ctx={ctx} />}>
       <Bill name="Membership" line="For people with a railway in the garden, a garden with room for one, or neither yet" sums={`Dues run from 1 January to 31 December. Who forgets is kept on for ${club.duesKeptOnDays} days, with a letter.`} />
       <Columns split="main-aside">
         <div>
