@@ -7,6 +7,7 @@ import { enqueue } from '@/lib/infra/queue';
 import { systemCtx } from '@/lib/infra/system';
 import { getClub } from '@/lib/club/queries';
 import { SEND_LETTER, sendLetterKey, sendLetterPayload } from './jobs';
+import { queueAddressInvitations, queueReminders } from './reminders';
 import { sendLetter } from './sending';
 
 const letterCtx = () => systemCtx('letters', getClub);
@@ -26,6 +27,9 @@ export async function enqueueDueLetters({ db, now }: SystemCtx): Promise<number>
   return due.length;
 }
 
+/** What the nearness of a day makes due comes first, so that it goes out in the same sweep. */
 export const sweeps: (() => Promise<void>)[] = [
+  async function remindersDue() { await queueReminders(await letterCtx()); },
+  async function addressInvitationsDue() { await queueAddressInvitations(await letterCtx()); },
   async function lettersDueNow() { await enqueueDueLetters(await letterCtx()); },
 ];

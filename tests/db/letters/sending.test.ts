@@ -17,6 +17,7 @@ import { hashSecret } from '@/lib/infra/secrets';
 import { queueLetter, sendAgain, type NewLetter } from '@/lib/letters/commands';
 import { getLetter, letterPage } from '@/lib/letters/queries/list';
 import { letterListInput } from '@/lib/letters/schema';
+import { queueAddressInvitations, queueReminders } from '@/lib/letters/reminders';
 import { sendLetter } from '@/lib/letters/sending';
 import { enqueueDueLetters } from '@/lib/letters/work';
 import { aClub, anAccount, anEntryTime, anOpenDay, apart, aStop, cleo, ctxOf, NOON } from '../../support/cast';
@@ -327,6 +328,46 @@ describe('a reminder', () => {
     await getDb().update(visits).set({ givenBackAt: NOON }).where(eq(visits.bookingId, booking.id));
 
     expect(await sendLetter(await systemAt(release), await about(booking, 'reminder', 'gone'))).toBe('dropped');
+  });
+});
+
+describe('what the nearness of the day makes due', () => {
+  const release = addMinutes(new Date('2027-05-15T14:00:00Z'), -72 * 60);
+  const keysOf = async (booking: Booking) => (await getDb().select({ key: letters.key }).from(letters).where(eq(letters.bookingId, booking.id))).map((row) => row.key).sort();
+
+  it('is one reminder a booking from the release on, not before, however often the sweep comes by', async () => {
+    const booking = await aBooking();
+
+    await queueReminders(await systemAt(addMinutes(release, -1)));
+    const before = await keysOf(booking);
+    await queueReminders(await systemAt(release));
+    await queueReminders(await systemAt(addMinutes(release, 1)));
+
+    expect(before).toEqual([]);
+    expect(await keysOf(booking)).toEqual([`reminder:${booking.id}`]);
+  });
+
+  it.each([
+    ['was given back', { cancelledAt: NOON }], ['was made after the release', { confirmedAt: release }], ['is not confirmed yet', { confirmedAt: null }],
+  ])('is no reminder for a booking that %s', async (_, changes) => {
+    const booking = await aBooking({}, changes);
+
+    await queueReminders(await systemAt(addMinutes(release, 5)));
+
+    expect(await keysOf(booking)).toEqual([]);
+  });
+
+  it('is an invitation with the address for each visit of a confirmed e-mail, also when it is confirmed later', async () => {
+    const booking = await aBooking();
+    await queueAddressInvitations(await systemAt(release));
+    const unconfirmed = await keysOf(booking);
+    await getDb().update(bookingContacts).set({ emailConfirmedAt: release }).where(eq(bookingContacts.bookingId, booking.id));
+
+    await queueAddressInvitations(await systemAt(addMinutes(release, 60)));
+    await queueAddressInvitations(await systemAt(addMinutes(release, 61)));
+
+    expect(unconfirmed).toEqual([]);
+    expect(await keysOf(booking)).toEqual(booking.visits.map((id) => `calendar:${id}:1:address`).sort());
   });
 });
 
