@@ -1,10 +1,9 @@
 import type { Metadata } from 'next';
 import { PublicSheet } from '@/app/(public)/public-sheet';
-import { HomeDay, HomeRest } from '@/components/garden/home-body';
+import { HomeDay, HomeRail, HomeRest } from '@/components/garden/home-body';
 import { Bill } from '@/components/layout/bill';
 import { WithMargin } from '@/components/layout/columns';
 import { GardenMargin } from '@/components/layout/garden-margin';
-import { RailRule } from '@/components/ui/rail-rule';
 import { dayOf } from '@/lib/core/time';
 import { comingDays, listGardens } from '@/lib/gardens/queries';
 import { toHomePage } from '@/lib/gardens/views/home';
@@ -21,7 +20,7 @@ export default async function HomePage() {
   const page = toHomePage(days, await listGardens(ctx, days[0]?.slug ?? null), dayOf(ctx.now, ctx.club.timeZone), ctx.club);
   return (
     <PublicSheet club={ctx.club} here="/">
-      <Bill name={page.name} line={page.line} sums={page.sums} rail={page.day ? <RailRule trainAt={0.72} coaches={2} /> : <RailRule state="empty" />} />
+      <Bill name={page.name} line={page.line} sums={page.sums} rail={<HomeRail day={page.day} />} />
       <HomeDay page={page} />
       <WithMargin margin={<GardenMargin plants={page.flowers} />}>
         <HomeRest page={page} />

@@ -7,8 +7,8 @@ import { DrawnParticulars, Facts } from './particulars';
 import { PlantingChart } from './planting-chart';
 import { TimesList } from './times-list';
 
-/** Headings of the narrow column: 32 px, so that "Times on 15 May" stays on one line. */
-const ASIDE = 'mb-3 text-[1.7778rem]';
+/** Headings of the narrow column, small enough that "Times on 15 May" stays on one line wherever the column stands. */
+const ASIDE = 'mb-3 text-[1.3333rem] max-md:text-[2rem] lg:text-[1.7778rem] large-print:text-[2rem]';
 
 /** A garden's page below its bill: what it is on the left, when and where on the right. */
 export function GardenPageBody({ page, map }: { page: GardenPage; map: ReactNode }) {

@@ -3,9 +3,16 @@ import { Columns, Part } from '@/components/layout/columns';
 import { Plate } from '@/components/plate/plate';
 import { LinkButton } from '@/components/ui/link-button';
 import { Notice } from '@/components/ui/notice';
+import { RailRule } from '@/components/ui/rail-rule';
 import type { HomePage } from '@/lib/gardens/views/home';
 import { PlateWall } from './garden-list';
 import { Handbill } from './handbill';
+
+/** The rail below the bill: a train for a day to come, a buffer stop for one called off, sleepers for none. */
+export function HomeRail({ day }: { day: HomePage['day'] }) {
+  if (day === null) return <RailRule state="empty" />;
+  return day.isCalledOff ? <RailRule state="failed" /> : <RailRule trainAt={0.72} coaches={2} />;
+}
 
 /** The next open day as a handbill: one plate, and beside it what, when, where and how to come. */
 export function HomeDay({ page }: { page: HomePage }) {

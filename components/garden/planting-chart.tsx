@@ -38,7 +38,7 @@ function MonthLine({ month }: { month: number }) {
       {MONTHS.map((name, index) => (
         <span key={name} className={`figures py-2 text-center text-sm font-semibold ${index + 1 === month ? 'bg-ink text-paper' : ''}`}>
           {name.charAt(0)}
-          <span className="hidden md:inline">{name.slice(1)}</span>
+          <span className="hidden lg:inline">{name.slice(1)}</span>
         </span>
       ))}
     </div>

@@ -47,7 +47,7 @@ function Time({ time }: { time: TimeView }) {
       <Link href={time.href} aria-label={time.spoken} className="edged my-1 flex min-h-12 items-center gap-2.5 px-3.5 hover:border-damson">
         <span className={clock}>{time.places}</span> left
         {time.kind === 'few' ? (
-          <span className="ml-auto">
+          <span className="ml-auto md:hidden lg:inline large-print:inline">
             <Pegs count={time.places} />
           </span>
         ) : null}

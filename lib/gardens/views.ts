@@ -68,11 +68,10 @@ export const toPlateParticulars = plateParts;
 export function toPlate(garden: GardenRow, number: number): PlateView {
   const parts = plateParts(garden);
   const version = seedOf(JSON.stringify(parts)).toString(36);
-  const caption = captionOf(parts);
   return {
     href: `/gardens/${garden.slug}/plate?card=${cardOf(number, garden.slug)}&v=${version}`,
-    alt: `Linocut of ${garden.railwayName}. ${caption.replace('Cut from the garden’s own particulars: ', 'It shows ')}`,
-    caption,
+    alt: `Linocut of ${garden.railwayName}`, // what it shows stands in its caption
+    caption: captionOf(parts),
   };
 }
 
@@ -148,7 +147,7 @@ export function toGardenPage(garden: GardenRow & { restNumber: number }, day: Ne
     drawing: { particulars: garden, system, words: drawingInWords(garden, system) },
     railway: [...railwayFacts(garden), ...travel],
     access: accessFacts(garden, system),
-    planting: { on, title: `In flower on ${formatDay(on, club, 'bare')}`, plants: garden.plants.map((plant) => toPlant(plant, system)), dayText: formatDay(on, club, 'bare') },
+    planting: { on, title: `${inFlower(garden.plants, on).length > 0 ? 'In flower' : 'Growing'} on ${formatDay(on, club, 'bare')}`, plants: garden.plants.map((plant) => toPlant(plant, system)), dayText: formatDay(on, club, 'bare') },
     flowers: toFlowers(garden.plants, on, 4),
     cautions: cautionsOf(garden),
     whereabouts: { areaKey: garden.areaKey, areaName: garden.areaName, caption: `${garden.areaCaption} The address comes with your tickets, from ${released} before.` },

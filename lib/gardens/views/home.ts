@@ -23,8 +23,8 @@ export type HomePage = {
 
 type HomeClub = ClubTime & { name: string; currency: string; addressReleaseHours: number };
 
-function sumsOf(day: HomeDayRow, places: number): string {
-  if (day.isCalledOff) return 'Called off. The days after it stand below.';
+function sumsOf(day: HomeDayRow, places: number, later: number): string {
+  if (day.isCalledOff) return later === 0 ? 'Called off.' : `Called off. ${later === 1 ? 'The day after it stands' : 'The days after it stand'} below.`;
   return places === 0 ? 'No places are left to book. Some are given back; look again.' : `${counted(places, 'place is', 'places are')} still to be had. Book before you set out: each garden lets in only as many as it can carry.`;
 }
 
@@ -49,7 +49,7 @@ export function toHomePage(days: readonly HomeDayRow[], rows: readonly ListedRow
   return {
     name: day?.title ?? 'No open day just now',
     line: day ? whenAndWhere({ ...day, gardens: taking.length }, club) : `${formatDay(today, club)}: the gardens are growing, and so are the timetables`,
-    sums: day ? sumsOf(day, places) : `${inWordsFirst(all.length)} ${all.length === 1 ? 'garden belongs' : 'gardens belong'} to the club.`,
+    sums: day ? sumsOf(day, places, days.length - 1) : `${inWordsFirst(all.length)} ${all.length === 1 ? 'garden belongs' : 'gardens belong'} to the club.`,
     day: day ? { href: `/open-days/${day.slug}`, isCalledOff: day.isCalledOff, note: day.calledOffNote, lines: linesOf(day, taking.length, club), buttonWords: 'Choose gardens and times' } : null,
     first: firstOf(taking, day?.heldOn ?? today),
     gardens, gardensTitle: gardens.length === 1 ? 'The garden' : `${inWordsFirst(gardens.length)} gardens`,
