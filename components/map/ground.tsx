@@ -68,7 +68,7 @@ export function Halts({ valley, sheet }: GroundProps) {
     return (
       <g key={properties.key} transform={`translate(${x.toFixed(1)} ${y.toFixed(1)}) rotate(-8)`}>
         <path d="M6 5H32V11H6Z" className="fill-ink stroke-paper" strokeWidth="1.5" paintOrder="stroke" />
-        <text x="5" y="-6" fontSize="15" className="fill-ink stroke-paper font-heading italic" strokeWidth="4.5" strokeLinejoin="round" paintOrder="stroke">the halt</text>
+        <text x="5" y="-6" fontSize="18" className="fill-ink stroke-paper font-heading italic" strokeWidth="4.5" strokeLinejoin="round" paintOrder="stroke">the halt</text>
         <path d="M10 11V17M28 11V17M7 17H31" className="stroke-ink" strokeWidth="1.6" fill="none" />
       </g>
     );

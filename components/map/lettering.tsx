@@ -35,7 +35,7 @@ export function ScaleBar({ x, y, length }: { readonly x: number; readonly y: num
     <g transform={`translate(${x} ${y})`}>
       <path d={`M-5 0H${length + 5}`} className="stroke-paper" strokeWidth="18" />
       <path d={`M0 0H${length}M0 -6V6M${length} -6V6${fifths}`} className="stroke-ink" strokeWidth="2" fill="none" />
-      <text x={length / 2} y="-12" textAnchor="middle" fontSize="16" className="fill-ink stroke-paper font-text" strokeWidth="5" paintOrder="stroke" strokeLinejoin="round">5 min by car</text>
+      <text x={length / 2} y="-12" textAnchor="middle" fontSize="19" className="fill-ink stroke-paper font-text" strokeWidth="5" paintOrder="stroke" strokeLinejoin="round">5 min by car</text>
     </g>
   );
 }

@@ -148,7 +148,7 @@ function PostMarker({ number, name, areaName, href, share }: LivePost & { readon
     <a href={href} aria-label={`Garden ${number}, ${name}: ${areaName}`} className="flex min-h-11 min-w-11 items-end justify-center">
       <svg width={35 * share} height={54 * share} viewBox="-17.500 -54 35 54" aria-hidden="true" className="overflow-visible">
         <MapPost number={number} height={54} />
-        <PlaceName x={0} y={17} name={areaName} size={17.5} within={130} />
+        <PlaceName x={0} y={19} name={areaName} size={20} within={145} />
       </svg>
     </a>
   );

@@ -52,9 +52,9 @@ function patches(areas: readonly HatchedArea[], { cardInk }: MapInks): LayerSpec
 function names({ ink, paper }: MapInks): LayerSpecification[] {
   const paint = { 'text-color': ink, 'text-halo-color': paper, 'text-halo-width': 2.2 };
   return [
-    { id: 'river-names', type: 'symbol', source: VALLEY, filter: ['==', ['get', 'key'], 'alder'], layout: { 'symbol-placement': 'line-center', 'text-field': ['get', 'name'], 'text-font': ['Besley Italic'], 'text-size': 17 }, paint },
-    { id: 'road-names', type: 'symbol', source: VALLEY, minzoom: 12, filter: kind('road'), layout: { 'symbol-placement': 'line', 'symbol-spacing': 420, 'text-field': ['get', 'name'], 'text-font': ['Besley Italic'], 'text-size': 15 }, paint },
-    { id: 'halt-name', type: 'symbol', source: VALLEY, filter: kind('halt'), layout: { 'text-field': ['get', 'name'], 'text-font': ['Besley Italic'], 'text-size': 15, 'text-anchor': 'bottom-left', 'text-offset': [0.3, -0.4] }, paint },
+    { id: 'river-names', type: 'symbol', source: VALLEY, filter: ['==', ['get', 'key'], 'alder'], layout: { 'symbol-placement': 'line-center', 'text-field': ['get', 'name'], 'text-font': ['Besley Italic'], 'text-size': 18 }, paint },
+    { id: 'road-names', type: 'symbol', source: VALLEY, minzoom: 12, filter: kind('road'), layout: { 'symbol-placement': 'line', 'symbol-spacing': 420, 'text-field': ['get', 'name'], 'text-font': ['Besley Italic'], 'text-size': 16 }, paint },
+    { id: 'halt-name', type: 'symbol', source: VALLEY, filter: kind('halt'), layout: { 'text-field': ['get', 'name'], 'text-font': ['Besley Italic'], 'text-size': 16, 'text-anchor': 'bottom-left', 'text-offset': [0.3, -0.4] }, paint },
   ];
 }
 

@@ -31,7 +31,7 @@ interface Standing extends MapGarden {
 
 const WIDTH = 700;
 const POST_HEIGHT = 54;
-const NAME_SIZE = 17.5;
+const NAME_SIZE = 20;
 
 /** Gardens that share a neighbourhood stand side by side. */
 function standings(gardens: readonly MapGarden[], areas: readonly Neighbourhood[], sheet: Sheet): Standing[] {
@@ -89,7 +89,7 @@ export function ValleyMap({ valley, gardens, line = [] }: ValleyMapProps) {
 function AreaName({ area, sheet }: { readonly area: Neighbourhood; readonly sheet: Sheet }) {
   const [x, y] = sheet.at(area.labelPoint);
   const easts = area.ring.map((place) => sheet.at(place)[0]);
-  return <PlaceName x={x} y={y + 29} name={area.name} size={NAME_SIZE} within={Math.min((Math.max(...easts) - Math.min(...easts)) * 1.12, (sheet.width - x) * 2 - 24)} />;
+  return <PlaceName x={x} y={y + 31} name={area.name} size={NAME_SIZE} within={Math.min((Math.max(...easts) - Math.min(...easts)) * 1.12, (sheet.width - x) * 2 - 24)} />;
 }
 
 /** The main river's name, at its bank where it leaves the sheet. */
