@@ -1,5 +1,5 @@
 import 'server-only';
-import { and, count, eq, inArray, isNotNull } from 'drizzle-orm';
+import { and, asc, count, eq, inArray, isNotNull } from 'drizzle-orm';
 import type { Tx } from '@/db/client';
 import { bookings, visits } from '@/db/schema/bookings';
 import { gardens } from '@/db/schema/gardens';
@@ -73,7 +73,7 @@ export async function exchangePass({ db, now }: Ctx, input: ExchangePassInput): 
 
 /**
  * Keeps what a phone did, each fact once however often it is sent. An admission is taken only if its heads are still
- * on the ticket; otherwise it is kept as a refusal and answered so. Locks the visits named, in id order.
+ * on the ticket; otherwise it is kept as a refusal and answered so. Locks the bookings named, in id order.
  */
 export async function recordFacts(ctx: Ctx<GateActor>, input: RecordFactsInput): Promise<FactAnswers> {
   return inTransaction(ctx.db, async (tx) => {
@@ -94,17 +94,20 @@ export async function recordFacts(ctx: Ctx<GateActor>, input: RecordFactsInput):
 
 type Tickets = ReadonlyMap<string, CarriedHeads>;
 
-/** The tickets of this stop that the facts name, locked so that two phones cannot both let in the last people. */
+/**
+ * The tickets of this stop that the facts name. Their bookings are locked, in id order as everywhere: two phones cannot
+ * both let in the last people, and nobody gives back or moves what is being let in.
+ */
 async function lockTickets(tx: Tx, stopId: Id<'stop'>, facts: readonly SentFact[]): Promise<Tickets> {
-  const ids = [...new Set(facts.flatMap(({ visitId }) => (visitId === null ? [] : [visitId])))];
-  if (ids.length === 0) return new Map();
+  const named = [...new Set(facts.flatMap(({ visitId }) => (visitId === null ? [] : [visitId])))];
+  if (named.length === 0) return new Map();
+  const owners = await tx.select({ bookingId: visits.bookingId }).from(visits).where(inArray(visits.id, named));
+  await tx.select({ id: bookings.id }).from(bookings).where(inArray(bookings.id, owners.map(({ bookingId }) => bookingId))).orderBy(asc(bookings.id)).for('no key update');
   const rows = await tx.select({ id: visits.id, adults: visits.adults, children: visits.children, babes: visits.babes, givenBackAt: visits.givenBackAt })
     .from(visits)
     .innerJoin(entryTimes, eq(entryTimes.id, visits.entryTimeId))
     .innerJoin(bookings, eq(bookings.id, visits.bookingId))
-    .where(and(inArray(visits.id, ids), eq(entryTimes.stopId, stopId), isNotNull(bookings.confirmedAt)))
-    .orderBy(visits.id)
-    .for('no key update', { of: visits });
+    .where(and(inArray(visits.id, named), eq(entryTimes.stopId, stopId), isNotNull(bookings.confirmedAt)));
   return new Map(rows.map((row) => [row.id, row]));
 }
 

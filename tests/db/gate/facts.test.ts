@@ -2,13 +2,14 @@ import { asc, eq } from 'drizzle-orm';
 import { beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { getDb } from '@/db/client';
 import { gateFacts } from '@/db/schema/gate';
+import { giveBackForParty } from '@/lib/bookings/commands/give-back';
 import { newId, type Id } from '@/lib/core/ids';
 import { peopleCount } from '@/lib/gate/rules/facts';
 import { foldFacts, headsInGarden, storyOf } from '@/lib/gate/rules/fold';
 import { recordFacts } from '@/lib/gate/commands';
 import { factsOfStop } from '@/lib/gate/queries';
 import type { AccountActor, Ctx, GateActor } from '@/lib/infra/context';
-import { aClub, anEntryTime, anOpenDay, aStop, cleo, onTheDay } from '@/tests/support/cast';
+import { aClub, anEntryTime, anOpenDay, aStop, cleo, ctxOf, onTheDay } from '@/tests/support/cast';
 import { aFact, aPhone, aVisit, batch } from './gate-cast';
 
 let coordinator: AccountActor;
@@ -106,6 +107,21 @@ describe('what a phone did at the gate', () => {
 
       expect(answers.map(({ answers: [answer] }) => answer?.outcome).sort()).toEqual(['kept', 'refused', 'refused', 'refused']);
       expect(peopleCount(storyOf(await fold(), visitId).in)).toBe(3);
+    }
+  });
+
+  it('lets a party in or gives its places back, never both, when the office and the gate act at once', async () => {
+    const office = await ctxOf(coordinator, onTheDay(4));
+    const busy = await anEntryTime({ id: stopId, openDayId }, { atMinutes: 60, capacity: 60, taken: 30 });
+    for (let round = 0; round < 10; round += 1) {
+      const { visitId } = await aVisit(busy, openDayId);
+
+      const [letIn, gaveBack] = await Promise.all([
+        recordFacts(phone, batch(aFact({ visitId, adults: 2, children: 1 }))).then(({ answers: [answer] }) => answer?.outcome === 'kept'),
+        giveBackForParty(office, { visitId, version: 1, adults: 2, children: 1, babes: 0, reason: 'ill', refundPercent: null }).then(() => true, (error: { code: string }) => error.code !== 'already_came_in'),
+      ]);
+
+      expect(letIn).not.toBe(gaveBack);
     }
   });
 
