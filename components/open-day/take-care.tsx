@@ -12,7 +12,7 @@ export function TakeCare({ cautions, howToCome, count }: { cautions: OpenDayPage
           <p className="mt-3 whitespace-pre-line">{howToCome}</p>
         </div>
       )}
-      <div>
+      {cautions.length === 0 ? null : <div>
         <h2>Take care</h2>
         <div className="mt-3">
           <Notice tone="caution" as="standing" word={null}>
@@ -22,7 +22,7 @@ export function TakeCare({ cautions, howToCome, count }: { cautions: OpenDayPage
             </ul>
           </Notice>
         </div>
-      </div>
+      </div>}
     </section>
   );
 }

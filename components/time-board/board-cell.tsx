@@ -67,7 +67,7 @@ function Inside(props: CellProps & { isFolded: boolean }) {
   const spoken = spokenName(board, stop, cell, state, people);
   switch (state.kind) {
     case 'over': return <Flat mark="" word="over" spoken={spoken} />;
-    case 'full': return <Flat mark="–" word="full" spoken={spoken} />;
+    case 'full': return <Flat mark="—" word="full" spoken={spoken} />;
     case 'fewer': return <Fewer places={state.places} heads={heads} spoken={spoken} />;
     case 'barred': return <Barred {...props} cell={cell} state={state} spoken={spoken} />;
     case 'none': return null;

@@ -11,7 +11,7 @@ export function BoardKey() {
       <Line sign={<span className={`${boxed} figures font-semibold`}>12</span>}>places left: choose it</Line>
       <Line sign={<span className={boxed}><Pegs count={4} /></span>}>five or fewer, a peg for each</Line>
       <Line sign={<Pegs count={2} />}>fewer places than you are</Line>
-      <Line sign={<span className="figures font-semibold">–</span>}>full</Line>
+      <Line sign={<span className="figures font-semibold">—</span>}>full</Line>
       <Line sign={<span className="figures font-bold tracking-widest text-ink-soft">···</span>}>not open at that time</Line>
       <Line sign={<span className="h-[30px] w-0.5 bg-ink-soft" />}>too far from your other gardens, or you are in one of them then</Line>
       <Line sign={<i className="text-[1.2rem]">s</i>}>live steam</Line>

@@ -1,3 +1,4 @@
+import Link from 'next/link';
 import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import type { FormState } from '@/lib/core/form-state';
@@ -42,5 +43,14 @@ function Refused({ message, state }: { message: string; state: FormState }) {
         <label className="inline-flex min-h-11 cursor-pointer items-center gap-3"><input type="checkbox" name="insists" className="tick-box" /> choose it all the same</label>
       ) : null}
     </>
+  );
+}
+
+/** A day on which nothing can be had now. */
+export function NothingLeft() {
+  return (
+    <div className={styles.fare}>
+      <p className="max-w-none">Every place is taken. Places come back when a party gives them back: look again later, or see <Link href="/open-days">the other days</Link>.</p>
+    </div>
   );
 }

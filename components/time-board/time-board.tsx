@@ -6,13 +6,13 @@ import { VisitorLine } from '@/components/day-graph/visitor-line';
 import { idleForm, type FormAction } from '@/lib/core/form-state';
 import { countPeople, headsOf } from '@/lib/bookings/rules/party';
 import { REFUSALS } from '@/lib/core/refusal';
-import { boardStates, chosenCells, onlyFitting, settingOf, sittingOf, unbarred } from '@/lib/opendays/rules/board';
+import { boardStates, chosenCells, hasPlaces, onlyFitting, settingOf, sittingOf, unbarred, withOwn } from '@/lib/opendays/rules/board';
 import { dayLine } from '@/lib/opendays/rules/day-line';
 import { partyMistake } from '@/lib/opendays/rules/party';
 import { firstClash } from '@/lib/opendays/rules/reach';
 import type { BoardView } from '@/lib/opendays/views';
 import { BoardTable } from './board-table';
-import { Fare } from './fare';
+import { Fare, NothingLeft } from './fare';
 import { goneSentence, News } from './news';
 import { PeopleLine } from './people-line';
 import styles from './time-board.module.css';
@@ -23,6 +23,8 @@ export type TimeBoardProps = {
   board: BoardView;
   action: FormAction;
   first: FirstChoice;
+  /** Heads that this browser keeps already, by entry time. */
+  own: Record<string, number>;
   /** The page's own address, without its query. */
   path: string;
   caption: string;
@@ -46,13 +48,13 @@ export function TimeBoard(props: TimeBoardProps) {
   );
 }
 
-function Board({ board: served, action, first, path, caption, heads: headOf, posts, train, boardKey, beside }: TimeBoardProps) {
+function Board({ board: served, action, first, own, path, caption, heads: headOf, posts, train, boardKey, beside }: TimeBoardProps) {
   const isAwake = useSyncExternalStore(never, () => true, () => false);
   const [state, submit, isSending] = useActionState(action, idleForm);
   const [hasTried, setTried] = useState(false);
-  const { adopt, ...choice } = useChoice(firstChoice(state, first));
+  const { adopt, ...choice } = useChoice(firstChoice(state, first), path);
   const { fresh, changes } = useFreshBoard(served);
-  const board = onlyFitting(fresh, choice.only, choice.chosen);
+  const board = onlyFitting(withOwn(fresh, own), choice.only, choice.chosen);
   const { party, isReadable } = partyOf(choice.typed);
   const heads = Math.max(1, headsOf(party, board.babesTakePlace));
   const chosen = chosenCells(board, choice.chosen);
@@ -86,7 +88,7 @@ function Board({ board: served, action, first, path, caption, heads: headOf, pos
             {board.stops.length === 0 ? <p className="py-4">No garden fits both. Untick one to see the others.</p> : null}
             {boardKey}
             {chosen.length === 0 ? null : <VisitorLine board={board} day={day} postOf={(stopId) => posts[stopId]} />}
-            <Fare {...{ board, chosen, party, heads, state, isSending, isAwake }} problem={gone ?? (hasTried ? problem : null)} />
+            {chosen.length === 0 && !hasPlaces(board) ? <NothingLeft /> : <Fare {...{ board, chosen, party, heads, state, isSending, isAwake }} problem={gone ?? (hasTried ? problem : null)} />}
           </div>
         </div>
         {beside}

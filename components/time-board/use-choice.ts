@@ -1,9 +1,9 @@
 'use client';
 
-import { useCallback, useState } from 'react';
+import { useCallback, useEffect, useState } from 'react';
 import type { FormState } from '@/lib/core/form-state';
 import type { Only } from '@/lib/opendays/rules/board';
-import { readBoardAsked, type BoardAsked } from '@/lib/opendays/rules/board-asked';
+import { boardAddress, readBoardAsked, type BoardAsked } from '@/lib/opendays/rules/board-asked';
 import { headsTyped } from '@/lib/opendays/rules/party';
 import type { People } from '@/lib/bookings/rules/party';
 
@@ -43,7 +43,7 @@ function readTyped(form: FormData): FirstChoice {
 const isSame = (a: readonly string[], b: readonly string[]) => a.length === b.length && a.every((each) => b.includes(each));
 
 /** Everything the party decides on the board: people, times, and which it insisted on. The last chosen time calls the train. */
-export function useChoice(first: FirstChoice) {
+export function useChoice(first: FirstChoice, path: string) {
   const [typed, setTyped] = useState(first.typed);
   const [only, setOnly] = useState(first.only);
   const [chosen, setChosen] = useState(first.chosen);
@@ -55,6 +55,8 @@ export function useChoice(first: FirstChoice) {
     setTyped(before.typed);
     setOnly(before.only);
   }, []);
+  // The address says what is chosen, so that a reload and the way back from the next page find it again.
+  useEffect(() => window.history.replaceState(null, '', boardAddress(path, { typed, only, chosen })), [path, typed, only, chosen]);
   return {
     typed, only, chosen, insisted, adopt,
     type: (kind: keyof People, text: string) => setTyped((before) => ({ ...before, [kind]: text })),

@@ -1,14 +1,15 @@
 import 'server-only';
-import { and, asc, desc, eq, isNotNull, lte, sql, type SQL } from 'drizzle-orm';
+import { and, asc, desc, eq, gt, isNotNull, isNull, lte, sql, type SQL } from 'drizzle-orm';
 import { bookings, visits } from '@/db/schema/bookings';
 import { paymentAttempts } from '@/db/schema/books';
 import { gardenAreas, gardenPlants, gardens, plants } from '@/db/schema/gardens';
 import { areaMinutes, entryTimes, openDays, prices, stops } from '@/db/schema/opendays';
 import type { Id } from '@/lib/core/ids';
 import { firstOrNull } from '@/lib/core/only';
-import type { Ctx } from '@/lib/infra/context';
+import { formatTime } from '@/lib/core/time';
+import type { Ctx, HolderActor } from '@/lib/infra/context';
 import type { DayFigures } from './rules/day-words';
-import { toOpenDayLine, toOpenDayPage, toPlacesLeft, type OpenDayLine, type OpenDayPage, type OpenDayRow, type PlacesLeft } from './views';
+import { toOpenDayLine, toOpenDayPage, toPlacesLeft, type OpenDayLine, type OpenDayPage, type OpenDayRow, type OwnKept, type PlacesLeft } from './views';
 
 /**
  * A subselect as a column. Drizzle drops the table names of columns that stand directly in a selected `sql` when the query
@@ -99,4 +100,13 @@ export async function findPlacesLeft({ db, now }: Pick<Ctx, 'db' | 'now'>, openD
   if (rows.length === 0) return null;
   return toPlacesLeft(rows.flatMap(({ entryTimeId, graceUntil, closedAt, stopClosedAt, places }) =>
     (entryTimeId === null || graceUntil === null ? [] : [{ entryTimeId, graceUntil, closedAt, stopClosedAt, places }])), now);
+}
+
+/** The places of an open day that this browser keeps now, or null. One query. */
+export async function findOwnKept({ db, now, club, actor }: Ctx<HolderActor>, slug: string): Promise<OwnKept | null> {
+  const rows = await db.select({ heldUntil: bookings.heldUntil, entryTimeId: visits.entryTimeId, heads: visits.heads }).from(bookings)
+    .innerJoin(openDays, eq(openDays.id, bookings.openDayId)).innerJoin(visits, eq(visits.bookingId, bookings.id))
+    .where(and(eq(openDays.slug, slug), eq(bookings.holderHash, actor.holderHash), isNull(bookings.confirmedAt), isNull(bookings.releasedAt), isNull(visits.givenBackAt), gt(bookings.heldUntil, now))).limit(14);
+  const first = firstOrNull(rows);
+  return first && { keptUntil: formatTime(first.heldUntil, club), heads: Object.fromEntries(rows.map((row) => [row.entryTimeId, row.heads])) };
 }

@@ -216,3 +216,6 @@ export function toOpenDayPage(day: OpenDayRow, entries: EntryFacts[], club: Boar
     cautions: cautionsOfDay(day.stops),
   };
 }
+
+/** What a browser keeps at an open day: until when, and heads by entry time. It may choose those again, for a new hold gives the old back. */
+export type OwnKept = { keptUntil: string; heads: Record<string, number> };

@@ -25,6 +25,11 @@ export function withPlaces(board: BoardView, { places }: PlacesLeft): BoardView 
   return { ...board, rows: board.rows.map((row) => row.map(refresh)) };
 }
 
+/** The same board for a party that keeps places already: choosing anew gives those back, so it may choose them again. */
+export function withOwn(board: BoardView, own: Readonly<Record<string, number>>): BoardView {
+  return { ...board, rows: board.rows.map((row) => row.map((cell) => cell && { ...cell, places: cell.places + (own[cell.entryTimeId] ?? 0) })) };
+}
+
 /** What a visitor may ask to see alone. */
 export type Only = { stepFree: boolean; steam: boolean };
 
@@ -72,6 +77,9 @@ export function cellState(board: BoardView, cell: BoardCell | null, heads: numbe
 export function boardStates(board: BoardView, heads: number, chosen: readonly BoardCell[]): CellState[][] {
   return board.rows.map((row) => row.map((cell) => cellState(board, cell, heads, chosen)));
 }
+
+/** Whether anything can be had at all. */
+export const hasPlaces = (board: BoardView): boolean => board.rows.flat().some((cell) => cell !== null && !cell.isOver && cell.places > 0);
 
 /** How the reasons name gardens and times on this board. */
 export function namingOf(board: BoardView): Naming {

@@ -7,8 +7,8 @@ import { eq } from 'drizzle-orm';
 import { newId, type Id } from '@/lib/core/ids';
 import { only } from '@/lib/core/only';
 import { addMinutes } from '@/lib/core/time';
-import { findOpenDay, findPlacesLeft, listOpenDays } from '@/lib/opendays/queries';
-import { aClub, aGarden, anEntryTime, anOpenDay, apart, aStop, ctxOf, MAY_15, NOON } from '@/tests/support/cast';
+import { findOpenDay, findOwnKept, findPlacesLeft, listOpenDays } from '@/lib/opendays/queries';
+import { aBrowser, aClub, aGarden, anEntryTime, anOpenDay, apart, aStop, ctxOf, MAY_15, NOON } from '@/tests/support/cast';
 
 const stranger = { kind: 'anyone' } as const;
 const DRAWN = '0123456789ABCDEFGHJKMNPQRSTVWXYZ';
@@ -121,6 +121,19 @@ describe('the page of an open day', () => {
 
     expect((await findOpenDay(await ctxOf(stranger), day.slug))?.board).toMatchObject({ stops: [], columns: [], rows: [] });
   });
+});
+
+test('a browser finds the places it keeps at a day, with their heads, until the minute they run out', async () => {
+  const day = await anOpenDay();
+  const entry = await anEntryTime(await aStop(day.id));
+  const browser = aBrowser();
+  const until = addMinutes(NOON, 10);
+  const booking = only(await getDb().insert(bookings).values({ openDayId: day.id, code: aCode(), holderHash: browser.holderHash, madeAt: NOON, heldUntil: until, totalMinor: 0, currency: 'USD' }).returning({ id: bookings.id }));
+  await getDb().insert(visits).values({ bookingId: booking.id, openDayId: day.id, entryTimeId: entry.id, adults: 2, children: 1, heads: 3, adultMinor: 0, childMinor: 0, babeMinor: 0 });
+
+  expect(await findOwnKept(await ctxOf(browser), day.slug)).toEqual({ keptUntil: '12:10', heads: { [entry.id]: 3 } });
+  expect(await findOwnKept(await ctxOf(browser, until), day.slug)).toBeNull();
+  expect(await findOwnKept(await ctxOf(aBrowser()), day.slug)).toBeNull();
 });
 
 test('the list has coming days soonest first, then past ones, and none that is not published', async () => {

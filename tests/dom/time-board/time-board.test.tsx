@@ -32,6 +32,7 @@ const aTimeBoard = (changes: Partial<TimeBoardProps> = {}, query: Record<string,
       board={board}
       action={action}
       first={readBoardAsked(query)}
+      own={{}}
       path="/open-days/spring-2027"
       caption="Places left at each garden and entry time on Saturday 15 May 2027"
       heads={Object.fromEntries(board.stops.map((stop) => [stop.stopId, <GardenHead key={stop.stopId} stop={stop} />]))}
@@ -158,6 +159,12 @@ describe('places left', () => {
     expect(sent).toEqual([]);
   });
 
+  it('of the party’s own hold may be chosen again', () => {
+    const at = show(aTimeBoard({ own: { [entryIdAt(2, '12:15')]: 3 } })); // full, but for three that this browser keeps
+
+    expect(tick(at, 'Pine Barrow Light Railway, 12:15').getAttribute('aria-label')).toBe('Pine Barrow Light Railway, 12:15, 3 places left');
+  });
+
   it('stay as they are when the server gives no answer', async () => {
     vi.stubGlobal('fetch', async () => new Response('<html>', { status: 502 }));
     const at = show(aTimeBoard());
@@ -243,6 +250,13 @@ describe('without JavaScript', () => {
     expect(tick(at, 'Saltmarsh & Plover, 10:00').checked).toBe(true);
     expect(words(keep(at))).toBe('Keep 5 places at 10:00');
   });
+});
+
+it('says in the address what is chosen, so that a reload finds it again', async () => {
+  const at = show(aTimeBoard());
+  await choose(at, 'Saltmarsh & Plover, 10:00');
+
+  expect(window.location.pathname + window.location.search).toBe(`/open-days/spring-2027?children=1&with=${entryIdAt(0, '10:00')}`);
 });
 
 describe('filters', () => {

@@ -2,6 +2,8 @@ import { describe, expect, test } from 'vitest';
 import { boardStates, cellState, chosenCells, onlyFitting, runsOf, settingOf, spokenName, withPlaces } from '@/lib/opendays/rules/board';
 import { dayLine, journeyInWords, journeyNote, keepWords, visitsInLine } from '@/lib/opendays/rules/day-line';
 import { graphOf } from '@/lib/opendays/rules/day-graph';
+import { cleanAddress, readBoardAsked } from '@/lib/opendays/rules/board-asked';
+import { daysInWords, figuresSentence, whenAndWhere } from '@/lib/opendays/rules/day-words';
 import { headsTyped, partyMistake } from '@/lib/opendays/rules/party';
 import { partyTotalMinor, priceSentence, sumSentence } from '@/lib/opendays/rules/prices';
 import { toBoard, toPlacesLeft } from '@/lib/opendays/views';
@@ -173,6 +175,44 @@ describe("the party's day", () => {
     expect(keepWords(cells.slice(0, 2), 3)).toBe('Keep 3 places at both');
     expect(keepWords(cells.slice(1, 2), 1)).toBe('Keep 1 place at 11:30');
     expect(visitsInLine(board, cells)).toBe('10:00 Saltmarsh, 11:30 Pine Barrow and 13:45 Copperkettle');
+  });
+});
+
+describe('an open day in words', () => {
+  const some = { places: 640, taken: 200, parties: 69, people: 180 };
+
+  test.each([
+    [some, 'coming', '200 of 640 places are taken, by 69 parties.'],
+    [{ ...some, places: 1139, taken: 1014, parties: 171, people: 502 }, 'past', '1,014 of 1,139 places were taken, by 171 parties, 502 people.'],
+    [{ ...some, taken: 640 }, 'coming', 'All 640 places are taken, by 69 parties.'],
+    [{ ...some, taken: 0, parties: 0 }, 'coming', 'All 640 places are still to be had.'],
+    [{ ...some, taken: 3, parties: 1 }, 'coming', '3 of 640 places are taken, by 1 party.'],
+    [{ places: 0, taken: 0, parties: 0, people: 0 }, 'coming', 'Its times are not set yet.'],
+  ] as const)('%o, %s', (figures, phase, sentence) => {
+    expect(figuresSentence(figures, phase, 'en-US')).toBe(sentence);
+  });
+
+  test('says its date, its gardens and its hours, in the club’s own clock', () => {
+    const day = { heldOn: '2027-05-15', opensAt: new Date('2027-05-15T14:00:00Z'), closesAt: new Date('2027-05-15T20:00:00Z'), placeLine: 'in and around Alder Fork', gardens: 7 };
+
+    expect(whenAndWhere(day, boardClub)).toBe('Saturday 15 May 2027, seven gardens in and around Alder Fork, from 10:00 until 16:00');
+    expect(whenAndWhere({ ...day, gardens: 0 }, { ...boardClub, hourCycle: 'h12' })).toBe('Saturday 15 May 2027, in and around Alder Fork, from 10:00 am until 4:00 pm');
+    expect([daysInWords(2, 1), daysInWords(0, 0), daysInWords(1, 3)]).toEqual(['Two days to come, and one day that was', 'No day is set yet', 'One day to come, and three days that were']);
+  });
+});
+
+describe('the address of a board', () => {
+  const id = '03438734-6a21-4501-838e-c5e7aeca115a';
+
+  test('says who comes, what is shown and which times are ticked; what makes no sense is left out', () => {
+    expect(readBoardAsked({ adults: '3', 'step-free': 'only', with: [id, 'x'], steam: 'maybe' })).toEqual({ typed: { adults: '3', children: '0', babes: '0' }, only: { stepFree: true, steam: false }, chosen: [id] });
+    expect(readBoardAsked({ adults: '1'.repeat(500) }).typed.adults).toHaveLength(9);
+    expect(readBoardAsked({ with: Array.from({ length: 40 }, (_, index) => `00000000-0000-4000-8000-${String(index).padStart(12, '0')}`) }).chosen).toHaveLength(14);
+  });
+
+  test('is cleaned of what a form adds when it asks again without JavaScript', () => {
+    expect(cleanAddress('/open-days/spring', { $ACTION_1: '', adults: '2', children: '1', 'entryTimeId[]': id })).toBe(`/open-days/spring?children=1&with=${id}`);
+    expect(cleanAddress('/open-days/spring', { adults: '2', with: id })).toBeNull();
   });
 });
 

@@ -9,9 +9,9 @@ import { TakeCare } from '@/components/open-day/take-care';
 import { WhereTheyAre } from '@/components/open-day/where-they-are';
 import { RailRule } from '@/components/ui/rail-rule';
 import { builtInValley } from '@/lib/gardens/rules/valley-data';
-import { findOpenDay } from '@/lib/opendays/queries';
+import { findOpenDay, findOwnKept } from '@/lib/opendays/queries';
 import { cleanAddress, readBoardAsked } from '@/lib/opendays/rules/board-asked';
-import { pageContext } from '@/lib/web/context';
+import { holderContext, pageContext } from '@/lib/web/context';
 import { holdPlacesAction } from './actions';
 
 type Props = { params: Promise<{ slug: string }>; searchParams: Promise<Record<string, string | string[] | undefined>> };
@@ -35,12 +35,14 @@ export default async function OpenDayPage({ params, searchParams }: Props) {
   const clean = cleanAddress(path, asked);
   if (clean !== null) redirect(clean);
   const first = readBoardAsked(asked);
+  const holder = await holderContext();
+  const own = holder && (await findOwnKept(holder, day.slug));
   return (
     <PublicSheet club={club} here="/open-days">
       <Bill name={day.title} line={day.line} sums={day.sums} rail={day.phase === 'coming' ? null : <RailRule state={day.phase === 'past' ? 'done' : 'failed'} />} />
       {day.phase === 'called-off' ? <DayCalledOff note={day.note} /> : null}
       {day.phase === 'past' ? <DayDone /> : null}
-      {day.phase === 'coming' ? <OpenDayBoard day={day} action={holdPlacesAction} first={first} path={path} /> : null}
+      {day.phase === 'coming' ? <OpenDayBoard day={day} action={holdPlacesAction} first={first} own={own} path={path} /> : null}
       {day.phase === 'coming' ? <TakeCare cautions={day.cautions} howToCome={day.howToCome} count={day.gardens.length} /> : null}
       <WhereTheyAre valley={builtInValley} gardens={day.gardens} visited={day.phase === 'coming' ? first.chosen : []} board={day.board} />
     </PublicSheet>
