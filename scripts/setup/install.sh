@@ -71,7 +71,7 @@ need_packages() {
     return
   fi
   need_room "$root" 1500
-  (cd "$root" && step "Installing npm packages" npm ci --no-audit --no-fund --no-progress) || {
+  (cd "$root" && step "Installing npm packages" npm ci --prefer-offline --no-audit --no-fund --no-progress) || {
     ! full_disk || trouble "Installing npm packages did not work because the disk is full. Make room, then run this again."
     trouble "An npm package could not be had ($(grep -m1 -E 'npm (error|ERR!) ' "$log" | cut -c1-200 || true)). Check the network, then run this again; the whole log is .tmp/setup.log."
   }

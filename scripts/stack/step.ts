@@ -33,7 +33,8 @@ type Command = { cwd?: string; env?: NodeJS.ProcessEnv; signal?: AbortSignal };
 export async function command(doing: string, [file = '', ...args]: string[], options: Command = {}): Promise<string> {
   return new Promise((resolve, reject) => {
     // A group of its own: Ctrl-C in the terminal reaches us alone, and we end the group.
-    const child = spawn(file, args, { ...options, signal: undefined, detached: true, stdio: ['ignore', 'pipe', 'pipe'] });
+    const env = { ...(options.env ?? process.env), NO_COLOR: '1' };
+    const child = spawn(file, args, { ...(options.cwd !== undefined && { cwd: options.cwd }), env, detached: true, stdio: ['ignore', 'pipe', 'pipe'] });
     const end = () => child.pid && endGroup(child.pid, 'SIGTERM');
     options.signal?.addEventListener('abort', end, { once: true });
     let out = '';
