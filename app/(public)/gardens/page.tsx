@@ -32,9 +32,11 @@ export default async function GardensPage({ searchParams }: Props) {
         <>
           <Columns split="halves">
             <div>
-              <GardenMap gardens={page.shown} />
-              <p className="note mt-3 leading-snug">Each hatched patch is a neighbourhood and not a house. The address comes with your tickets.</p>
-              <LetterKey />
+              <div className="md:sticky md:top-4 large-print:static">
+                <GardenMap gardens={page.shown} />
+                <p className="note mt-3 leading-snug">Each hatched patch is a neighbourhood and not a house. The address comes with your tickets.</p>
+                <LetterKey />
+              </div>
             </div>
             <div>
               <GardenIndex gardens={page.shown} />

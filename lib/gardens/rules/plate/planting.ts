@@ -83,6 +83,6 @@ export function plantInFront(input: FrontInput, dice: Dice): { front: Planting[]
     x += 2 * half + dice.between(4, 22);
     tries = 0;
   }
-  const perch = thing.name === 'boot' && input.room.jokeStands && dice.next() < 0.7 ? [{ name: 'robin' as const, x: thing.x + 1.5, foot: thing.foot - 31.5 }] : [];
+  const perch = thing.name === 'boot' && input.room.jokeStands ? [{ name: 'robin' as const, x: thing.x + 1.5, foot: thing.foot - 31.5 }] : [];
   return { front, oddments: [thing, ...perch] };
 }
