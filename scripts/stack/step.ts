@@ -1,6 +1,7 @@
 // Long steps, with a line that shows they are running; and the sentence that ends a run when one cannot be done.
 import { spawn } from 'node:child_process';
 import { statfsSync, writeFileSync } from 'node:fs';
+import { stripVTControlCharacters } from 'node:util';
 import { root } from './places';
 
 /** What is wrong and what to do next, in one sentence each; the run ends with it. */
@@ -53,7 +54,7 @@ export async function command(doing: string, [file = '', ...args]: string[], opt
 /** A sentence for a failed command: a full disk is named as such, otherwise what it complained of is shown. */
 export function whyFailed(doing: string, output: string): string {
   if (/ENOSPC|No space left on device/i.test(output)) return `${doing} did not work because the disk is full. Make room, then start again.`;
-  const lines = output.split('\n').filter((line) => line.trim() !== '');
+  const lines = stripVTControlCharacters(output).split('\n').filter((line) => line.trim() !== '');
   const complaint = lines.findIndex((line) => /error|failed|cannot|can't/i.test(line));
   const shown = complaint < 0 ? lines.slice(-12) : lines.slice(complaint, complaint + 12);
   writeFileSync(`${root}/.tmp/failed.log`, output);
