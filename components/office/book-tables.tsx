@@ -1,4 +1,7 @@
+import Link from 'next/link';
+import type { ReactNode } from 'react';
 import { Money } from '@/components/ui/money';
+import { Sign } from '@/components/ui/sign';
 import { Table } from '@/components/ui/table';
 import { When } from '@/components/ui/when';
 import { sortingOf, type Listing } from '@/lib/core/listing';
@@ -21,7 +24,7 @@ export function IncomeTable({ caption, first, rows, club }: { caption: string; f
       empty="Nothing yet."
       columns={[
         { key: 'name', head: first, names: 'row', cell: (row) => row.name },
-        { key: 'on', head: 'Held on', cell: (row) => (row.on === null ? '' : <When on={row.on} club={club} style="short" />) },
+        ...(rows.some((row) => row.on !== null) ? [{ key: 'on', head: 'Held on', cell: (row: Income) => (row.on === null ? '' : <When on={row.on} club={club} style="short" />) }] : []),
         { key: 'in', head: 'Came in', set: 'figures', cell: (row) => <Amount minor={row.cameInMinor} club={club} /> },
         { key: 'fees', head: 'Card fees', set: 'figures', cell: (row) => <Amount minor={row.feesMinor} club={club} /> },
         { key: 'left', head: 'Left', set: 'figures', cell: (row) => <Amount minor={row.cameInMinor - row.feesMinor} club={club} /> },
@@ -41,7 +44,7 @@ export function ReceiptTable({ rows, asked, path, club }: { rows: Receipt[]; ask
       rowKey={(row) => row.id}
       empty={asked.find === '' ? 'No money has come in yet.' : 'No receipt answers to that.'}
       columns={[
-        { key: 'number', head: 'Receipt', names: 'row', sorting: sortingOf(path, asked, 'number'), cell: (row) => receiptNumber(row.year, row.number) },
+        { key: 'number', head: 'Receipt', names: 'row', sorting: sortingOf(path, asked, 'number'), cell: (row) => <Link className="link" href={`${path}/receipts/${row.id}`}>{receiptNumber(row.year, row.number)}</Link> },
         { key: 'on', head: 'Received', sorting: sortingOf(path, asked, 'received'), cell: (row) => <When on={row.receivedOn} club={club} style="short" /> },
         { key: 'payer', head: 'From', cell: (row) => row.payer },
         { key: 'for', head: 'For', cell: (row) => (row.isDues ? 'dues' : 'tickets') },
@@ -53,20 +56,53 @@ export function ReceiptTable({ rows, asked, path, club }: { rows: Receipt[]; ask
   );
 }
 
-type Refund = { id: string; amountMinor: number; reason: string; askedAt: Date; tries: number; failedAt: Date | null };
+export type Refund = { id: string; amountMinor: number; reason: string; askedAt: Date; tries: number; doneAt: Date | null; failedAt: Date | null; byHand: boolean };
+type RefundTableProps = { caption: string; rows: readonly Refund[]; club: Club; empty: string; /** The form for one that the card service would not make. */ settle?: (refund: Refund) => ReactNode };
 
-/** Refunds on their way, or stuck. */
-export function RefundTable({ rows, club }: { rows: Refund[]; club: Club }) {
+/** Refunds with how far each has come; one that failed opens to the form that settles it. */
+export function RefundTable({ caption, rows, club, empty, settle }: RefundTableProps) {
   return (
     <Table
-      caption="Refunds not yet through"
+      caption={caption}
       rows={rows}
       rowKey={(row) => row.id}
-      empty="None waits."
+      empty={empty}
       columns={[
-        { key: 'asked', head: 'Asked', names: 'row', cell: (row) => <When at={row.askedAt} club={club} style="short" /> },
+        { key: 'asked', head: 'Given back', names: 'row', cell: (row) => <When at={row.askedAt} club={club} style="short" /> },
         { key: 'why', head: 'Why', cell: (row) => row.reason },
-        { key: 'how', head: 'So far', cell: (row) => (row.failedAt === null ? (row.tries === 0 ? 'on its way' : `tried ${row.tries} times, tried again`) : 'the card service said no: pay it another way') },
+        { key: 'how', head: 'So far', cell: (row) => <RefundState refund={row} club={club} /> },
+        { key: 'amount', head: 'Amount', set: 'figures', cell: (row) => <Amount minor={row.amountMinor} club={club} /> },
+      ]}
+      opened={(row) => (settle !== undefined && row.failedAt !== null && !row.byHand ? settle(row) : null)}
+    />
+  );
+}
+
+function RefundState({ refund, club }: { refund: Refund; club: Club }) {
+  if (refund.byHand) return <>paid out by hand</>;
+  if (refund.failedAt !== null) return <span className="text-danger"><Sign kind="danger" /> the card service would not: pay it another way</span>;
+  if (refund.doneAt !== null) return <>gone <When at={refund.doneAt} show="day" style="bare" club={club} /></>;
+  return <>{refund.tries === 0 ? 'on its way' : `tried ${refund.tries} times, tried again`}</>;
+}
+
+const KINDS: Record<string, string> = {
+  received: 'money came in', unplaced: 'money without places', 'refund-owed': 'to give back', 'refund-paid': 'given back', 'refund-failed': 'a refund came back', fee: 'card fee', reversal: 'reversed',
+};
+type Entry = { id: string; kind: string; happenedOn: Day; to: string[]; from: string[]; amountMinor: number };
+
+/** The journal's newest entries: what happened, from where to where. */
+export function JournalTable({ rows, club }: { rows: readonly Entry[]; club: Club }) {
+  return (
+    <Table
+      caption="The newest entries of the journal"
+      rows={rows}
+      rowKey={(row) => row.id}
+      empty="Nothing is booked yet."
+      columns={[
+        { key: 'on', head: 'Day', cell: (row) => <When on={row.happenedOn} style="short" club={club} /> },
+        { key: 'kind', head: 'What', names: 'row', cell: (row) => KINDS[row.kind] ?? row.kind },
+        { key: 'from', head: 'From', cell: (row) => row.from.join(', ') },
+        { key: 'to', head: 'To', cell: (row) => row.to.join(', ') },
         { key: 'amount', head: 'Amount', set: 'figures', cell: (row) => <Amount minor={row.amountMinor} club={club} /> },
       ]}
     />

@@ -13,10 +13,10 @@ export function StopsTable({ stops, path }: { stops: readonly OfficeStop[]; path
       rowId={(stop) => `stop-${stop.number}`}
       empty={<>No garden takes part yet. <Link className="link" href={`${path}/plan#add`}>Add the first</Link></>}
       columns={[
-        { key: 'number', head: 'Stop', cell: (stop) => <span className="flex items-center gap-2"><NipCard stopNumber={stop.number} width={38} />{stop.number}</span> },
+        { key: 'number', head: 'Stop', cell: (stop) => <span className="flex items-baseline gap-2"><NipCard stopNumber={stop.number} width={38} />{stop.number}</span> },
         { key: 'garden', head: 'Garden', names: 'row', cell: (stop) => <Link className="link" href={`${path}/stops/${stop.number}`}>{stop.garden}</Link> },
         { key: 'times', head: 'Entry times', set: 'figures', cell: (stop) => stop.times.length },
-        { key: 'places', head: 'Places taken', set: 'figures', cell: (stop) => `${stop.taken} of ${stop.capacity}` },
+        { key: 'places', head: 'Places taken', set: 'figures', cell: (stop) => (stop.times.length === 0 ? 'none yet' : `${stop.taken} of ${stop.capacity}`) },
         { key: 'people', head: 'People', set: 'figures', cell: (stop) => stop.people },
         { key: 'stay', head: 'Stay', set: 'figures', cell: (stop) => `${stop.stayMinutes} min` },
         { key: 'limit', head: 'At once', set: 'figures', cell: (stop) => stop.headsLimit },

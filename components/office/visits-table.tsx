@@ -26,7 +26,7 @@ export function VisitsTable({ visits, path, open, mayEdit, now, club, move, give
       rowKey={(visit) => visit.id}
       empty="This booking has no visit."
       columns={[
-        { key: 'stop', head: 'Stop', cell: (visit) => <span className="flex items-center gap-2"><NipCard stopNumber={visit.number} width={38} />{visit.number}</span> },
+        { key: 'stop', head: 'Stop', cell: (visit) => <span className="flex items-baseline gap-2"><NipCard stopNumber={visit.number} width={38} />{visit.number}</span> },
         { key: 'garden', head: 'Garden', names: 'row', cell: (visit) => visit.garden },
         { key: 'at', head: 'At', set: 'figures', cell: (visit) => <When at={visit.opensAt} show="time" club={club} /> },
         { key: 'people', head: 'Who', cell: (visit) => (visit.adults + visit.children + visit.babes === 0 ? 'nobody' : partyInWords(visit)) },

@@ -63,11 +63,11 @@ export function Table<Row>({ caption, captionShown = 'spoken', columns, rows, ro
 /* Room for each column on a phone, where the frame scrolls rather than break words. */
 const ROOM_REM = 6.5;
 
-const setting = (set: 'text' | 'figures' = 'text') => (set === 'figures' ? 'text-right whitespace-nowrap' : 'text-left pr-4 last:pr-0');
+const setting = (set: 'text' | 'figures' = 'text') => (set === 'figures' ? 'text-right whitespace-nowrap pl-2' : 'text-left pl-4 pr-2 last:pr-0');
 
 function Head<Row>({ column }: { column: Column<Row> }) {
   const { sorting } = column;
-  const look = `border-b-[1.5px] border-ink pt-1 pb-1.5 align-bottom font-semibold text-ink-soft pl-2 first:pl-0 ${setting(column.set)}`;
+  const look = `border-b-[1.5px] border-ink pt-1 pb-1.5 align-bottom font-semibold text-ink-soft first:pl-0 ${setting(column.set)}`;
   if (sorting === undefined) return <th scope="col" className={look}>{column.head}</th>;
   return (
     <th scope="col" className={look} aria-sort={sorting.order}>
@@ -80,7 +80,7 @@ function Head<Row>({ column }: { column: Column<Row> }) {
 }
 
 function Cell<Row>({ column, row }: { column: Column<Row>; row: Row }) {
-  const look = `py-1.5 pl-2 align-baseline first:pl-0 ${setting(column.set)} ${column.set === 'figures' ? 'figures' : ''}`;
+  const look = `py-1.5 align-baseline first:pl-0 ${setting(column.set)} ${column.set === 'figures' ? 'figures' : ''}`;
   if (column.names === 'row') return <th scope="row" className={`${look} font-semibold`}>{column.cell(row)}</th>;
   return <td className={look}>{column.cell(row)}</td>;
 }

@@ -1,10 +1,13 @@
 import 'server-only';
-import { and, asc, desc, eq, ilike, isNull, or, sql, type SQL } from 'drizzle-orm';
+import { asc, desc, eq, ilike, or, sql, type SQL } from 'drizzle-orm';
 import { accountsOfBooks, funds, journalEntries, payments, postings, refunds } from '@/db/schema/books';
-import { bookingContacts } from '@/db/schema/bookings';
+import { bookingContacts, bookings } from '@/db/schema/bookings';
+import { charges } from '@/db/schema/dues';
 import { openDays } from '@/db/schema/opendays';
 import { households } from '@/db/schema/people';
+import type { Id } from '@/lib/core/ids';
 import { likeOf, PAGE_ROWS, type Listing } from '@/lib/core/listing';
+import { firstOrNull } from '@/lib/core/only';
 import type { AccountCtx } from '@/lib/infra/context';
 import type { ReceiptSort } from './schema';
 
@@ -42,7 +45,7 @@ export async function receiptLines({ db }: AccountCtx, asked: Listing<ReceiptSor
   const rows = await db.select({
     id: payments.id, year: payments.receiptYear, number: payments.receiptNumber, method: payments.method, amountMinor: payments.amountMinor, receivedOn: payments.receivedOn, reference: payments.reference,
     payer, isDues: sql<boolean>`${payments.chargeId} is not null`, total: sql<number>`count(*) over ()::int`,
-    givenBackMinor: sql<number>`coalesce((select sum(r.amount_minor) from ${refunds} r where r.payment_id = ${payments.id} and r.failed_at is null), 0)::int`,
+    givenBackMinor: sql<number>`coalesce((select sum(r.amount_minor) from ${refunds} r where r.payment_id = ${payments.id}), 0)::int`,
   })
     .from(payments).leftJoin(households, eq(households.id, payments.householdId)).leftJoin(bookingContacts, eq(bookingContacts.bookingId, payments.bookingId))
     .where(like === null ? undefined : or(ilike(households.name, like), ilike(bookingContacts.name, like), ilike(payments.reference, like), sql`${payments.receiptYear} || '/' || lpad(${payments.receiptNumber}::text, 4, '0') ilike ${like}`))
@@ -51,15 +54,41 @@ export async function receiptLines({ db }: AccountCtx, asked: Listing<ReceiptSor
   return { rows, total: rows[0]?.total ?? 0 };
 }
 
+/* A refund is settled when the card service made it, or when an officer paid it out by hand after the service would not. */
+const byHand = sql<boolean>`exists (select from journal_entries j where j.kind = 'refund-paid' and j.source_id = refunds.id || ':by-hand')`;
+const openRefund = sql`(${refunds.doneAt} is null or ${refunds.failedAt} is not null) and not ${byHand}`;
+const refundFacts = { id: refunds.id, amountMinor: refunds.amountMinor, reason: refunds.reason, askedAt: refunds.askedAt, tries: refunds.tries, doneAt: refunds.doneAt, failedAt: refunds.failedAt, byHand };
+
 /** Refunds that are on their way or failed, oldest first, at most 100. */
 export async function refundsOpen({ db }: AccountCtx) {
-  return db.select({ id: refunds.id, amountMinor: refunds.amountMinor, reason: refunds.reason, askedAt: refunds.askedAt, tries: refunds.tries, failedAt: refunds.failedAt })
-    .from(refunds).where(and(isNull(refunds.doneAt))).orderBy(asc(refunds.askedAt)).limit(100);
+  return db.select(refundFacts).from(refunds).where(openRefund).orderBy(asc(refunds.askedAt)).limit(100);
 }
 
-/** The journal's newest entries with their postings, at most 100 postings. */
+/** One payment with who made it and what for; null when there is none. */
+export async function findPayment({ db }: AccountCtx, paymentId: Id<'payment'>) {
+  return firstOrNull(await db.select({
+    id: payments.id, year: payments.receiptYear, number: payments.receiptNumber, method: payments.method, amountMinor: payments.amountMinor, currency: payments.currency, receivedOn: payments.receivedOn, reference: payments.reference,
+    householdId: payments.householdId, household: households.name, code: bookings.code, party: bookingContacts.name, day: openDays.title, termFrom: charges.termFrom, termTo: charges.termTo,
+  })
+    .from(payments)
+    .leftJoin(households, eq(households.id, payments.householdId)).leftJoin(charges, eq(charges.id, payments.chargeId))
+    .leftJoin(bookings, eq(bookings.id, payments.bookingId)).leftJoin(bookingContacts, eq(bookingContacts.bookingId, payments.bookingId)).leftJoin(openDays, eq(openDays.id, bookings.openDayId))
+    .where(eq(payments.id, paymentId)).limit(1));
+}
+
+/** What was given back of one payment, oldest first. */
+export async function refundsOf({ db }: AccountCtx, paymentId: Id<'payment'>) {
+  return db.select(refundFacts).from(refunds).where(eq(refunds.paymentId, paymentId)).orderBy(asc(refunds.askedAt)).limit(50);
+}
+
+/** The journal's newest entries, each with its sides, at most 30 entries. */
 export async function journalLines({ db }: AccountCtx) {
-  return db.select({ entryId: journalEntries.id, kind: journalEntries.kind, happenedOn: journalEntries.happenedOn, account: accountsOfBooks.name, fund: postings.fund, amountMinor: postings.amountMinor })
+  const side = sql<string[]>`array_agg(${accountsOfBooks.name} order by ${accountsOfBooks.name}) filter (where ${postings.amountMinor} > 0)`;
+  const other = sql<string[]>`array_agg(${accountsOfBooks.name} order by ${accountsOfBooks.name}) filter (where ${postings.amountMinor} < 0)`;
+  return db.select({
+    id: journalEntries.id, kind: journalEntries.kind, happenedOn: journalEntries.happenedOn, to: side, from: other,
+    amountMinor: sql<number>`(sum(${postings.amountMinor}) filter (where ${postings.amountMinor} > 0))::int`,
+  })
     .from(journalEntries).innerJoin(postings, eq(postings.entryId, journalEntries.id)).innerJoin(accountsOfBooks, eq(accountsOfBooks.code, postings.account))
-    .orderBy(desc(journalEntries.madeAt), asc(journalEntries.id), desc(postings.amountMinor)).limit(100);
+    .groupBy(journalEntries.id).orderBy(desc(journalEntries.madeAt), asc(journalEntries.id)).limit(30);
 }

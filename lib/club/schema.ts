@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { notesField, textField, tickField, wholeField } from '@/lib/core/fields';
+import { listingOf } from '@/lib/core/listing';
 
 const step = z.object({ hoursBefore: wholeField({ min: 0, max: 2000 }), percent: wholeField({ min: 0, max: 100 }) });
 
@@ -21,3 +22,6 @@ export const settingsInput = z.object({
     error: 'Put the steps in order, the earliest first.',
   }),
 });
+
+/** How the audit trail is asked for, as it stands in the address: newest first or oldest first. */
+export const auditInput = listingOf(['at'], { sort: 'at', order: 'desc' });

@@ -1,14 +1,17 @@
 import 'server-only';
-import { and, desc, eq, isNull, sql } from 'drizzle-orm';
+import { and, asc, desc, eq, isNotNull, isNull, sql } from 'drizzle-orm';
 import type { Queryable } from '@/db/client';
 import { paymentAttempts, payments } from '@/db/schema/books';
 import { charges, membershipClasses } from '@/db/schema/dues';
+import { gardens } from '@/db/schema/gardens';
+import { openDays, stops } from '@/db/schema/opendays';
 import { households } from '@/db/schema/people';
 import type { Id } from '@/lib/core/ids';
 import { firstOrNull } from '@/lib/core/only';
 import { Refusal } from '@/lib/core/refusal';
 import { dayOf } from '@/lib/core/time';
 import type { Ctx, MemberCtx } from '@/lib/infra/context';
+import type { LineFacts } from './rules/line';
 import { standingOf } from './rules/standing';
 import { classKey, owedMinor, termEnd } from './standing-sql';
 import { receiptNumber, type ChargeView, type DuesView, type ReceiptView } from './views';
@@ -26,6 +29,16 @@ export async function householdDues({ db, now, club }: Ctx, householdId: Id<'hou
   if (!facts) throw new Refusal('not_found');
   const standing = standingOf(facts, dayOf(now, club.timeZone), club.duesKeptOnDays);
   return { standing, charges: await chargesOf(db, householdId), receipts: await receiptsOf(db, householdId) };
+}
+
+/** What a household's line on the roll is drawn from; its standing is the caller's. Two queries. */
+export async function lineFacts({ db }: Ctx, householdId: Id<'household'>): Promise<Omit<LineFacts, 'joinedOn' | 'standing'>> {
+  const paid = await db.select({ on: payments.receivedOn, amountMinor: payments.amountMinor, method: payments.method, reference: payments.reference })
+    .from(payments).where(and(eq(payments.householdId, householdId), isNotNull(payments.chargeId))).orderBy(desc(payments.receivedOn)).limit(10);
+  const hosted = firstOrNull(await db.select({ on: openDays.heldOn, railway: gardens.railwayName })
+    .from(gardens).innerJoin(stops, eq(stops.gardenId, gardens.id)).innerJoin(openDays, eq(openDays.id, stops.openDayId))
+    .where(and(eq(gardens.householdId, householdId), isNotNull(openDays.publishedAt))).orderBy(asc(openDays.heldOn)).limit(1));
+  return { payments: paid, firstHosted: hosted };
 }
 
 async function chargesOf(db: Queryable, householdId: Id<'household'>): Promise<ChargeView[]> {

@@ -23,6 +23,7 @@ const SORTS: Record<RollSort, SQL> = {
   class: sql`${membershipClasses.position}`,
   since: sql`${households.joinedOn}`,
   number: sql`${households.memberNumber}`,
+  owed: owedMinor,
 };
 
 /** One page of the roll (or all of it, for a file), with how many lines there are. One query. */
@@ -41,7 +42,7 @@ export async function rollLines(ctx: AccountCtx, asked: Asked, extent: 'page' | 
     .limit(limit).offset(extent === 'page' ? (asked.page - 1) * PAGE_ROWS : 0);
   const lines = rows.map((row): RollLine => ({
     id: row.id, name: row.name, memberNumber: row.memberNumber, className: row.className ?? 'none yet', standing: standingOf(row, today, club.duesKeptOnDays),
-    railways: row.railways, since: Number(row.joinedOn.slice(0, 4)),
+    railways: row.railways, joinedOn: row.joinedOn, since: Number(row.joinedOn.slice(0, 4)), owedMinor: row.owedMinor,
   }));
   return { lines, total: rows[0]?.total ?? 0 };
 }

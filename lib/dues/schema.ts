@@ -14,11 +14,17 @@ export const recordPaymentInput = z.object({
   reference: optionalTextField(80),
 });
 
-export const ROLL_SORTS = ['name', 'class', 'since', 'number'] as const;
+export const ROLL_SORTS = ['name', 'class', 'since', 'number', 'owed'] as const;
 export type RollSort = (typeof ROLL_SORTS)[number];
 
 export const ROLL_FILTERS = ['all', 'paid', 'kept', 'lapsed', 'life', 'new', 'left'] as const;
 export type RollFilter = (typeof ROLL_FILTERS)[number];
 
+const firstOf = (value: unknown) => (Array.isArray(value) ? value[0] : value) ?? null;
+
 /** How the roll is asked for, as it stands in the address. */
-export const rollInput = listingOf(ROLL_SORTS, { sort: 'name', order: 'asc' }).extend({ standing: z.enum(ROLL_FILTERS).catch('all') });
+export const rollInput = listingOf(ROLL_SORTS, { sort: 'name', order: 'asc' }).extend({
+  standing: z.preprocess(firstOf, z.enum(ROLL_FILTERS).catch('all')),
+  /** The household whose row is open. */
+  open: z.preprocess(firstOf, z.uuid().nullable().catch(null)),
+});

@@ -29,7 +29,9 @@ export type RollLine = {
   className: string;
   standing: Standing;
   railways: string[];
+  joinedOn: Day;
   since: number;
+  owedMinor: number;
 };
 
 /** `2027/0318`, as receipts are numbered in letters and on pages. */

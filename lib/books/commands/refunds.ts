@@ -9,9 +9,11 @@ import { firstOrNull, only } from '@/lib/core/only';
 import { Refusal } from '@/lib/core/refusal';
 import { addMinutes } from '@/lib/core/time';
 import { CardsProblem, createRefund, findRefund, type RefundSnapshot } from '@/lib/infra/cards';
+import { findParty } from '@/lib/bookings/commands/confirm';
 import type { Ctx, SystemCtx } from '@/lib/infra/context';
 import { log } from '@/lib/infra/log';
 import { inTransaction } from '@/lib/infra/transaction';
+import { queueLetter } from '@/lib/letters/commands';
 import { nextTryMinutes, type MoneyFor } from '../rules';
 import { postEntry } from '../commands';
 
@@ -25,7 +27,7 @@ export async function oweRefund(tx: Tx, ctx: Ctx, wish: RefundWish): Promise<Ref
   if (!payment) throw new Refusal('not_found');
   if (payment.bookingId !== null) await tx.select({ id: bookings.id }).from(bookings).where(eq(bookings.id, payment.bookingId)).for('no key update');
   if (payment.chargeId !== null) await tx.select({ id: charges.id }).from(charges).where(eq(charges.id, payment.chargeId)).for('no key update');
-  const back = only(await tx.select({ sum: sql<number>`coalesce(sum(${refunds.amountMinor}) filter (where ${refunds.failedAt} is null), 0)::int` }).from(refunds).where(eq(refunds.paymentId, wish.paymentId)));
+  const back = only(await tx.select({ sum: sql<number>`coalesce(sum(${refunds.amountMinor}), 0)::int` }).from(refunds).where(eq(refunds.paymentId, wish.paymentId)));
   if (wish.amountMinor > payment.amountMinor - back.sum) throw new Refusal('refund_too_large');
   const refund = only(await tx.insert(refunds).values({
     paymentId: wish.paymentId, amountMinor: wish.amountMinor, currency: payment.currency, reason: wish.reason, askedAt: ctx.now, dueAt: ctx.now,
@@ -40,7 +42,7 @@ export async function oweRefund(tx: Tx, ctx: Ctx, wish: RefundWish): Promise<Ref
 type RefundId = (typeof refunds.$inferSelect)['id'];
 
 const due = {
-  id: refunds.id, amountMinor: refunds.amountMinor, currency: refunds.currency, tries: refunds.tries, processorId: refunds.processorId, doneAt: refunds.doneAt, failedAt: refunds.failedAt,
+  id: refunds.id, paymentId: refunds.paymentId, amountMinor: refunds.amountMinor, currency: refunds.currency, tries: refunds.tries, processorId: refunds.processorId, doneAt: refunds.doneAt, failedAt: refunds.failedAt,
   paymentIntentId: paymentAttempts.paymentIntentId, attemptId: paymentAttempts.id, chargeId: paymentAttempts.chargeId, bookingId: paymentAttempts.bookingId,
 };
 const fromCards = sql`${paymentAttempts.id} = coalesce(${refunds.attemptId}, ${payments.attemptId})`;
@@ -97,6 +99,8 @@ export async function applyRefund(ctx: SystemCtx, snapshot: RefundSnapshot): Pro
     const openDayId = refund.bookingId === null ? null : only(await tx.select({ id: bookings.openDayId }).from(bookings).where(eq(bookings.id, refund.bookingId))).id;
     await postEntry(tx, ctx, { kind: snapshot.state === 'done' ? 'refund-paid' : 'refund-failed', method: 'card', for: purpose, amountMinor: refund.amountMinor },
       { sourceId: refund.id, currency: refund.currency, openDayId });
+    const party = snapshot.state === 'done' && refund.bookingId !== null && refund.paymentId !== null ? await findParty(tx, refund.bookingId) : null;
+    if (party) await queueLetter(tx, { key: `refund:${refund.id}`, kind: 'refund', to: party.to, madeAt: ctx.now, dueAt: ctx.now, openDayId: party.openDayId, bookingId: party.bookingId, facts: { amountMinor: refund.amountMinor } });
   });
 }
 

@@ -5,7 +5,7 @@ import type { Tx } from '@/db/client';
 import { bookings, visits } from '@/db/schema/bookings';
 import { gardens } from '@/db/schema/gardens';
 import { entryTimes, openDays, stops } from '@/db/schema/opendays';
-import { findParty, queueInvitation } from '@/lib/bookings/commands/confirm';
+import { findParty } from '@/lib/bookings/commands/confirm';
 import { recordChange } from '@/lib/club/commands';
 import type { Id } from '@/lib/core/ids';
 import { firstOrNull } from '@/lib/core/only';
@@ -99,8 +99,9 @@ async function tellMoved(tx: Tx, ctx: AccountCtx, { bookingId, visitId }: Affect
   const moved = firstOrNull(await tx.update(visits).set({ version: sql`${visits.version} + 1`, movedAt: ctx.now }).where(eq(visits.id, visitId)).returning({ version: visits.version }));
   const party = await findParty(tx, bookingId);
   if (!party || !moved) return;
-  await queueLetter(tx, { key: `change:${visitId}:${moved.version}`, kind: 'change', to: party.to, madeAt: ctx.now, dueAt: ctx.now, openDayId: party.openDayId, bookingId, facts: { was: [was], ...(reason === null ? {} : { reason }) } });
-  if (party.wantsInvitations) await queueInvitation(tx, ctx, party, { id: visitId, version: moved.version }, 'change');
+  const letter = { to: party.to, madeAt: ctx.now, dueAt: ctx.now, openDayId: party.openDayId, bookingId };
+  await queueLetter(tx, { ...letter, key: `change:${visitId}:${moved.version}`, kind: 'change', facts: { was: [was], ...(reason === null ? {} : { reason }) } });
+  if (party.wantsInvitations) await queueLetter(tx, { ...letter, key: `calendar:${visitId}:${moved.version}`, kind: 'calendar', facts: { visitId } });
 }
 
 /** Closes an entry time to new parties; those who hold places keep them. */

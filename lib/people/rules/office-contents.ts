@@ -10,7 +10,6 @@ const LINES: readonly (readonly (Line & { needs: Capability })[])[] = [
   ],
   [
     { href: '/office/roll', label: 'The roll', needs: 'roll.see' },
-    { href: '/office/dues', label: 'Dues', needs: 'dues.see' },
     { href: '/office/books', label: 'The books', needs: 'books.see' },
   ],
   [

@@ -8,7 +8,7 @@ import { FactForm } from '@/components/office/open-day-forms';
 import { Table } from '@/components/ui/table';
 import { When } from '@/components/ui/when';
 import { idField } from '@/lib/core/ids';
-import { getLetter } from '@/lib/letters/queries/list';
+import { findLetter } from '@/lib/letters/queries/list';
 import { may } from '@/lib/people/rules/capabilities';
 import { pageContext } from '@/lib/web/context';
 import { OfficePage } from '../../office-page';
@@ -23,7 +23,7 @@ export default async function LetterPage({ params }: { params: Promise<{ id: str
   const ctx = await pageContext('letters.see');
   const { club } = ctx;
   const asked = paramsInput.safeParse(await params);
-  const letter = asked.success ? await getLetter(ctx, asked.data.id) : null;
+  const letter = asked.success ? await findLetter(ctx, asked.data.id) : null;
   if (!letter) notFound();
   return (
     <OfficePage
