@@ -26,25 +26,32 @@ export async function queueBookingLetter(tx: Tx, ctx: Ctx, bookingId: Id<'bookin
   if (!party) return;
   const { to, openDayId } = party;
   await queueLetter(tx, { key: `${kind}:${cause}`, kind, to, madeAt: ctx.now, dueAt: ctx.now, openDayId, bookingId, facts: {} });
-  if (!party.wantsInvitations) return;
-  const live = await tx.select({ id: visits.id, version: visits.version }).from(visits).where(and(eq(visits.bookingId, bookingId), isNull(visits.givenBackAt))).orderBy(asc(visits.id));
-  for (const visit of live) await queueInvitation(tx, ctx, { bookingId, to, openDayId }, visit, kind);
+  if (kind === 'confirmation' || party.emailIsConfirmed) await queueInvitations(tx, ctx, party, kind); // a reminder changes them only by the address
 }
 
-type Party = { bookingId: Id<'booking'>; to: { name: string; address: string }; openDayId: Id<'openDay'> };
+/** Owes a party that wants them the invitation to each live visit, or to one, as it stands when the letter goes. */
+export async function queueInvitations(tx: Tx, ctx: Ctx, party: Addressee, cause: string, visitId?: Id<'visit'>): Promise<void> {
+  if (!party.wantsInvitations) return;
+  const { bookingId, to, openDayId } = party;
+  const live = await tx.select({ id: visits.id, version: visits.version }).from(visits).where(and(eq(visits.bookingId, bookingId), isNull(visits.givenBackAt))).orderBy(asc(visits.id));
+  for (const visit of live) await queueInvitation(tx, ctx, { bookingId, to, openDayId }, visit, cause);
+}
 
-/** Owes a party the invitation to one visit as it stands when the letter is sent, or its withdrawal. */
-export async function queueInvitation(tx: Tx, ctx: Ctx, party: Party, visit: { id: Id<'visit'>; version: number }, cause: string): Promise<void> {
+/** Owes a party the invitation to one visit as it stands when the letter goes, or its withdrawal. */
+export async function queueInvitation(tx: Tx, ctx: Ctx, party: Pick<Addressee, 'bookingId' | 'to' | 'openDayId'>, visit: { id: Id<'visit'>; version: number }, cause: string): Promise<void> {
   const { bookingId, to, openDayId } = party;
   await queueLetter(tx, { key: `calendar:${visit.id}:${visit.version}:${cause}`, kind: 'calendar', to, madeAt: ctx.now, dueAt: ctx.now, openDayId, bookingId, facts: { visitId: visit.id } });
 }
 
+/** Whom to write to about a booking. */
+export type Addressee = { bookingId: Id<'booking'>; to: { name: string; address: string }; openDayId: Id<'openDay'>; wantsInvitations: boolean; emailIsConfirmed: boolean };
+
 /** Whom to write to about a booking, or null when it gave no address. */
-export async function findParty(tx: Tx, bookingId: Id<'booking'>): Promise<(Party & { wantsInvitations: boolean }) | null> {
-  const row = firstOrNull(await tx.select({ name: bookingContacts.name, email: bookingContacts.email, openDayId: bookings.openDayId, wantsInvitations: bookings.wantsInvitations })
+export async function findParty(tx: Tx, bookingId: Id<'booking'>): Promise<Addressee | null> {
+  const row = firstOrNull(await tx.select({ name: bookingContacts.name, email: bookingContacts.email, openDayId: bookings.openDayId, wantsInvitations: bookings.wantsInvitations, emailConfirmedAt: bookingContacts.emailConfirmedAt, madeBy: bookingContacts.madeBy })
     .from(bookings).innerJoin(bookingContacts, eq(bookingContacts.bookingId, bookings.id)).where(eq(bookings.id, bookingId)));
   if (!row || row.email === null) return null;
-  return { bookingId, to: { name: row.name, address: row.email }, openDayId: row.openDayId, wantsInvitations: row.wantsInvitations };
+  return { bookingId, to: { name: row.name, address: row.email }, openDayId: row.openDayId, wantsInvitations: row.wantsInvitations, emailIsConfirmed: row.emailConfirmedAt !== null || row.madeBy !== null };
 }
 
 /** Confirms places that cost nothing; a second press finds them confirmed and is content. Answers the booking's code. */
