@@ -22,7 +22,7 @@ export function BookingBody({ page, actions }: { page: BookingPage; actions: Boo
       {page.state === 'live' && live.length > 0 ? (
         <div className="mt-7 grid gap-6">
           <h2 className="sr-only">Your tickets</h2>
-          {live.map((visit) => <TicketPair key={visit.visitId} ticket={visit.ticket} />)}
+          <div className="grid items-start gap-6 lg:grid-cols-2">{live.map((visit) => <TicketPair key={visit.visitId} ticket={visit.ticket} />)}</div>
           <p className="flex flex-wrap items-center gap-5">
             <LinkButton href={`/bookings/${page.code}/print`} tone="main">Print the tickets</LinkButton>
             <span className="note">This page needs no signal once it is open.</span>

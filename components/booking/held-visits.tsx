@@ -18,19 +18,22 @@ export function HeldVisits({ hold, locale }: HeldVisitsProps) {
             <th scope="row" className="py-2 pr-4 text-left">
               <span className="flex items-center gap-3">
                 <Post stopNumber={visit.stopNumber} height={48} label={null} />
-                <span className="font-heading text-xl leading-tight font-extrabold">{visit.garden}</span>
+                <span>
+                  <span className="font-heading text-xl leading-tight font-extrabold">{visit.garden}</span>
+                  <span className="block font-normal sm:hidden"><span className="figures font-semibold">{visit.at}</span>, {visit.people}</span>
+                </span>
               </span>
             </th>
-            <td className="figures py-2 pr-4 text-xl font-semibold">{visit.at}</td>
-            <td className="hidden py-2 pr-4 sm:table-cell">{visit.people}</td>
+            <td className="figures hidden py-2 pr-4 text-xl font-semibold sm:table-cell">{visit.at}</td>
+            <td className="hidden py-2 pr-4 whitespace-nowrap sm:table-cell">{visit.people}</td>
             <td className="figures py-2 text-right">{visit.costMinor === 0 ? 'free' : <Money amountMinor={visit.costMinor} currency={hold.currency} locale={locale} />}</td>
           </tr>
         ))}
       </tbody>
       <tfoot>
         <tr>
-          <th scope="row" colSpan={2} className="py-3 text-left font-semibold sm:hidden">Together</th>
-          <th scope="row" colSpan={3} className="hidden py-3 text-left font-semibold sm:table-cell">Together</th>
+          <th scope="row" className="py-3 text-left font-semibold">Together</th>
+          <td className="hidden sm:table-cell" colSpan={2} />
           <td className="figures py-3 text-right text-xl font-bold">{hold.totalMinor === 0 ? 'free' : <Money amountMinor={hold.totalMinor} currency={hold.currency} locale={locale} />}</td>
         </tr>
       </tfoot>

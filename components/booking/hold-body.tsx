@@ -9,7 +9,7 @@ import { HeldVisits } from './held-visits';
 import { DetailsForm, HoldButton } from './hold-forms';
 import { QuietReminder } from './quiet-reminder';
 
-export type HoldActions = { pay: FormAction; keepLonger: FormAction; letGo: FormAction; keepAgain: FormAction; open: FormAction };
+export type HoldActions = { pay: FormAction; payOn: FormAction; keepLonger: FormAction; letGo: FormAction; keepAgain: FormAction; open: FormAction };
 type HoldBodyProps = { hold: HoldView; actions: HoldActions; club: { locale: string; visitRules: string }; servedAt: string };
 
 /** The hold page below its bill, by how the places stand. */
@@ -75,7 +75,7 @@ function Paying({ hold, actions, club }: HoldBodyProps) {
     <Columns split="halves">
       <Part title="A payment is open" place="first">
         <p className="mb-5 max-w-prose">Your places stay kept until {hold.keptUntil} while the card service’s page is open. Nothing is taken until you pay there, and nothing twice.</p>
-        <DetailsForm action={actions.pay} bookingId={hold.bookingId} typed={hold.typed} visitRules={club.visitRules} isPaid submit="Back to the card service’s page" />
+        <HoldButton action={actions.payOn} bookingId={hold.bookingId} submit="Go on to the card service’s page" tone="main" />
       </Part>
       <Part title="What is kept" place="first">
         <HeldVisits hold={hold} locale={club.locale} />
@@ -95,10 +95,10 @@ function Standing({ hold, club, children }: HoldBodyProps & { children: ReactNod
   );
 }
 
-const NAMES = { kept: 'Kept for you', paying: 'Kept for you', over: 'No longer kept', confirmed: 'It is yours', 'too-late': 'Paid too late' } as const;
+const NAMES = { over: 'No longer kept', confirmed: 'It is yours', 'too-late': 'Paid too late' } as const;
 
 /** The bill's words of a hold: its name and the italic line. */
 export function holdBill(hold: HoldView): { name: string; line: string; sums: string } {
-  const until = hold.state === 'kept' || hold.state === 'paying' ? `Kept for you until ${hold.keptUntil}: ${hold.where}.` : `${hold.where}.`;
-  return { name: NAMES[hold.state], line: `${hold.day.title}, ${hold.day.line}`, sums: until };
+  const name = hold.state === 'kept' || hold.state === 'paying' ? `Kept for you until ${hold.keptUntil}` : NAMES[hold.state];
+  return { name, line: `${hold.day.title}, ${hold.day.line}`, sums: `${hold.where}.` };
 }

@@ -27,6 +27,7 @@ export const ACTIONS: Readonly<Record<string, Who>> = {
   letGoAction: 'everyone',
   keepAgainAction: 'everyone',
   payAction: 'everyone',
+  payOnAction: 'everyone',
   openBookingAction: 'everyone',
   giveBackAction: BOOKING,
   changeVisitAction: BOOKING,

@@ -4,7 +4,7 @@ import { redirect } from 'next/navigation';
 import { revalidatePath } from 'next/cache';
 import { keepAgain, keepLonger, letGo } from '@/lib/bookings/commands/keeping';
 import { openBooking } from '@/lib/bookings/commands/links';
-import { payOrConfirm } from '@/lib/bookings/commands/pay';
+import { payOrConfirm, startPayment } from '@/lib/bookings/commands/pay';
 import { detailsInput, holdIdInput } from '@/lib/bookings/schema';
 import { action } from '@/lib/web/action';
 import { keepBookingLink } from '@/lib/web/cookies';
@@ -21,6 +21,8 @@ export const payAction = action({
   run: payOrConfirm,
   after: (next) => redirect('payAt' in next ? next.payAt : '/hold'),
 });
+
+export const payOnAction = action({ requires: 'browser', input: holdIdInput, run: startPayment, after: (payAt) => redirect(payAt) });
 
 export const openBookingAction = action({
   requires: 'browser',

@@ -6,7 +6,7 @@ import { NothingKept } from '@/components/booking/nothing-kept';
 import { RailRule } from '@/components/ui/rail-rule';
 import { findHold } from '@/lib/bookings/queries/hold';
 import { holderContext, pageContext } from '@/lib/web/context';
-import { keepAgainAction, keepLongerAction, letGoAction, openBookingAction, payAction } from './actions';
+import { keepAgainAction, keepLongerAction, letGoAction, openBookingAction, payAction, payOnAction } from './actions';
 
 export const metadata: Metadata = { title: 'Your places', robots: { index: false, follow: false }, referrer: 'no-referrer' };
 
@@ -20,7 +20,7 @@ export default async function HoldPage({ searchParams }: Props) {
   const { club, now } = ctx ?? await pageContext('anyone');
   if (hold === null) return <PublicSheet club={club} here="/open-days"><NothingKept /></PublicSheet>;
   const rail = hold.state === 'confirmed' ? <RailRule trainAt={1} coaches={2} /> : <RailRule state={hold.state === 'kept' || hold.state === 'paying' ? 'plain' : 'failed'} />;
-  const actions = { pay: payAction, keepLonger: keepLongerAction, letGo: letGoAction, keepAgain: keepAgainAction, open: openBookingAction };
+  const actions = { pay: payAction, payOn: payOnAction, keepLonger: keepLongerAction, letGo: letGoAction, keepAgain: keepAgainAction, open: openBookingAction };
   return (
     <PublicSheet club={club} here="/open-days">
       <Bill {...holdBill(hold)} rail={rail} />

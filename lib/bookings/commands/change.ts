@@ -30,7 +30,7 @@ export async function changeVisit(ctx: Ctx<BookingActor>, input: ChangeInput): P
     const refundMinor = percentOfMinor(price.lessMinor, refundPercent(visit.opensAt, ctx.club, ctx.now));
     await move(tx, ctx, visit, entry, { adultMinor: entry.adultMinor, childMinor: entry.childMinor, babeMinor: entry.babeMinor });
     await refundOf(tx, ctx, visit.bookingId, refundMinor, 'a cheaper entry time');
-    await queueChangeLetters(tx, ctx, visit, { version: visit.version + 1, isGone: false }, { kind: 'change', refundMinor });
+    await queueChangeLetters(tx, ctx, visit, visit.version + 1, { kind: 'change', refundMinor });
     return { refundMinor };
   });
 }
@@ -41,7 +41,7 @@ export async function moveVisit(ctx: AccountCtx, input: MoveVisitInput): Promise
     const visit = await lockVisit(tx, null, input);
     const entry = await findTarget(tx, ctx, visit, input);
     await move(tx, ctx, visit, entry, {});
-    await queueChangeLetters(tx, ctx, visit, { version: visit.version + 1, isGone: false }, { kind: 'change', refundMinor: 0, reason: input.reason });
+    await queueChangeLetters(tx, ctx, visit, visit.version + 1, { kind: 'change', refundMinor: 0, reason: input.reason });
     await recordChange(tx, ctx, {
       action: 'moved a visit', subjectKind: 'booking', subjectId: visit.bookingId,
       before: { garden: visit.garden, at: formatTime(visit.opensAt, ctx.club) }, after: { garden: entry.gardenName, at: formatTime(entry.opensAt, ctx.club), reason: input.reason },

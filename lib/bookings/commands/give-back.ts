@@ -51,7 +51,7 @@ async function take(tx: Tx, ctx: Ctx, visit: Standing, back: People, terms: { pe
   await tx.update(visits).set(isGone ? { givenBackAt: ctx.now, version } : { ...pick(left), heads, version }).where(eq(visits.id, visit.id));
   const refundMinor = percentOfMinor(costMinor(back, visit), terms.percent);
   await refundOf(tx, ctx, visit.bookingId, refundMinor, terms.reason ?? 'places given back');
-  await queueChangeLetters(tx, ctx, visit, { version, isGone }, { kind: 'given-back', refundMinor, ...(terms.reason === undefined ? {} : { reason: terms.reason }) });
+  await queueChangeLetters(tx, ctx, visit, version, { kind: 'given-back', refundMinor, ...(terms.reason === undefined ? {} : { reason: terms.reason }) });
   if (isGone) await cancelIfEmpty(tx, ctx, visit.bookingId);
   return { refundMinor };
 }

@@ -1,8 +1,7 @@
 import 'server-only';
 import { and, eq, isNotNull, isNull } from 'drizzle-orm';
 import type { Queryable } from '@/db/client';
-import { bookings } from '@/db/schema/bookings';
-import { bookingContacts } from '@/db/schema/bookings';
+import { bookingContacts, bookings } from '@/db/schema/bookings';
 import { openDays } from '@/db/schema/opendays';
 import { bearerLinks } from '@/db/schema/people';
 import type { Id } from '@/lib/core/ids';
@@ -13,6 +12,7 @@ import type { BookingActor, Ctx, HolderActor } from '@/lib/infra/context';
 import { hashSecret, newSecret } from '@/lib/infra/secrets';
 import { inTransaction } from '@/lib/infra/transaction';
 import type { HoldIdInput } from '../schema';
+import { findParty, queueInvitations } from './confirm';
 
 const LINK_DAYS = 60; // after the day, as in the letters
 
@@ -46,11 +46,21 @@ export async function revokeFeed(ctx: Ctx<BookingActor>): Promise<void> {
   await ctx.db.update(bearerLinks).set({ revokedAt: ctx.now }).where(and(eq(bearerLinks.kind, 'calendar'), eq(bearerLinks.subjectId, own.code), isNull(bearerLinks.revokedAt)));
 }
 
-/** Confirms that the letters reach the party: only for whoever followed a link that came in one. */
-export async function confirmEmail({ db, actor, now }: Ctx<BookingActor>): Promise<void> {
+/**
+ * Confirms that the letters reach the party: only for whoever followed a link that came in one. After the addresses were
+ * released, its calendar learns them now.
+ */
+export async function confirmEmail(ctx: Ctx<BookingActor>): Promise<void> {
+  const { actor, now, club } = ctx;
   if (actor.provesMailbox !== true) throw new Refusal('not_allowed', { sentence: 'Open this page from the letter we sent to that address, then press the button here.' });
-  await db.update(bookingContacts).set({ emailConfirmedAt: now }).where(and(eq(bookingContacts.bookingId, actor.bookingId), isNull(bookingContacts.emailConfirmedAt)));
+  await inTransaction(ctx.db, async (tx) => {
+    const news = await tx.update(bookingContacts).set({ emailConfirmedAt: now }).where(and(eq(bookingContacts.bookingId, actor.bookingId), isNull(bookingContacts.emailConfirmedAt))).returning({ id: bookingContacts.bookingId });
+    if (news.length === 0) return;
+    const { opensAt } = await findOwn(tx, actor.bookingId);
+    const party = now >= addMinutes(opensAt, -club.addressReleaseHours * 60) && now < opensAt ? await findParty(tx, actor.bookingId) : null;
+    if (party) await queueInvitations(tx, ctx, party, 'address');
+  });
 }
 
 const findOwn = async (db: Queryable, bookingId: Id<'booking'>) =>
-  only(await db.select({ code: bookings.code, closesAt: openDays.closesAt }).from(bookings).innerJoin(openDays, eq(openDays.id, bookings.openDayId)).where(eq(bookings.id, bookingId)));
+  only(await db.select({ code: bookings.code, opensAt: openDays.opensAt, closesAt: openDays.closesAt }).from(bookings).innerJoin(openDays, eq(openDays.id, bookings.openDayId)).where(eq(bookings.id, bookingId)));

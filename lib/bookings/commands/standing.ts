@@ -57,13 +57,13 @@ export async function refundOf(tx: Tx, ctx: Ctx, bookingId: Id<'booking'>, amoun
 }
 
 /** Owes the party the letter about a change, and the invitation that takes the visit's new state to its calendar. */
-export async function queueChangeLetters(tx: Tx, ctx: Ctx, before: Standing, after: { version: number; isGone: boolean }, said: { kind: 'change' | 'given-back'; refundMinor: number; reason?: string }): Promise<void> {
+export async function queueChangeLetters(tx: Tx, ctx: Ctx, before: Standing, version: number, said: { kind: 'change' | 'given-back'; refundMinor: number; reason?: string }): Promise<void> {
   const party = await findParty(tx, before.bookingId);
   if (!party) return;
   const { to, openDayId, bookingId } = party;
-  const key = `${before.id}:${after.version}`;
+  const key = `${before.id}:${version}`;
   const facts = { was: [inWords(before, ctx)], refundMinor: said.refundMinor, ...(said.reason === undefined ? {} : { reason: said.reason }) };
   await queueLetter(tx, { key: `${said.kind}:${key}`, kind: said.kind, to, madeAt: ctx.now, dueAt: ctx.now, openDayId, bookingId, facts });
   if (!party.wantsInvitations) return;
-  await queueLetter(tx, { key: `calendar:${key}`, kind: 'calendar', to, madeAt: ctx.now, dueAt: ctx.now, openDayId, bookingId, facts: { visitId: before.id, ...(after.isGone ? { gone: 1 } : {}) } });
+  await queueLetter(tx, { key: `calendar:${key}`, kind: 'calendar', to, madeAt: ctx.now, dueAt: ctx.now, openDayId, bookingId, facts: { visitId: before.id } });
 }

@@ -33,12 +33,12 @@ export const PAYMENT_MINUTES = 30;
 export const keptUntil = (now: Date, holdMinutes: number): Date => addMinutes(now, holdMinutes);
 
 /**
- * Until when places are kept if the party asks for longer now: another full hold from now, never past the payment
- * limit counted from the first keeping. Null when that would be no longer than it is.
+ * Until when places are kept if the party asks for longer: another full hold after the present one, never past the
+ * payment limit counted from the first keeping. Null when that would be no longer than it is.
  */
 export function keptLonger(hold: { madeAt: Date; heldUntil: Date }, now: Date, holdMinutes: number): Date | null {
   const last = addMinutes(hold.madeAt, Math.max(PAYMENT_MINUTES, holdMinutes));
-  const asked = keptUntil(now, holdMinutes);
+  const asked = keptUntil(hold.heldUntil, holdMinutes);
   const until = asked < last ? asked : last;
   return until > hold.heldUntil && until > now ? until : null;
 }

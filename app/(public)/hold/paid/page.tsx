@@ -7,7 +7,7 @@ import { Bill } from '@/components/layout/bill';
 import { RailRule } from '@/components/ui/rail-rule';
 import { findHold } from '@/lib/bookings/queries/hold';
 import { holderContext } from '@/lib/web/context';
-import { keepAgainAction, keepLongerAction, letGoAction, openBookingAction, payAction } from '../actions';
+import { keepAgainAction, keepLongerAction, letGoAction, openBookingAction, payAction, payOnAction } from '../actions';
 
 export const metadata: Metadata = { title: 'Your payment', robots: { index: false, follow: false }, referrer: 'no-referrer' };
 
@@ -17,7 +17,7 @@ export default async function PaidPage() {
   const hold = ctx === null ? null : await findHold(ctx);
   if (ctx === null || hold === null || hold.state === 'kept' || hold.state === 'over') redirect('/hold');
   const { club, now } = ctx;
-  const actions = { pay: payAction, keepLonger: keepLongerAction, letGo: letGoAction, keepAgain: keepAgainAction, open: openBookingAction };
+  const actions = { pay: payAction, payOn: payOnAction, keepLonger: keepLongerAction, letGo: letGoAction, keepAgain: keepAgainAction, open: openBookingAction };
   return (
     <PublicSheet club={club} here="/open-days">
       {hold.state === 'paying' ? <Waiting hold={hold} /> : (
