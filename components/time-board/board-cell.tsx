@@ -56,7 +56,7 @@ export function Cell(props: CellProps) {
 }
 
 function timesOf(board: BoardView, column: number, run: Run | null): string {
-  const text = (each: number) => board.columns[each]?.text ?? '';
+  const text = (each: number) => (board.columns[each]?.text ?? '').replace(' ', '\u00a0');
   if (run === null) return text(column);
   return run.to === run.from + 1 ? `${text(run.from)}, ${text(run.to)}` : `${text(run.from)}–${text(run.to)}`;
 }
@@ -121,7 +121,7 @@ function Yours({ cell, isGone, people }: { cell: BoardCell; isGone: boolean; peo
   return (
     <>
       <span className={styles.mine} aria-hidden="true">{isGone ? 'gone: choose another' : `yours, ${counted(people, 'person', 'people')}`}</span>
-      <span className={styles.mineWide} aria-hidden="true"><b>{cell.opensText}</b>{isGone ? 'gone' : `${people} of us`}</span>
+      <span className={styles.mineWide} aria-hidden="true"><b>{cell.opensText.split(' ')[0]}</b>{isGone ? 'gone' : `${people} of us`}</span>
     </>
   );
 }

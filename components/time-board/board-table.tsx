@@ -39,13 +39,16 @@ export function BoardTable({ board, states, chosen, day, heads, people, caption,
   };
   const tabStopOf = (row: number): number => {
     const kept = tabStops[board.stops[row]?.stopId ?? ''];
-    if (kept !== undefined && canFocus(states[row]?.[kept])) return kept;
-    return states[row]?.findIndex(canFocus) ?? -1;
+    if (kept === undefined || !canFocus(states[row]?.[kept])) return states[row]?.findIndex(canFocus) ?? -1;
+    const run = runsOf(board, states[row] ?? [], row).find((each) => each.from <= kept && kept <= each.to);
+    const isFolded = run !== undefined && run.to > run.from && !opened.includes(board.rows[row]?.[kept]?.entryTimeId ?? '');
+    return isFolded ? run.from : kept; // a narrow sheet shows only the first of a folded run
   };
   return (
     <table
       role="table"
       className={styles.table}
+      data-clock={board.columns.some((column) => column.text.includes(' ')) ? 'h12' : 'h23'}
       onKeyDown={(event) => { if (event.key === 'Escape') setAsked(null); else moveByArrows(event, board.stops.length, board.columns.length); }}
       onFocus={(event) => rememberStop(event.target, board, setTabStops)}
       onBlur={(event) => { if (event.relatedTarget instanceof Element && !event.relatedTarget.closest('[data-asked]')) setAsked(null); }}

@@ -14,9 +14,9 @@ export type Graph = {
 const FIRST_Y = 62;
 const FOOT = 54;
 /** Gardens down are spaced by travel minutes, between what its words need and what a page can give. */
-const spaceFor = (minutes: number) => Math.min(170, 80 + minutes * 4);
+const spaceFor = (minutes: number) => Math.min(180, 92 + minutes * 4);
 /** Past this share of the scale words stand to the left of what they name. */
-const LATE = 0.62;
+const LATE = 0.48;
 
 /** The scale across: the first start under the middle of the first column, the last under that of the last. */
 function scaleOf({ columns }: BoardView): (minute: number) => number {
