@@ -3,7 +3,7 @@ import type { classDues, membershipClasses } from '@/db/schema/dues';
 import { ZONE } from './calendar';
 
 export const CLUB = {
-  name: 'Alder Fork Garden Railway Society', footLine: 'Alder Fork Garden Railway Society, founded in a potting shed in 1983', email: 'gate@alderfork.example', timeZone: ZONE, currency: 'USD', locale: 'en-US', hourCycle: 'h23',
+  name: 'Alder Fork Garden Railway Society', footLine: 'founded in a potting shed in 1983', email: 'gate@alderfork.example', timeZone: ZONE, currency: 'USD', locale: 'en-US', hourCycle: 'h23',
   holdMinutes: 10, partyPeopleMax: 9, partyVisitsMax: 7, babesTakePlace: false, addressReleaseHours: 72, changesEndMinutes: 60, duesKeptOnDays: 45,
   refundRules: [{ hoursBefore: 168, percent: 100 }, { hoursBefore: 48, percent: 50 }],
   visitRules: 'Stay on the path and off the track. Ask before you touch a train. Children stay with their grown-ups. No smoking near the gas or the dry grass. What the host says goes, and so do you when the bell rings.',
