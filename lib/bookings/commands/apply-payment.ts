@@ -1,5 +1,5 @@
 import 'server-only';
-import { and, eq, isNull, sql } from 'drizzle-orm';
+import { and, eq, sql } from 'drizzle-orm';
 import type { Tx } from '@/db/client';
 import { bookings, visits } from '@/db/schema/bookings';
 import { cardPayments, paymentAttempts, payments, refunds } from '@/db/schema/books';
@@ -28,30 +28,33 @@ export type Applied = 'confirmed' | 'refunded' | 'expired' | 'kept';
 export async function applyPayment(ctx: SystemCtx, snapshot: SessionSnapshot): Promise<Applied> {
   if (!snapshot.isPaid && snapshot.status !== 'expired') return 'kept';
   return inTransaction(ctx.db, async (tx) => {
-    const attempt = await lockAttempt(tx, snapshot);
-    if (!attempt) {
+    const locked = await lockPaid(tx, snapshot);
+    if (!locked) {
       log.warn('payment of no attempt of ours', { session: snapshot.sessionId.slice(0, 12) });
       return 'kept';
     }
-    return snapshot.isPaid ? applyPaid(tx, ctx, attempt, snapshot) : expireAttempt(tx, ctx, attempt);
+    return snapshot.isPaid ? applyPaid(tx, ctx, locked, snapshot) : expireAttempt(tx, ctx, locked);
   });
 }
 
 type Attempt = { id: Id<'attempt'>; bookingId: Id<'booking'> | null; chargeId: Id<'charge'> | null; amountMinor: number; currency: string; endedAt: Date | null };
-type Booking = { id: Id<'booking'>; openDayId: Id<'openDay'>; householdId: Id<'household'> | null; confirmedAt: Date | null; releasedAt: Date | null; cancelledAt: Date | null };
+type Booking = { id: Id<'booking'>; openDayId: Id<'openDay'>; householdId: Id<'household'> | null; heldUntil: Date; confirmedAt: Date | null; releasedAt: Date | null };
+type Locked = { attempt: Attempt; booking: Booking | null };
 
 const attemptFacts = { id: paymentAttempts.id, bookingId: paymentAttempts.bookingId, chargeId: paymentAttempts.chargeId, amountMinor: paymentAttempts.amountMinor, currency: paymentAttempts.currency, endedAt: paymentAttempts.endedAt };
+const bookingFacts = { id: bookings.id, openDayId: bookings.openDayId, householdId: bookings.householdId, heldUntil: bookings.heldUntil, confirmedAt: bookings.confirmedAt, releasedAt: bookings.releasedAt };
 
-/** The attempt a session belongs to, locked after its booking. */
-async function lockAttempt(tx: Tx, snapshot: SessionSnapshot): Promise<Attempt | null> {
-  const known = firstOrNull(await tx.select(attemptFacts).from(paymentAttempts)
+/** The attempt a session belongs to and its booking, both read under their locks, the booking's first. */
+async function lockPaid(tx: Tx, snapshot: SessionSnapshot): Promise<Locked | null> {
+  const known = firstOrNull(await tx.select({ id: paymentAttempts.id, bookingId: paymentAttempts.bookingId }).from(paymentAttempts)
     .where(sql`${paymentAttempts.sessionId} = ${snapshot.sessionId} or (${paymentAttempts.sessionId} is null and ${paymentAttempts.id}::text = ${snapshot.attemptId ?? ''})`));
   if (!known) return null;
-  if (known.bookingId !== null) await tx.select({ id: bookings.id }).from(bookings).where(eq(bookings.id, known.bookingId)).for('no key update');
-  return firstOrNull(await tx.select(attemptFacts).from(paymentAttempts).where(eq(paymentAttempts.id, known.id)).for('no key update'));
+  const booking = known.bookingId === null ? null : only(await tx.select(bookingFacts).from(bookings).where(eq(bookings.id, known.bookingId)).for('no key update'));
+  const attempt = only(await tx.select(attemptFacts).from(paymentAttempts).where(eq(paymentAttempts.id, known.id)).for('no key update'));
+  return { attempt, booking };
 }
 
-async function applyPaid(tx: Tx, ctx: SystemCtx, attempt: Attempt, snapshot: SessionSnapshot): Promise<Applied> {
+async function applyPaid(tx: Tx, ctx: SystemCtx, { attempt, booking }: Locked, snapshot: SessionSnapshot): Promise<Applied> {
   if (snapshot.paymentIntentId === null || snapshot.amountMinor !== attempt.amountMinor || snapshot.currency !== attempt.currency) {
     log.error('payment of another amount or currency', new Error('payment does not match its attempt'), { attempt: attempt.id });
     return 'kept';
@@ -61,7 +64,7 @@ async function applyPaid(tx: Tx, ctx: SystemCtx, attempt: Attempt, snapshot: Ses
   }).onConflictDoNothing().returning({ id: cardPayments.id });
   if (isNews.length === 0) return 'kept';
   await tx.update(paymentAttempts).set({ endedAt: attempt.endedAt ?? ctx.now, outcome: 'paid', paymentIntentId: snapshot.paymentIntentId, sessionId: snapshot.sessionId }).where(eq(paymentAttempts.id, attempt.id));
-  const placed = attempt.bookingId === null ? await settleDues(tx, ctx, attempt) : await settleBooking(tx, ctx, attempt, attempt.bookingId);
+  const placed = booking === null ? await settleDues(tx, ctx, attempt) : await settleBooking(tx, ctx, attempt, booking);
   if (!placed) await sendAllBack(tx, ctx, attempt);
   return placed ? 'confirmed' : 'refunded';
 }
@@ -79,16 +82,14 @@ async function settleDues(tx: Tx, ctx: Ctx, attempt: Attempt): Promise<boolean> 
 }
 
 /** Confirms the booking and books the money; places that were given back are taken again if they are there. False when they are gone. */
-async function settleBooking(tx: Tx, ctx: Ctx, attempt: Attempt, bookingId: Id<'booking'>): Promise<boolean> {
-  const booking: Booking = only(await tx.select({ id: bookings.id, openDayId: bookings.openDayId, householdId: bookings.householdId, confirmedAt: bookings.confirmedAt, releasedAt: bookings.releasedAt, cancelledAt: bookings.cancelledAt })
-    .from(bookings).where(eq(bookings.id, bookingId)));
+async function settleBooking(tx: Tx, ctx: Ctx, attempt: Attempt, booking: Booking): Promise<boolean> {
   if (booking.confirmedAt !== null) return false; // paid twice: the second payment goes back
-  if (booking.releasedAt !== null && !(await takeAgain(tx, ctx.now, bookingId, booking.releasedAt))) return false;
-  await confirmBooking(tx, ctx, bookingId);
+  if (booking.releasedAt !== null && !(await takeAgain(tx, ctx.now, booking.id, booking.releasedAt))) return false;
+  await confirmBooking(tx, ctx, booking.id);
   const receivedOn = dayOf(ctx.now, ctx.club.timeZone);
   const receipt = await nextReceipt(tx, Number(receivedOn.slice(0, 4)));
   const payment = only(await tx.insert(payments).values({
-    bookingId, householdId: booking.householdId, method: 'card', amountMinor: attempt.amountMinor, currency: attempt.currency, receivedOn,
+    bookingId: booking.id, householdId: booking.householdId, method: 'card', amountMinor: attempt.amountMinor, currency: attempt.currency, receivedOn,
     attemptId: attempt.id, receiptYear: receipt.year, receiptNumber: receipt.number, recordedAt: ctx.now,
   }).returning({ id: payments.id }));
   await postEntry(tx, ctx, { kind: 'received', method: 'card', for: 'tickets', amountMinor: attempt.amountMinor },
@@ -132,11 +133,9 @@ async function sendAllBack(tx: Tx, ctx: Ctx, attempt: Attempt): Promise<void> {
 }
 
 /** The processor says that the session expired unpaid: the attempt ends, and the places are free if the party's time is up. */
-export async function expireAttempt(tx: Tx, ctx: Ctx, attempt: Attempt): Promise<Applied> {
+async function expireAttempt(tx: Tx, ctx: Ctx, { attempt, booking }: Locked): Promise<Applied> {
   if (attempt.endedAt !== null) return 'kept'; // a late word after "paid" changes nothing
-  await tx.update(paymentAttempts).set({ endedAt: ctx.now, outcome: 'expired' }).where(and(eq(paymentAttempts.id, attempt.id), isNull(paymentAttempts.endedAt)));
-  if (attempt.bookingId === null) return 'expired';
-  const booking = only(await tx.select({ heldUntil: bookings.heldUntil, confirmedAt: bookings.confirmedAt, releasedAt: bookings.releasedAt }).from(bookings).where(eq(bookings.id, attempt.bookingId)));
-  if (booking.confirmedAt === null && booking.releasedAt === null && booking.heldUntil <= ctx.now) await releaseHold(tx, attempt.bookingId, ctx.now);
+  await tx.update(paymentAttempts).set({ endedAt: ctx.now, outcome: 'expired' }).where(eq(paymentAttempts.id, attempt.id));
+  if (booking && booking.confirmedAt === null && booking.releasedAt === null && booking.heldUntil <= ctx.now) await releaseHold(tx, booking.id, ctx.now);
   return 'expired';
 }
