@@ -2,6 +2,7 @@
 // Add a domain: import its `work` here and put it into the list.
 import * as bookings from '../../lib/bookings/work';
 import * as books from '../../lib/books/work';
+import * as club from '../../lib/club/work';
 import * as letters from '../../lib/letters/work';
 
 /** What `lib/<domain>/work.ts` exports: what is done for each job, and what looks every 15 seconds for rows that are due. */
@@ -10,7 +11,7 @@ export type Work = {
   sweeps?: (() => Promise<void>)[];
 };
 
-const domains: Work[] = [bookings, books, letters];
+const domains: Work[] = [bookings, books, club, letters];
 
 /** Every domain's tasks by name; two domains with one name is a mistake that stops the worker. */
 export function allTasks(): Work['tasks'] {
