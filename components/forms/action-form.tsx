@@ -92,7 +92,7 @@ export function ActionForm({ action, schema, values, submit, sending = 'One mome
             {submit}
           </Button>
           {aside}
-          <span role="status" className="note">
+          <span role="status" className="note empty:-ml-5">
             {isPending ? sending : null}
           </span>
         </div>

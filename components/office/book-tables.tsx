@@ -68,7 +68,7 @@ export function RefundTable({ caption, rows, club, empty, settle }: RefundTableP
       rowKey={(row) => row.id}
       empty={empty}
       columns={[
-        { key: 'asked', head: 'Given back', names: 'row', cell: (row) => <When at={row.askedAt} club={club} style="short" /> },
+        { key: 'asked', head: 'When', names: 'row', cell: (row) => <When at={row.askedAt} club={club} style="short" /> },
         { key: 'why', head: 'Why', cell: (row) => row.reason },
         { key: 'how', head: 'So far', cell: (row) => <RefundState refund={row} club={club} /> },
         { key: 'amount', head: 'Amount', set: 'figures', cell: (row) => <Amount minor={row.amountMinor} club={club} /> },

@@ -8,12 +8,12 @@ const head = 'border-b-[1.5px] border-ink px-2 pt-1 pb-1.5 align-bottom font-sem
 export function PlacesTable({ rows, stops, club }: { rows: readonly PlaceRow[]; stops: readonly OfficeStop[]; club: ClubTime }) {
   return (
     <div className="scroll-frame" role="region" aria-label="Places by entry time and garden" tabIndex={0}>
-      <table className="w-full border-collapse" style={{ minWidth: `${8 + stops.length * 4.2}rem` }}>
+      <table className="w-full border-collapse" style={{ minWidth: `${8 + stops.length * 5.2}rem` }}>
         <caption className="sr-only">Places taken of those there are, by entry time and garden</caption>
         <thead>
           <tr>
             <th scope="col" className={`${head} pl-0 text-left`}>Start</th>
-            {stops.map((stop) => <th key={stop.id} scope="col" className={`${head} text-right leading-tight`}>{stop.number} {stop.shortName}</th>)}
+            {stops.map((stop) => <th key={stop.id} scope="col" className={`${head} text-right leading-tight break-normal`}>{stop.number} {stop.shortName}</th>)}
             <th scope="col" className={`${head} pr-0 text-right`}>People</th>
           </tr>
         </thead>

@@ -11,7 +11,7 @@ export function StopsTable({ stops, path }: { stops: readonly OfficeStop[]; path
       rows={stops}
       rowKey={(stop) => stop.id}
       rowId={(stop) => `stop-${stop.number}`}
-      empty={<>No garden takes part yet. <Link className="link" href={`${path}/plan#add`}>Add the first</Link></>}
+      empty="No garden takes part yet."
       columns={[
         { key: 'number', head: 'Stop', cell: (stop) => <span className="flex items-baseline gap-2"><NipCard stopNumber={stop.number} width={38} />{stop.number}</span> },
         { key: 'garden', head: 'Garden', names: 'row', cell: (stop) => <Link className="link" href={`${path}/stops/${stop.number}`}>{stop.garden}</Link> },

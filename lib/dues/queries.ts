@@ -11,7 +11,7 @@ import { firstOrNull } from '@/lib/core/only';
 import { Refusal } from '@/lib/core/refusal';
 import { dayOf } from '@/lib/core/time';
 import type { Ctx, MemberCtx } from '@/lib/infra/context';
-import type { LineFacts } from './rules/line';
+import { lineOf, type LineFacts, type Station } from './rules/line';
 import { standingOf } from './rules/standing';
 import { classKey, owedMinor, termEnd } from './standing-sql';
 import { receiptNumber, type ChargeView, type DuesView, type ReceiptView } from './views';
@@ -21,6 +21,11 @@ export async function memberDues(ctx: MemberCtx): Promise<DuesView> {
   return householdDues(ctx, ctx.actor.householdId);
 }
 
+/** The acting household's line: its dated facts and how it stands. */
+export async function memberLine(ctx: MemberCtx, { joinedOn, standing }: DuesView): Promise<Station[]> {
+  return lineOf({ joinedOn, standing, ...(await lineFacts(ctx, ctx.actor.householdId)) }, dayOf(ctx.now, ctx.club.timeZone), ctx.club);
+}
+
 /** One household's dues, for an officer or for itself. Three queries. */
 export async function householdDues({ db, now, club }: Ctx, householdId: Id<'household'>): Promise<DuesView> {
   const facts = firstOrNull(await db.select({
@@ -28,11 +33,11 @@ export async function householdDues({ db, now, club }: Ctx, householdId: Id<'hou
   }).from(households).leftJoin(membershipClasses, sql`${membershipClasses.key} = ${classKey}`).where(eq(households.id, householdId)));
   if (!facts) throw new Refusal('not_found');
   const standing = standingOf(facts, dayOf(now, club.timeZone), club.duesKeptOnDays);
-  return { standing, charges: await chargesOf(db, householdId), receipts: await receiptsOf(db, householdId) };
+  return { joinedOn: facts.joinedOn, standing, charges: await chargesOf(db, householdId), receipts: await receiptsOf(db, householdId) };
 }
 
 /** What a household's line on the roll is drawn from; its standing is the caller's. Two queries. */
-export async function lineFacts({ db }: Ctx, householdId: Id<'household'>): Promise<Omit<LineFacts, 'joinedOn' | 'standing'>> {
+export async function lineFacts({ db }: Pick<Ctx, 'db'>, householdId: Id<'household'>): Promise<Omit<LineFacts, 'joinedOn' | 'standing'>> {
   const paid = await db.select({ on: payments.receivedOn, amountMinor: payments.amountMinor, method: payments.method, reference: payments.reference })
     .from(payments).where(and(eq(payments.householdId, householdId), isNotNull(payments.chargeId))).orderBy(desc(payments.receivedOn)).limit(10);
   const hosted = firstOrNull(await db.select({ on: openDays.heldOn, railway: gardens.railwayName })

@@ -19,7 +19,7 @@ export type ChargeView = {
 export type ReceiptView = { id: Id<'payment'>; number: string; method: Method; amountMinor: number; receivedOn: Day; termTo: Day | null };
 
 /** A household's dues: how it stands, what it was asked, what it paid. */
-export type DuesView = { standing: Standing; charges: ChargeView[]; receipts: ReceiptView[] };
+export type DuesView = { joinedOn: Day; standing: Standing; charges: ChargeView[]; receipts: ReceiptView[] };
 
 /** One line of the roll. */
 export type RollLine = {

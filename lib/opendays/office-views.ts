@@ -1,4 +1,6 @@
 import type { Id } from '@/lib/core/ids';
+import type { Role } from '@/lib/core/words';
+import { may, type Capability } from '@/lib/people/rules/capabilities';
 
 type Row = {
   stopId: Id<'stop'>; number: number; garden: string; shortName: string; stayMinutes: number; headsLimit: number; hostLimit: number;
@@ -47,19 +49,21 @@ export function sumsOf(stops: readonly OfficeStop[]) {
 }
 
 type DayLine = { slug: string; parties: number; passes: number; lettersWritten: number };
+type ContentsLine = { href: string; label: string; count?: number };
 
-/** The contents of one open day: the day, its stops, its gates, its letters, its bookings. */
-export const dayContents = (day: DayLine, stops: readonly { number: number; shortName: string; times: readonly unknown[] }[]) => {
+/** The contents of one open day that someone with these roles may open: the day, its stops, its gates, its letters, its bookings. */
+export function dayContents(day: DayLine, stops: readonly { number: number; shortName: string; times: readonly unknown[] }[], roles: readonly Role[]): ContentsLine[] {
   const path = `/office/open-days/${day.slug}`;
-  return [
-    { href: path, label: 'The day' },
-    { href: `${path}/plan`, label: 'Words, hours, prices' },
-    ...stops.map((stop) => ({ href: `${path}/stops/${stop.number}`, label: `${stop.number} ${stop.shortName}`, count: stop.times.length })),
-    { href: `${path}/gates`, label: 'Gates', count: day.passes },
-    { href: `${path}/letter`, label: 'Letters to parties', count: day.lettersWritten },
-    { href: `/office/bookings?day=${day.slug}`, label: 'Bookings', count: day.parties },
+  const lines: (ContentsLine & { needs: Capability })[] = [
+    { href: path, label: 'The day', needs: 'openDays.see' },
+    { href: `${path}/plan`, label: 'Words, hours, prices', needs: 'openDays.edit' },
+    ...stops.map((stop) => ({ href: `${path}/stops/${stop.number}`, label: `${stop.number} ${stop.shortName}`, count: stop.times.length, needs: 'openDays.see' as const })),
+    { href: `${path}/gates`, label: 'Gates', count: day.passes, needs: 'gates.edit' },
+    { href: `${path}/letter`, label: 'Letters to parties', count: day.lettersWritten, needs: 'letters.send' },
+    { href: `/office/bookings?day=${day.slug}`, label: 'Bookings', count: day.parties, needs: 'bookings.see' },
   ];
-};
+  return lines.filter((line) => may(roles, line.needs)).map(({ href, label, count }) => ({ href, label, ...(count === undefined ? {} : { count }) }));
+}
 
 type Moving = { entryTimeId: Id<'entryTime'>; heads: number };
 

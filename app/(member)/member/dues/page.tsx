@@ -3,12 +3,12 @@ import Link from 'next/link';
 import { Bill } from '@/components/layout/bill';
 import { Part } from '@/components/layout/columns';
 import { PayDuesForm } from '@/components/member/forms';
+import { HouseholdLine } from '@/components/member/household-line';
 import { StandingLine } from '@/components/member/standing-line';
 import { Money } from '@/components/ui/money';
-import { RailRule } from '@/components/ui/rail-rule';
 import { When } from '@/components/ui/when';
 import { formatMoney } from '@/lib/core/money';
-import { memberDues } from '@/lib/dues/queries';
+import { memberDues, memberLine } from '@/lib/dues/queries';
 import type { ChargeView } from '@/lib/dues/views';
 import { pageContext } from '@/lib/web/context';
 import { MemberPage } from '../member-page';
@@ -21,19 +21,23 @@ const METHOD = { card: 'by card', cheque: 'by cheque', cash: 'in cash', transfer
 export default async function DuesPage({ searchParams }: { searchParams: Promise<{ paid?: string }> }) {
   const ctx = await pageContext('member');
   const { club } = ctx;
-  const { standing, charges, receipts } = await memberDues(ctx);
+  const dues = await memberDues(ctx);
+  const { standing, charges, receipts } = dues;
+  const stations = await memberLine(ctx, dues);
   const { paid } = await searchParams;
   const owing = charges.filter((charge) => charge.paidMinor < charge.amountMinor);
   return (
     <MemberPage ctx={ctx} here="/member/dues">
-      <Bill name="My dues" line={<StandingLine standing={standing} club={club} />} sums={paid === undefined ? undefined : <Back isSettled={owing.length === 0} />} />
+      <Bill name="My dues" line={<StandingLine standing={standing} club={club} />} {...(paid === undefined ? {} : { sums: <Back isSettled={owing.length === 0} /> })} />
       <Part title="To pay" place="first">
         {owing.length === 0 ? <p>Nothing is owed.</p> : owing.map((charge) => <Owing key={charge.id} charge={charge} club={club} />)}
       </Part>
+      <Part title="My line">
+        <HouseholdLine stations={stations} club={club} />
+      </Part>
       <Part title="Receipts">
-        {receipts.length === 0 ? <RailRule state="empty" /> : null}
         {receipts.length === 0 ? <p>No payment has come yet. The first makes the first receipt.</p> : null}
-        <ul className="border-t border-rule">
+        <ul className={receipts.length === 0 ? '' : 'border-t border-rule'}>
           {receipts.map((receipt) => (
             <li key={receipt.id} className="flex flex-wrap items-baseline gap-x-5 border-b border-rule py-2">
               <Link className="link inline-flex min-h-11 items-center font-mono" href={`/member/dues/receipts/${receipt.id}`}>{receipt.number}</Link>

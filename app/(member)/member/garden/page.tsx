@@ -15,8 +15,8 @@ export default async function GardenPage() {
   const days = byEntryTime(await comingToMyGardens(ctx));
   return (
     <MemberPage ctx={ctx} here="/member/garden">
-      <Bill name="Who is coming" line="By entry time; names and numbers only" />
-      {days.length === 0 ? <Nobody /> : null}
+      <Bill name="Who is coming" line="By entry time; names and numbers only" {...(days.length === 0 ? { rail: <RailRule state="empty" /> } : {})} />
+      {days.length === 0 ? <p className="mt-6">Your garden takes part in no open day yet. The coordinator sets the days and the times.</p> : null}
       {days.map((day, index) => (
         <Part key={day.key} title={day.garden} place={index === 0 ? 'first' : 'next'}>
           <p className="mb-3">
@@ -34,14 +34,5 @@ export default async function GardenPage() {
         </Part>
       ))}
     </MemberPage>
-  );
-}
-
-function Nobody() {
-  return (
-    <>
-      <RailRule state="empty" />
-      <p>Your garden takes part in no open day yet. The coordinator sets the days and the times.</p>
-    </>
   );
 }

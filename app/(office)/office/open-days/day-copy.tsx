@@ -24,7 +24,7 @@ export function DayCopy({ ctx, copy: { day, stops, notes }, here, bill, toSettle
     <OfficePage
       ctx={ctx}
       here={here}
-      own={dayContents(day, stops)}
+      own={dayContents(day, stops, ctx.actor.roles)}
       bill={bill}
       notes={notes.map((note) => ({
         id: note.id, text: note.note, by: note.initials, on: <When at={note.at} show="day" style="bare" club={ctx.club} />,

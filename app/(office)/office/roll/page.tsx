@@ -2,7 +2,7 @@ import type { Metadata } from 'next';
 import { Bill } from '@/components/layout/bill';
 import { CsvLink } from '@/components/office/csv-link';
 import { FindForm } from '@/components/office/find-form';
-import { HouseholdLine } from '@/components/office/household-line';
+import { HouseholdLine } from '@/components/member/household-line';
 import { Pages } from '@/components/office/pages';
 import { RollSums } from '@/components/office/roll-sums';
 import { RollTable } from '@/components/office/roll-table';

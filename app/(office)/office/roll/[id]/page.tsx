@@ -5,7 +5,7 @@ import { z } from 'zod';
 import { Bill } from '@/components/layout/bill';
 import { Part } from '@/components/layout/columns';
 import { StandingLine } from '@/components/member/standing-line';
-import { HouseholdLine } from '@/components/office/household-line';
+import { HouseholdLine } from '@/components/member/household-line';
 import { RecordPaymentForm } from '@/components/office/record-payment-form';
 import { Money } from '@/components/ui/money';
 import { Table } from '@/components/ui/table';

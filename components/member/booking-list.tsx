@@ -1,0 +1,35 @@
+import Link from 'next/link';
+import { NipCard } from '@/components/drawing/nip';
+import { When } from '@/components/ui/when';
+import type { MyBooking } from '@/lib/bookings/rules/my-visits';
+import type { ClubTime, Day } from '@/lib/core/time';
+
+type Visit = { id: string; code: string; day: string; heldOn: Day; garden: string; number: number; opensAt: Date; people: number; givenBackAt: Date | null; isToCome: boolean };
+type BookingListProps = { bookings: readonly MyBooking<Visit>[]; club: ClubTime; link: string };
+
+/** A household's bookings, each a small timetable with the way to its tickets. */
+export function BookingList({ bookings, club, link }: BookingListProps) {
+  return bookings.map((booking) => (
+    <section key={booking.code} aria-label={`${booking.day}, booking ${booking.code}`} className="mb-7">
+      <h3>{booking.day}</h3>
+      <p className="note mb-2 text-lg"><When on={booking.heldOn} club={club} /></p>
+      <ul className="border-t-2 border-ink">
+        {booking.visits.map((visit) => <VisitLine key={visit.id} visit={visit} club={club} />)}
+      </ul>
+      <Link className="link inline-flex min-h-11 items-center" href={`/bookings/${booking.code}`}>{link}<span className="sr-only">: {booking.day}</span></Link>
+    </section>
+  ));
+}
+
+function VisitLine({ visit, club }: { visit: Visit; club: ClubTime }) {
+  return (
+    <li className="flex flex-wrap items-baseline gap-x-5 border-b border-rule py-2">
+      <strong className="w-20 font-mono"><When at={visit.opensAt} show="time" club={club} /></strong>
+      <NipCard stopNumber={visit.number} width={38} />
+      <span className={visit.givenBackAt === null ? 'font-semibold' : ''}>{visit.number} {visit.garden}</span>
+      <span className="ml-auto text-ink-soft">
+        {visit.givenBackAt === null ? `${visit.people} ${visit.people === 1 ? 'person' : 'people'}` : <>given back on <When at={visit.givenBackAt} show="day" style="bare" club={club} /></>}
+      </span>
+    </li>
+  );
+}
