@@ -8,7 +8,8 @@ import { findHold } from '@/lib/bookings/queries/hold';
 import { holderContext, pageContext } from '@/lib/web/context';
 import { keepAgainAction, keepLongerAction, letGoAction, openBookingAction, payAction, payOnAction } from './actions';
 
-export const metadata: Metadata = { title: 'Your places', robots: { index: false, follow: false }, referrer: 'no-referrer' };
+// Not `no-referrer`: a form posted without JavaScript would then carry `Origin: null` (Fetch standard, "serializing a request origin") and be turned away.
+export const metadata: Metadata = { title: 'Your places', robots: { index: false, follow: false }, referrer: 'same-origin' };
 
 type Props = { searchParams: Promise<Record<string, string | string[] | undefined>> };
 

@@ -7,7 +7,7 @@ import { showBooking } from '@/lib/bookings/commands/show-booking';
 import { pageContext } from '@/lib/web/context';
 import { changeVisitAction, confirmEmailAction, giveBackAction, makeFeedAction, revokeFeedAction } from './actions';
 
-export const metadata: Metadata = { title: 'Your tickets', robots: { index: false, follow: false }, referrer: 'no-referrer' };
+export const metadata: Metadata = { title: 'Your tickets', robots: { index: false, follow: false }, referrer: 'same-origin' };
 
 /** A party's own page, for whoever followed its private link, and for its household signed in. */
 export default async function BookingPage({ params }: { params: Promise<{ code: string }> }) {

@@ -9,7 +9,7 @@ import { findHold } from '@/lib/bookings/queries/hold';
 import { holderContext } from '@/lib/web/context';
 import { keepAgainAction, keepLongerAction, letGoAction, openBookingAction, payAction, payOnAction } from '../actions';
 
-export const metadata: Metadata = { title: 'Your payment', robots: { index: false, follow: false }, referrer: 'no-referrer' };
+export const metadata: Metadata = { title: 'Your payment', robots: { index: false, follow: false }, referrer: 'same-origin' };
 
 /** Where the card service sends the payer: it only reads, waits for the signed word, and tells the truth. */
 export default async function PaidPage() {

@@ -5,7 +5,7 @@ import { pageContext } from '@/lib/web/context';
 import { PublicSheet } from '../../../public-sheet';
 import { signInWithLinkAction } from '../../actions';
 
-export const metadata: Metadata = { title: 'Sign in', referrer: 'no-referrer', robots: { index: false } };
+export const metadata: Metadata = { title: 'Sign in', referrer: 'same-origin', robots: { index: false } };
 
 /** Where a letter's link lands. Opening it changes nothing: mail scanners open links, only people press buttons. */
 export default async function SignInLinkPage({ params }: { params: Promise<{ secret: string }> }) {
