@@ -45,3 +45,24 @@ export async function startCards(settings: { file?: string } = {}) {
 }
 
 export type CardsStandIn = Awaited<ReturnType<typeof startCards>>;
+
+/** A session's parameters as a club sends them: two adults and a child, 15 dollars. */
+export const wanted = (over: Partial<Stripe.Checkout.SessionCreateParams> = {}): Stripe.Checkout.SessionCreateParams => ({
+  mode: 'payment',
+  line_items: [
+    { quantity: 2, price_data: { currency: 'usd', unit_amount: 600, product_data: { name: 'Saltmarsh, 10:30, adult' } } },
+    { quantity: 1, price_data: { currency: 'usd', unit_amount: 300, product_data: { name: 'Saltmarsh, 10:30, child' } } },
+  ],
+  success_url: 'http://127.0.0.1:9/back?session={CHECKOUT_SESSION_ID}',
+  cancel_url: 'http://127.0.0.1:9/hold',
+  metadata: { attempt: 'a-1' },
+  payment_intent_data: { metadata: { attempt: 'a-1' } },
+  ...over,
+});
+
+/** The processor's refusal, as the SDK throws it. */
+export async function whyNot(act: Promise<unknown>): Promise<Stripe.errors.StripeError> {
+  const error: unknown = await act.then(() => null, (thrown: unknown) => thrown);
+  if (!(error instanceof Stripe.errors.StripeError)) throw new Error('it was not refused', { cause: error });
+  return error;
+}
