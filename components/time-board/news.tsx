@@ -7,7 +7,7 @@ export function goneSentence(board: BoardView, states: CellState[][], chosen: re
   const gone = chosen.filter((cell) => { const state = states[cell.row]?.[cell.column]; return state?.kind === 'yours' && state.isGone; });
   if (gone.length === 0) return null;
   const times = gone.map((cell) => `${cell.opensText} at ${board.stops[cell.row]?.shortName ?? ''}`).join(' and ');
-  return `${times} has too few places left for you now. Choose another time; the rest of your choice is kept.`;
+  return `${times} ${gone.length === 1 ? 'has' : 'have'} too few places left for you now. Choose another time; the rest of your choice is kept.`;
 }
 
 /** What changed on the board, said politely to who cannot see it: times that can no longer be reached, places that moved. */
