@@ -52,7 +52,7 @@ function Board({ board: served, action, first, own, path, caption, heads: headOf
   const isAwake = useSyncExternalStore(never, () => true, () => false);
   const [state, submit, isSending] = useActionState(action, idleForm);
   const [hasTried, setTried] = useState(false);
-  const { adopt, ...choice } = useChoice(firstChoice(state, first), path);
+  const { adopt, ...choice } = useChoice(firstChoice(state, first), first, path);
   const { fresh, changes } = useFreshBoard(served);
   const board = onlyFitting(withOwn(fresh, own), choice.only, choice.chosen);
   const { party, isReadable } = partyOf(choice.typed);

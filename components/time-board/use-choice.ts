@@ -3,7 +3,7 @@
 import { useCallback, useEffect, useState } from 'react';
 import type { FormState } from '@/lib/core/form-state';
 import type { Only } from '@/lib/opendays/rules/board';
-import { boardAddress, readBoardAsked, type BoardAsked } from '@/lib/opendays/rules/board-asked';
+import { boardAddress, readBoardAsked, type BoardAsked, type Query } from '@/lib/opendays/rules/board-asked';
 import { headsTyped } from '@/lib/opendays/rules/party';
 import type { People } from '@/lib/bookings/rules/party';
 
@@ -33,30 +33,39 @@ export function partyOf(typed: PartyTyped): { party: People; isReadable: boolean
   return { party: { adults: adults ?? 0, children: children ?? 0, babes: babes ?? 0 }, isReadable: adults !== null && children !== null && babes !== null };
 }
 
-/** What stands in the boxes of the page right now. */
-function readTyped(form: FormData): FirstChoice {
-  const text = (name: string) => form.getAll(name).filter((value) => typeof value === 'string');
-  const query = Object.fromEntries([...new Set(form.keys())].map((name) => [name, text(name)]));
-  return readBoardAsked(query);
+const queryOf = (fields: FormData | URLSearchParams): Query =>
+  Object.fromEntries([...new Set(fields.keys())].map((name) => [name, fields.getAll(name).filter((value) => typeof value === 'string')]));
+
+/** What stands in the boxes of the page right now: someone may tick before the script has come. */
+const readTyped = (form: FormData): FirstChoice => readBoardAsked(queryOf(form));
+
+/** What the browser's address asks for where it is not what was served: on the way back it shows a kept page at a later address. */
+function askedSince(path: string, served: FirstChoice): FirstChoice | null {
+  if (window.location.pathname !== path) return null;
+  const asked = readBoardAsked(queryOf(new URLSearchParams(window.location.search)));
+  return boardAddress(path, asked) === boardAddress(path, served) ? null : asked;
 }
 
 const isSame = (a: readonly string[], b: readonly string[]) => a.length === b.length && a.every((each) => b.includes(each));
 
-/** Everything the party decides on the board: people, times, and which it insisted on. The last chosen time calls the train. */
-export function useChoice(first: FirstChoice, path: string) {
+/** Everything the party decides on the board: people, times, and which it insisted on. `served` is what the address said. */
+export function useChoice(first: FirstChoice, served: FirstChoice, path: string) {
   const [typed, setTyped] = useState(first.typed);
   const [only, setOnly] = useState(first.only);
   const [chosen, setChosen] = useState(first.chosen);
   const [insisted, setInsisted] = useState<string[]>([]);
   const adopt = useCallback((form: HTMLFormElement | null) => {
     if (!form) return;
-    const before = readTyped(new FormData(form));
+    const before = askedSince(path, served) ?? readTyped(new FormData(form));
     setChosen((chosenNow) => (isSame(chosenNow, before.chosen) ? chosenNow : before.chosen));
     setTyped(before.typed);
     setOnly(before.only);
-  }, []);
+  }, [path, served]);
   // The address says what is chosen, so that a reload and the way back from the next page find it again.
-  useEffect(() => window.history.replaceState(null, '', boardAddress(path, { typed, only, chosen })), [path, typed, only, chosen]);
+  useEffect(() => {
+    const address = boardAddress(path, { typed, only, chosen });
+    if (address !== `${window.location.pathname}${window.location.search}`) window.history.replaceState(null, '', address);
+  }, [path, typed, only, chosen]);
   return {
     typed, only, chosen, insisted, adopt,
     type: (kind: keyof People, text: string) => setTyped((before) => ({ ...before, [kind]: text })),

@@ -13,6 +13,7 @@ let sent: FormData[] = [];
 let answer: FormState = { status: 'done' };
 
 beforeEach(() => {
+  window.history.replaceState(null, '', '/');
   places = {};
   sent = [];
   answer = { status: 'done' };
@@ -257,6 +258,14 @@ it('says in the address what is chosen, so that a reload finds it again', async 
   await choose(at, 'Saltmarsh & Plover, 10:00');
 
   expect(window.location.pathname + window.location.search).toBe(`/open-days/spring-2027?children=1&with=${entryIdAt(0, '10:00')}`);
+});
+
+it('finds the later choice of the address on the way back to a kept page', async () => {
+  window.history.replaceState(null, '', `/open-days/spring-2027?adults=4&with=${entryIdAt(0, '10:00')}`);
+  const at = show(aTimeBoard({}, {}));
+
+  expect(tick(at, 'Saltmarsh & Plover, 10:00').checked).toBe(true);
+  expect(words(keep(at))).toBe('Keep 4 places at 10:00');
 });
 
 describe('filters', () => {
