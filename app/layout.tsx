@@ -1,7 +1,7 @@
 import type { Metadata, Viewport } from 'next';
-import { cookies } from 'next/headers';
 import { connection } from 'next/server';
 import type { ReactNode } from 'react';
+import { readsLargePrint } from '@/lib/web/cookies';
 import './globals.css';
 
 export const metadata: Metadata = {
@@ -25,9 +25,9 @@ export const viewport: Viewport = {
 /** Every page's <html>: tied to the request (the nonce needs one), in large print for readers who asked for it. */
 export default async function RootLayout({ children }: { children: ReactNode }) {
   await connection();
-  const print = (await cookies()).get('print')?.value;
+  const isLarge = await readsLargePrint();
   return (
-    <html lang="en" {...(print === 'large' ? { 'data-print': 'large' } : {})}>
+    <html lang="en" {...(isLarge ? { 'data-print': 'large' } : {})}>
       <body>
         <a
           href="#page"

@@ -35,3 +35,18 @@ export async function readBookingLink(code: string): Promise<string | null> {
   const secret = (await cookies()).get(bookingCookie(code))?.value;
   return secret === undefined ? null : hashSecret(secret);
 }
+
+const PRINT = 'print';
+
+/** Whether this browser reads large print. */
+export const readsLargePrint = async (): Promise<boolean> => (await cookies()).get(PRINT)?.value === 'large';
+
+/** Turns large print on for this browser. */
+export async function setLargePrint(): Promise<void> {
+  (await cookies()).set(PRINT, 'large', options('/', 400 * 24 * 3600));
+}
+
+/** Turns large print off for this browser. */
+export async function setUsualPrint(): Promise<void> {
+  (await cookies()).delete(PRINT);
+}

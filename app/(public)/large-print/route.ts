@@ -1,8 +1,7 @@
-import { cookies } from 'next/headers';
 import { z } from 'zod';
+import { readsLargePrint, setLargePrint, setUsualPrint } from '@/lib/web/cookies';
 import { route } from '@/lib/web/route';
 
-const DAY = 24 * 3600;
 const HERE = 'http://here.example';
 
 /** The path of an address on this site, or null for any other: `//elsewhere` and `/\elsewhere` are other sites to a browser. */
@@ -26,9 +25,7 @@ export const GET = route({
   requires: 'anyone',
   input: z.object({ to: z.string().max(2000).optional() }),
   run: async ({ input, request }) => {
-    const jar = await cookies();
-    if (jar.get('print')?.value === 'large') jar.delete('print');
-    else jar.set('print', 'large', { path: '/', maxAge: 400 * DAY, sameSite: 'lax', httpOnly: true });
+    await ((await readsLargePrint()) ? setUsualPrint() : setLargePrint());
     const back = ownPath(input.to, HERE) ?? cameFrom(request) ?? '/';
     return new Response(null, { status: 303, headers: { Location: back, 'Cache-Control': 'private, no-store' } }); // a path: no proxy can bend it
   },

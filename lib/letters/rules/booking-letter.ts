@@ -175,8 +175,8 @@ function lastWords(booking: BookingFacts, visits: readonly LetterVisit[], club: 
   return [
     { kind: 'section', title: 'If it rains', parts: ['Trains run in rain; bring a coat for the path. If a garden or the day is called off, we write to you, and everything for it is given back without asking.'] },
     { kind: 'section', title: 'If your plans change', parts: [`${refundRuleForAll(club)} `, { link: 'Change or give back places', href: booking.link }, '.'] },
-    { kind: 'section', title: 'Take care', parts: [`${careSentence(visits)} ${listed([...new Set(visits.flatMap((visit) => visit.cautions))])}`.trim()] },
-    { kind: 'paragraph', parts: ['Questions: answer this letter, and whoever runs the day will read it.'] },
+    { kind: 'section', title: 'Take care', parts: [[careSentence(visits), ...new Set(visits.flatMap((visit) => visit.cautions))].join(' ')] },
+    { kind: 'paragraph', parts: ['Questions: answer this letter, and whoever runs the day will read it. ', { link: 'This letter in large print', href: `${booking.link}?print=large` }, '.'] },
   ];
 }
 

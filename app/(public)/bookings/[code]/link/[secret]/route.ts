@@ -1,16 +1,22 @@
+import { z } from 'zod';
 import { findBookingByLink } from '@/lib/bookings/access';
 import { hashSecret } from '@/lib/infra/secrets';
-import { keepBookingLink } from '@/lib/web/cookies';
+import { keepBookingLink, setLargePrint } from '@/lib/web/cookies';
 import { route } from '@/lib/web/route';
 
-/** The private link of a letter: sets its cookie and goes to the clean address. A mail scanner that opens it uses nothing up. */
+/**
+ * The private link of a letter: sets its cookie and goes to the clean address, in large print when the letter's other link
+ * asks for it. A mail scanner that opens it uses nothing up.
+ */
 export const GET = route({
   name: '/bookings/[code]/link/[secret]',
   requires: 'anyone',
-  run: async ({ ctx, params }) => {
+  input: z.object({ print: z.literal('large').optional() }),
+  run: async ({ ctx, params, input }) => {
     const { code = '', secret = '' } = params;
     const isCode = /^[0-9A-Z]{8}$/.test(code);
     if (isCode && (await findBookingByLink(ctx.db, code, hashSecret(secret), ctx.now)) !== null) await keepBookingLink(code, secret);
+    if (input.print === 'large') await setLargePrint();
     return new Response(null, {
       status: 303,
       headers: { Location: isCode ? `/bookings/${code}` : '/bookings', 'Referrer-Policy': 'no-referrer', 'Cache-Control': 'private, no-store', 'X-Robots-Tag': 'noindex' },
