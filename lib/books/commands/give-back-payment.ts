@@ -41,20 +41,19 @@ export async function giveBackPayment(ctx: AccountCtx, input: z.output<typeof gi
 /** Records that a refund which the card service would not make was paid out another way. Locks the refund. */
 export async function paidByHand(ctx: AccountCtx, input: z.output<typeof paidByHandInput>): Promise<void> {
   await inTransaction(ctx.db, async (tx) => {
-    const refund = firstOrNull(await tx.select({ doneAt: refunds.doneAt, failedAt: refunds.failedAt, byHand: paidOut(input.refundId) }).from(refunds).where(sql`${refunds.id} = ${input.refundId}::uuid`).for('no key update'));
+    const refund = firstOrNull(await tx.select({ failedAt: refunds.failedAt }).from(refunds).where(sql`${refunds.id} = ${input.refundId}::uuid`).for('no key update'));
     if (!refund || refund.failedAt === null) throw new Refusal('not_found');
-    if (refund.byHand) throw new Refusal('already_given_back', { sentence: 'That refund is paid out already.' });
-    await payOut(tx, ctx, input.refundId, input.method);
+    const isNews = await payOut(tx, ctx, input.refundId, input.method);
+    if (!isNews) throw new Refusal('already_given_back', { sentence: 'That refund is paid out already.' });
     await recordChange(tx, ctx, { action: 'paid a refund by hand', subjectKind: 'refund', subjectId: input.refundId, after: { method: input.method } });
   });
 }
 
 /* The card service may have paid it and taken it back, so an entry by hand has a source of its own. */
 const handSource = (refundId: string) => `${refundId}:by-hand`;
-const paidOut = (refundId: string) => sql<boolean>`exists (select from journal_entries j where j.kind = 'refund-paid' and j.source_id = ${handSource(refundId)})`;
 
-/** Books that what was owed has left by this way, and that the refund is done. */
-async function payOut(tx: Tx, ctx: AccountCtx, refundId: string, method: Method): Promise<void> {
+/** Books that what was owed has left by this way, and that the refund is done; false when it was booked before. */
+async function payOut(tx: Tx, ctx: AccountCtx, refundId: string, method: Method): Promise<boolean> {
   const owed = only(await tx.select({
     amountMinor: refunds.amountMinor, currency: refunds.currency, openDayId: bookings.openDayId, householdId: payments.householdId,
     isDues: sql<boolean>`coalesce(${payments.chargeId}, ${paymentAttempts.chargeId}) is not null`,
@@ -62,9 +61,10 @@ async function payOut(tx: Tx, ctx: AccountCtx, refundId: string, method: Method)
     .from(refunds).leftJoin(payments, eq(payments.id, refunds.paymentId)).leftJoin(paymentAttempts, eq(paymentAttempts.id, refunds.attemptId))
     .leftJoin(bookings, eq(bookings.id, sql`coalesce(${payments.bookingId}, ${paymentAttempts.bookingId})`))
     .where(sql`${refunds.id} = ${refundId}::uuid`));
-  await postEntry(tx, ctx, { kind: 'refund-paid', method, for: owed.isDues ? 'dues' : 'tickets', amountMinor: owed.amountMinor },
+  const entry = await postEntry(tx, ctx, { kind: 'refund-paid', method, for: owed.isDues ? 'dues' : 'tickets', amountMinor: owed.amountMinor },
     { sourceId: handSource(refundId), currency: owed.currency, openDayId: owed.openDayId, householdId: owed.householdId });
   await tx.update(refunds).set({ doneAt: ctx.now }).where(and(sql`${refunds.id} = ${refundId}::uuid`, isNull(refunds.doneAt)));
+  return entry !== null;
 }
 
 type Told = { refundId: string; paymentId: Id<'payment'>; amountMinor: number; reason: string };
