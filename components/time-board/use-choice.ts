@@ -1,6 +1,6 @@
 'use client';
 
-import { useCallback, useEffect, useState } from 'react';
+import { useCallback, useState } from 'react';
 import type { FormState } from '@/lib/core/form-state';
 import type { Only } from '@/lib/opendays/rules/board';
 import { boardAddress, readBoardAsked, type BoardAsked, type Query } from '@/lib/opendays/rules/board-asked';
@@ -48,32 +48,32 @@ function askedSince(path: string, served: FirstChoice): FirstChoice | null {
 
 const isSame = (a: readonly string[], b: readonly string[]) => a.length === b.length && a.every((each) => b.includes(each));
 
-/** Everything the party decides on the board: people, times, and which it insisted on. `served` is what the address said. */
+/**
+ * Everything the party decides on the board: people, times, and which it insisted on. `served` is what the address said.
+ * The address follows each decision, so that a reload and the way back from the next page find it again.
+ */
 export function useChoice(first: FirstChoice, served: FirstChoice, path: string) {
-  const [typed, setTyped] = useState(first.typed);
-  const [only, setOnly] = useState(first.only);
-  const [chosen, setChosen] = useState(first.chosen);
+  const [choice, setChoice] = useState(first);
   const [insisted, setInsisted] = useState<string[]>([]);
   const adopt = useCallback((form: HTMLFormElement | null) => {
     if (!form) return;
     const before = askedSince(path, served) ?? readTyped(new FormData(form));
-    setChosen((chosenNow) => (isSame(chosenNow, before.chosen) ? chosenNow : before.chosen));
-    setTyped(before.typed);
-    setOnly(before.only);
+    setChoice((now) => ({ ...before, chosen: isSame(now.chosen, before.chosen) ? now.chosen : before.chosen }));
   }, [path, served]);
-  // The address says what is chosen, so that a reload and the way back from the next page find it again.
-  useEffect(() => {
-    const address = boardAddress(path, { typed, only, chosen });
-    if (address !== `${window.location.pathname}${window.location.search}`) window.history.replaceState(null, '', address);
-  }, [path, typed, only, chosen]);
+  const decide = (change: Partial<FirstChoice>) => {
+    const next = { ...choice, ...change };
+    setChoice(next);
+    window.history.replaceState(null, '', boardAddress(path, next));
+  };
+  const without = (entryTimeId: string) => choice.chosen.filter((each) => each !== entryTimeId);
   return {
-    typed, only, chosen, insisted, adopt,
-    type: (kind: keyof People, text: string) => setTyped((before) => ({ ...before, [kind]: text })),
-    show: (next: Only) => setOnly(next),
-    toggle: (entryTimeId: string) => setChosen((before) => (before.includes(entryTimeId) ? before.filter((each) => each !== entryTimeId) : [...before, entryTimeId])),
+    ...choice, insisted, adopt,
+    type: (kind: keyof People, text: string) => decide({ typed: { ...choice.typed, [kind]: text } }),
+    show: (only: Only) => decide({ only }),
+    toggle: (entryTimeId: string) => decide({ chosen: choice.chosen.includes(entryTimeId) ? without(entryTimeId) : [...choice.chosen, entryTimeId] }),
     insist: (entryTimeId: string) => {
       setInsisted((before) => [...before, entryTimeId]);
-      setChosen((before) => [...before.filter((each) => each !== entryTimeId), entryTimeId]);
+      decide({ chosen: [...without(entryTimeId), entryTimeId] });
     },
   };
 }
