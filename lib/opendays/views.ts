@@ -212,7 +212,7 @@ export function toOpenDayPage(day: OpenDayRow, entries: EntryFacts[], club: Boar
     caption: `Places left at each garden and entry time on ${formatDay(day.heldOn, club)}`,
     howToCome: day.howToCome, board,
     gardens: day.stops.map(({ number, slug, name, areaKey, areaName }) => ({ number, slug, name, areaKey, areaName })),
-    flowers: toFlowersOf(day.stops, day.heldOn, 5),
+    flowers: toFlowersOf(day.stops, day.heldOn, Math.max(2, Math.min(5, Math.ceil(day.stops.length / 2)))), // as many as stand beside the board
     cautions: cautionsOfDay(day.stops),
   };
 }
