@@ -1,12 +1,12 @@
 import 'server-only';
-import type { Queryable } from '@/db/client';
+import type { Db, Queryable } from '@/db/client';
 import { club } from '@/db/schema/club';
 import type { ClubSettings } from '@/lib/infra/context';
 import { firstOrNull } from '@/lib/core/only';
 
 /** The club's settings; an empty database is a mistake in setting up, said so. */
 export async function getClub(db: Queryable): Promise<ClubSettings> {
-  const found = firstOrNull(await db.select(settings).from(club).limit(1));
+  const found = firstOrNull(await ('$client' in db ? prepared(db).execute() : db.select(settings).from(club).limit(1)));
   if (!found) throw new Error('The club is not set up: the table club is empty.');
   return found;
 }
@@ -18,3 +18,12 @@ const settings = {
   changesEndMinutes: club.changesEndMinutes, refundRules: club.refundRules, duesKeptOnDays: club.duesKeptOnDays, visitRules: club.visitRules,
   coniferInk: club.coniferInk,
 };
+
+/** Every request begins with this one: the query is built once a process, and planned once a connection. */
+const known = new WeakMap<Db, ReturnType<typeof prepare>>();
+const prepare = (db: Db) => db.select(settings).from(club).limit(1).prepare('club');
+function prepared(db: Db): ReturnType<typeof prepare> {
+  const query = known.get(db) ?? prepare(db);
+  known.set(db, query);
+  return query;
+}

@@ -4,6 +4,7 @@ import { NextResponse, type NextRequest } from 'next/server';
 import { z } from 'zod';
 import { Refusal } from '@/lib/core/refusal';
 import type { Ctx, GateActor, SystemActor } from '@/lib/infra/context';
+import { readClock } from '@/lib/infra/clock';
 import { env } from '@/lib/infra/env';
 import { log } from '@/lib/infra/log';
 import { findGateActor } from '@/lib/gate/access';
@@ -25,6 +26,7 @@ export type RouteParts<R extends RouteRequires, S extends z.ZodType> = {
   input?: S;
   maxBytes?: number;
   raw?: boolean; // the body is handed over as text, for signatures
+  keepMs?: number; // a GET without input that says the same to everyone: one answer a process and address for so long
   run: (asked: Asked<R, z.output<S>>) => Promise<Response | object>;
 };
 
@@ -37,14 +39,33 @@ export function route<R extends RouteRequires, S extends z.ZodType = z.ZodType<u
     try {
       const asked = await readRequest(parts, request, (await segment.params) ?? {}); // a path without a variable part has none
       if (asked instanceof Response) return asked;
-      const answer = await parts.run(asked);
-      return answer instanceof Response ? answer : NextResponse.json(answer, { headers: privately });
+      const said = await parts.run(asked);
+      return said instanceof Response ? said : NextResponse.json(said, { headers: privately });
     } catch (error) {
       unstable_rethrow(error);
       if (error instanceof Refusal) return say(statusOf(error.code), { refused: error.code, message: error.sentence, fields: error.detail.fields ?? {} });
       log.error('route failed', error, { route: parts.name });
       return say(500, { message: 'That did not work, and nothing was changed. Try again in a moment.' });
     }
+  }
+}
+
+type KeptAnswer = { status: number; text: string };
+const ADDRESSES_KEPT = 50; // a club has a few open days; anything else is someone guessing
+
+/** Gives everyone who asks for an address within `ms` one answer: a hundred phones at once are one query. Failures are not kept. */
+function keepingAnswers(ms: number) {
+  const kept = new Map<string, { from: number; answer: Promise<KeptAnswer> }>();
+  return async (address: string, ask: () => Promise<KeptAnswer>): Promise<KeptAnswer> => {
+    const now = readClock().getTime();
+    const known = kept.get(address);
+    if (known && now >= known.from && now < known.from + ms) return known.answer;
+    if (kept.size >= ADDRESSES_KEPT) kept.clear();
+    const answer = ask();
+    kept.set(address, { from: now, answer });
+    const { status } = await answer;
+    if (status !== 200) kept.delete(address);
+    return answer;
   };
 }
 

@@ -6,11 +6,11 @@ const PAYMENTS = 'tests/db/bookings/payment-races.test.ts';
 
 export const mutants: Mutant[] = [
   {
-    what: 'the lock on entry times in id order', file: 'migrations/0002_places.sql', from: ' ORDER BY e.id FOR NO KEY UPDATE', to: '',
+    what: 'the lock on entry times in id order', file: 'migrations/0003_hold_facts.sql', from: ' ORDER BY e.id FOR NO KEY UPDATE', to: '',
     test: RACES, named: 'serves 200 parties that want three times each',
   },
   {
-    what: 'the condition that places are left', file: 'migrations/0002_places.sql', from: 'e.taken + w.delta <= e.capacity AND ', to: '',
+    what: 'the condition that places are left', file: 'migrations/0003_hold_facts.sql', from: 'e.taken + w.delta <= e.capacity AND ', to: '',
     test: RACES, named: 'gives 40 places to 20 of 400 parties',
   },
   {

@@ -65,7 +65,7 @@ const mayBe = (who: Who, name: ActorName) => (who === 'everyone' ? true : who.in
 
 const inApp = readdirSync('app', { recursive: true, encoding: 'utf8' }).map((path) => `app/${path}`);
 const actionFiles = inApp.filter((path) => path.endsWith('/actions.ts')).map((path) => resolve(path));
-const routeFiles = inApp.filter((path) => path.endsWith('/route.ts') && !/^app\/api\/(auth|health)\//.test(path)).map((path) => resolve(path));
+const routeFiles = inApp.filter((path) => path.endsWith('/route.ts') && !/^app\/api\/(auth|health|bench)\//.test(path)).map((path) => resolve(path));
 
 async function namesIn(files: string[]): Promise<Map<string, unknown>> {
   const found = new Map<string, unknown>();
