@@ -27,14 +27,17 @@ export async function lockOwn(tx: Tx, { actor }: Ctx<HolderActor>, bookingId: Id
   return booking;
 }
 
-/** As `lockOwn`, and the places are still kept at this moment: a hold is over at the minute it names. */
+/** As `lockOwn`, and the places are still kept at this moment. */
 export async function lockLiveHold(tx: Tx, ctx: Ctx<HolderActor>, bookingId: Id<'booking'>) {
   const booking = await lockOwn(tx, ctx, bookingId);
   if (booking.confirmedAt !== null) throw new Refusal('changed_meanwhile');
   const isPaying = await hasOpenAttempt(tx, bookingId);
-  if (booking.releasedAt !== null || (booking.heldUntil <= ctx.now && !isPaying)) throw new Refusal('hold_over');
+  if (isOver(booking, isPaying, ctx.now)) throw new Refusal('hold_over');
   return { ...booking, isPaying };
 }
+
+/** A hold is over at the minute it names, unless a payment is open. */
+const isOver = (hold: { releasedAt: Date | null; heldUntil: Date }, isPaying: boolean, now: Date) => hold.releasedAt !== null || (hold.heldUntil <= now && !isPaying);
 
 const hasOpenAttempt = async (tx: Tx, bookingId: Id<'booking'>) =>
   (await tx.select({ id: paymentAttempts.id }).from(paymentAttempts).where(and(eq(paymentAttempts.bookingId, bookingId), isNull(paymentAttempts.endedAt))).limit(1)).length > 0;
@@ -66,14 +69,21 @@ export async function letGo(ctx: Ctx<HolderActor>, input: HoldIdInput): Promise<
   });
 }
 
-/** Writes down who the party is and that it agreed to the visit rules. */
+/**
+ * Writes down who the party is and that it agreed to the visit rules. When the places are no longer kept it refuses, but
+ * what was typed stays written down: whoever keeps the same places again finds it there.
+ */
 export async function saveDetails(ctx: Ctx<HolderActor>, input: DetailsInput): Promise<void> {
-  await inTransaction(ctx.db, async (tx) => {
-    const hold = await lockLiveHold(tx, ctx, input.bookingId);
+  const isKept = await inTransaction(ctx.db, async (tx) => {
+    const hold = await lockOwn(tx, ctx, input.bookingId);
+    if (hold.confirmedAt !== null) throw new Refusal('changed_meanwhile');
     const details = { name: input.name, email: input.email, phone: input.phone };
     await tx.insert(bookingContacts).values({ bookingId: hold.id, ...details }).onConflictDoUpdate({ target: bookingContacts.bookingId, set: details });
+    if (isOver(hold, await hasOpenAttempt(tx, hold.id), ctx.now)) return false;
     await tx.update(bookings).set({ rulesAgreedAt: ctx.now, wantsInvitations: input.wantsInvitations }).where(eq(bookings.id, hold.id));
+    return true;
   });
+  if (!isKept) throw new Refusal('hold_over');
 }
 
 /** Keeps the same places for the same people once more after a hold ran out, with what was typed; answers the new booking. */
