@@ -68,13 +68,15 @@ async function prepare(database: Awaited<ReturnType<typeof startPostgres>>) {
   await migrateAll({ ownerUrl: database.MIGRATE_DATABASE_URL, queueUrl: database.QUEUE_DATABASE_URL });
 }
 
-/** The comment on the database says when its demo club was complete. */
+/** The comment on the database says when its demo club was complete; an empty table says that it has gone since. */
 async function hasClub(url: string): Promise<boolean> {
   const client = new Client({ connectionString: url });
   await client.connect();
   const { rows } = await client.query<{ note: string | null }>("select shobj_description(oid, 'pg_database') as note from pg_database where datname = current_database()");
+  const isPlanted = rows[0]?.note?.startsWith('planted ') ?? false;
+  const isThere = isPlanted && (await client.query('select 1 from club')).rows.length > 0;
   await client.end();
-  return rows[0]?.note?.startsWith('planted ') ?? false;
+  return isThere;
 }
 
 function welcome(ports: StackSettings['ports'], { plantedOn, signIns }: Planted): string {
