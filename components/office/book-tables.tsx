@@ -56,10 +56,10 @@ export function ReceiptTable({ rows, asked, path, club }: { rows: Receipt[]; ask
   );
 }
 
-export type Refund = { id: string; amountMinor: number; reason: string; askedAt: Date; tries: number; doneAt: Date | null; failedAt: Date | null; byHand: boolean };
-type RefundTableProps = { caption: string; rows: readonly Refund[]; club: Club; empty: string; /** The form for one that the card service would not make. */ settle?: (refund: Refund) => ReactNode };
+export type Refund = { id: string; amountMinor: number; reason: string; askedAt: Date; tries: number; doneAt: Date | null; failedAt: Date | null; byHand: boolean; isByHandDue: boolean };
+type RefundTableProps = { caption: string; rows: readonly Refund[]; club: Club; empty: string; /** The form for one that must be paid out by hand. */ settle?: (refund: Refund) => ReactNode };
 
-/** Refunds with how far each has come; one that failed opens to the form that settles it. */
+/** Refunds with how far each has come; one that must be paid out by hand opens to the form for it. */
 export function RefundTable({ caption, rows, club, empty, settle }: RefundTableProps) {
   return (
     <Table
@@ -73,7 +73,7 @@ export function RefundTable({ caption, rows, club, empty, settle }: RefundTableP
         { key: 'how', head: 'So far', cell: (row) => <RefundState refund={row} club={club} /> },
         { key: 'amount', head: 'Amount', set: 'figures', cell: (row) => <Amount minor={row.amountMinor} club={club} /> },
       ]}
-      opened={(row) => (settle !== undefined && row.failedAt !== null && !row.byHand ? settle(row) : null)}
+      opened={(row) => (settle !== undefined && row.isByHandDue ? settle(row) : null)}
     />
   );
 }
@@ -81,6 +81,7 @@ export function RefundTable({ caption, rows, club, empty, settle }: RefundTableP
 function RefundState({ refund, club }: { refund: Refund; club: Club }) {
   if (refund.byHand) return <>paid out by hand</>;
   if (refund.failedAt !== null) return <span className="text-danger"><Sign kind="danger" /> the card service would not: pay it another way</span>;
+  if (refund.isByHandDue) return <span className="text-caution"><Sign kind="caution" /> to pay out by hand</span>;
   if (refund.doneAt !== null) return <>gone <When at={refund.doneAt} show="day" style="bare" club={club} /></>;
   return <>{refund.tries === 0 ? 'on its way' : `tried ${refund.tries} times, tried again`}</>;
 }

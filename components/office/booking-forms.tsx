@@ -28,9 +28,9 @@ export function GiveBackForPartyForm({ action, visit }: { action: FormAction; vi
     <ActionForm action={action} schema={giveBackForPartyInput} submit="Give these places back, and write to the party" tone="danger">
       <Facts visit={visit} />
       <Row>
-        <People name="adults" word="adults" of={visit.adults} />
-        {visit.children === 0 ? null : <People name="children" word="children" of={visit.children} />}
-        {visit.babes === 0 ? null : <People name="babes" word="babes in arms" of={visit.babes} />}
+        <People name="adults" word="Adults" of={visit.adults} />
+        {visit.children === 0 ? null : <People name="children" word="Children" of={visit.children} />}
+        {visit.babes === 0 ? null : <People name="babes" word="Babes in arms" of={visit.babes} />}
       </Row>
       <Input name="refundPercent" label="Percent that comes back" hint="Empty: the club’s rule above. 100 when the club is at fault." inputMode="numeric" width="heads" />
       <Input name="reason" label="Why, for the letter" required />
@@ -48,5 +48,5 @@ function Facts({ visit }: { visit: Visit }) {
 }
 
 function People({ name, word, of }: { name: string; word: string; of: number }) {
-  return <Input name={name} label={`Of ${of} ${word}, not coming`} inputMode="numeric" defaultValue={String(of)} width="heads" />;
+  return <Input name={name} label={`${word} not coming, of ${of}`} inputMode="numeric" defaultValue={String(of)} width="heads" />;
 }

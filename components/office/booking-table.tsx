@@ -22,7 +22,7 @@ export function BookingTable({ lines, asked, path, keep, club }: BookingTablePro
       columns={[
         { key: 'name', head: 'Party', names: 'row', sorting: sorting('name'), cell: (line) => <Link className="link break-words" href={`${path}/${line.code}`}>{line.name}</Link> },
         { key: 'code', head: 'Code', cell: (line) => <span className="font-mono whitespace-nowrap">{showSpokenCode(line.code)}</span> },
-        { key: 'day', head: 'Open day', cell: (line) => <>{line.day}, <When on={line.heldOn} style="short" club={club} /></> },
+        ...(keep['day'] === undefined ? [{ key: 'day', head: 'Open day', cell: (line: Line) => <>{line.day}, <When on={line.heldOn} style="short" club={club} /></> }] : []),
         { key: 'people', head: 'People × visits', set: 'figures', sorting: sorting('people'), cell: (line) => (line.cancelledAt === null ? `${line.people} × ${line.visits}` : 'given back') },
         { key: 'paid', head: 'Paid', set: 'figures', sorting: sorting('paid'), cell: (line) => <>{money(line.paidMinor, line.currency)}{line.backMinor === 0 ? null : <span className="block text-ink-soft">less {money(line.backMinor, line.currency)}</span>}</> },
         { key: 'made', head: 'Booked', sorting: sorting('made'), cell: (line) => <When at={line.madeAt} show="day" style="short" club={club} /> },

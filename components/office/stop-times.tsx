@@ -34,7 +34,7 @@ export function StopTimesTable({ times, path, open, mayEdit, club, change, close
 function OpenTime({ time, club, change, close, reopen }: { time: OfficeTime; club: ClubTime; change: FormAction; close: FormAction; reopen: FormAction }) {
   return (
     <div className="grid gap-6 border-l-2 border-damson pl-4">
-      <EntryTimeChangeForm key={`${time.id} ${time.opensAt.getTime()} ${time.capacity}`} action={change} time={{ id: time.id, opensAt: wallTime(time.opensAt, club.timeZone), graceMinutes: minutesBetween(time.opensAt, time.graceUntil), capacity: time.capacity }} />
+      <EntryTimeChangeForm action={change} time={{ id: time.id, opensAt: wallTime(time.opensAt, club.timeZone), graceMinutes: minutesBetween(time.opensAt, time.graceUntil), capacity: time.capacity }} />
       {time.closedAt === null
         ? <FactForm action={close} name="entryTimeId" value={time.id} submit="Close it to new parties" />
         : <FactForm action={reopen} name="entryTimeId" value={time.id} submit="Open it again" />}

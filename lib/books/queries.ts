@@ -9,6 +9,7 @@ import type { Id } from '@/lib/core/ids';
 import { likeOf, PAGE_ROWS, type Listing } from '@/lib/core/listing';
 import { firstOrNull } from '@/lib/core/only';
 import type { AccountCtx } from '@/lib/infra/context';
+import { full } from '@/lib/infra/sql-column';
 import type { ReceiptSort } from './schema';
 
 /** The figure of postings that credit an income account: money that came in, less what was given back. */
@@ -54,10 +55,11 @@ export async function receiptLines({ db }: AccountCtx, asked: Listing<ReceiptSor
   return { rows, total: rows[0]?.total ?? 0 };
 }
 
-/* A refund is settled when the card service made it, or when an officer paid it out by hand after the service would not. */
+/* A refund is settled when the card service made it, or when an officer paid it out by hand: one of a cheque, cash or a transfer, or one that the service would not make. */
 const byHand = sql<boolean>`exists (select from journal_entries j where j.kind = 'refund-paid' and j.source_id = refunds.id || ':by-hand')`;
+const isByHandDue = sql<boolean>`not ${byHand} and (${full(refunds.failedAt)} is not null or exists (select from ${payments} p where p.id = ${full(refunds.paymentId)} and p.method <> 'card'))`;
 const openRefund = sql`(${refunds.doneAt} is null or ${refunds.failedAt} is not null) and not ${byHand}`;
-const refundFacts = { id: refunds.id, amountMinor: refunds.amountMinor, reason: refunds.reason, askedAt: refunds.askedAt, tries: refunds.tries, doneAt: refunds.doneAt, failedAt: refunds.failedAt, byHand };
+const refundFacts = { id: refunds.id, amountMinor: refunds.amountMinor, reason: refunds.reason, askedAt: refunds.askedAt, tries: refunds.tries, doneAt: refunds.doneAt, failedAt: refunds.failedAt, byHand, isByHandDue };
 
 /** Refunds that are on their way or failed, oldest first, at most 100. */
 export async function refundsOpen({ db }: AccountCtx) {

@@ -5,7 +5,7 @@ import { listingOf } from '@/lib/core/listing';
 
 const slugField = z.string({ error: 'Type a short name for the address.' }).transform((text) => text.trim().toLowerCase())
   .refine((text) => /^[a-z0-9]+(-[a-z0-9]+)*$/.test(text) && text.length <= 60, { error: 'Use small letters, figures and single hyphens: spring-2027.' })
-  .refine((text) => text !== 'new', { error: 'That word is taken. Add the year: spring-2027.' });
+  .refine((text) => text !== 'new' && text !== 'csv', { error: 'That word is taken. Add the year: spring-2027.' });
 
 /** An amount as typed; read in the club's currency by the command. */
 const priceField = z.string({ error: 'Type a price; 0 is free.' }).max(20);

@@ -21,7 +21,7 @@ export default async function OfficeHome() {
   const { actor, club } = ctx;
   const today = dayOf(ctx.now, club.timeZone);
   const failing = may(actor.roles, 'letters.see') ? (await letterPage(ctx, letterListInput.parse({ state: 'failing' }))).total : 0;
-  const stuck = may(actor.roles, 'books.see') ? (await refundsOpen(ctx)).filter((refund) => refund.failedAt !== null).length : 0;
+  const stuck = may(actor.roles, 'books.see') ? (await refundsOpen(ctx)).filter((refund) => refund.isByHandDue).length : 0;
   const sums = may(actor.roles, 'roll.see') ? await rollSums(ctx) : null;
   const coming = may(actor.roles, 'openDays.see') ? (await officeOpenDays(ctx)).filter((day) => day.heldOn >= today).reverse() : null;
   return (

@@ -38,11 +38,12 @@ export async function giveBackPayment(ctx: AccountCtx, input: z.output<typeof gi
   });
 }
 
-/** Records that a refund which the card service would not make was paid out another way. Locks the refund. */
+/** Records that a refund was paid out by hand: one that never came by card, or that the card service would not make. Locks the refund. */
 export async function paidByHand(ctx: AccountCtx, input: z.output<typeof paidByHandInput>): Promise<void> {
   await inTransaction(ctx.db, async (tx) => {
-    const refund = firstOrNull(await tx.select({ failedAt: refunds.failedAt }).from(refunds).where(sql`${refunds.id} = ${input.refundId}::uuid`).for('no key update'));
-    if (!refund || refund.failedAt === null) throw new Refusal('not_found');
+    const refund = firstOrNull(await tx.select({ failedAt: refunds.failedAt, cameAs: payments.method }).from(refunds).leftJoin(payments, eq(payments.id, refunds.paymentId))
+      .where(sql`${refunds.id} = ${input.refundId}::uuid`).for('no key update', { of: refunds }));
+    if (!refund || (refund.failedAt === null && (refund.cameAs ?? 'card') === 'card')) throw new Refusal('not_found');
     const isNews = await payOut(tx, ctx, input.refundId, input.method);
     if (!isNews) throw new Refusal('already_given_back', { sentence: 'That refund is paid out already.' });
     await recordChange(tx, ctx, { action: 'paid a refund by hand', subjectKind: 'refund', subjectId: input.refundId, after: { method: input.method } });

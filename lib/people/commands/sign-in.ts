@@ -67,7 +67,7 @@ export async function signInWithCode(ctx: Ctx, { email, code }: z.output<typeof 
     .where(and(eq(signInCodes.id, newest.id), isNull(signInCodes.usedAt), lt(signInCodes.tries, CODE_TRIES)))
     .returning({ hash: signInCodes.codeHash, email: signInCodes.email })); // counted before it is judged: two guesses at once are two tries
   if (!tried || !sameHash(tried.hash, codeHashOf(tried.email, code))) throw new Refusal('wrong_code', { fields: { code: 'That is not the code. Look at the newest letter.' } });
-  return useUp(ctx, newest.id, 'code');
+  return spendCode(ctx, newest.id, 'code');
 }
 
 /** Signs in with the secret of a letter's link, when its button is pressed. Returns the new sign-in. */
@@ -77,11 +77,11 @@ export async function signInWithLink(ctx: Ctx, { secret }: z.output<typeof signI
   const row = firstOrNull(await db.select({ id: signInCodes.id }).from(signInCodes)
     .where(and(eq(signInCodes.linkHash, hashSecret(secret)), isNull(signInCodes.usedAt), gt(signInCodes.expiresAt, now))).limit(1));
   if (!row) throw new Refusal('wrong_code');
-  return useUp(ctx, row.id, 'link');
+  return spendCode(ctx, row.id, 'link');
 }
 
 /** Uses a code up, once: of two presses at the same moment one finds it used. */
-async function useUp(ctx: Ctx, codeId: string, method: 'code' | 'link'): Promise<Id<'signIn'>> {
+async function spendCode(ctx: Ctx, codeId: string, method: 'code' | 'link'): Promise<Id<'signIn'>> {
   return inTransaction(ctx.db, async (tx) => {
     const used = firstOrNull(await tx.update(signInCodes).set({ usedAt: ctx.now })
       .where(and(sql`${signInCodes.id} = ${codeId}::uuid`, isNull(signInCodes.usedAt))).returning({ email: signInCodes.email }));

@@ -37,7 +37,7 @@ describe('what waits for an officer', () => {
     const waiting = officeWaiting({ failing: 2, stuck: 1, lapsed: 1, unpublished: [{ slug: 'spring-2027', title: 'Spring Open Gardens' }] });
 
     expect(waiting.map((each) => each.sentence)).toEqual([
-      'One refund the card service would not make', '2 letters have not been delivered yet', 'Spring Open Gardens is not published: nobody can see it or book', 'One household has lapsed',
+      'One refund must be paid out by hand', '2 letters have not been delivered yet', 'Spring Open Gardens is not published: nobody can see it or book', 'One household has lapsed',
     ]);
   });
 });

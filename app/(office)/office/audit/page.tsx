@@ -5,10 +5,12 @@ import { FindForm } from '@/components/office/find-form';
 import { Pages } from '@/components/office/pages';
 import { Table } from '@/components/ui/table';
 import { When } from '@/components/ui/when';
+import { RailRule } from '@/components/ui/rail-rule';
 import { auditPage } from '@/lib/club/audit-queries';
 import { auditInput } from '@/lib/club/schema';
 import { changeSentence } from '@/lib/club/rules/change-sentence';
 import { sortingOf } from '@/lib/core/listing';
+import { counted } from '@/lib/opendays/rules/words';
 import { pageContext } from '@/lib/web/context';
 import { OfficePage } from '../office-page';
 
@@ -21,7 +23,7 @@ export default async function AuditPage({ searchParams }: { searchParams: Promis
   const listing = auditInput.parse(await searchParams);
   const { rows, total } = await auditPage(ctx, listing);
   return (
-    <OfficePage ctx={ctx} here={PATH} bill={<Bill name="Audit trail" line="Who changed what, and when; nothing here can be edited" sums={`${total} lines.`} />}>
+    <OfficePage ctx={ctx} here={PATH} bill={<Bill name="Audit trail" line="Who changed what, and when; nothing here can be edited" sums={`${counted(total, 'line', 'lines')}.`} {...(total === 0 && listing.find === '' ? { rail: <RailRule state="empty" /> } : {})} />}>
       <FindForm path={PATH} label="Action, address or kind" find={listing.find} submit="Look" />
       <Table
         caption="The audit trail"

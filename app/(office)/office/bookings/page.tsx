@@ -5,6 +5,7 @@ import { CsvLink } from '@/components/office/csv-link';
 import { DayFilter } from '@/components/office/day-filter';
 import { FindForm } from '@/components/office/find-form';
 import { Pages } from '@/components/office/pages';
+import { RailRule } from '@/components/ui/rail-rule';
 import { bookingLines, daysWithBookings } from '@/lib/bookings/office-queries';
 import { bookingsInput } from '@/lib/opendays/schema';
 import { counted } from '@/lib/opendays/rules/words';
@@ -25,7 +26,7 @@ export default async function OfficeBookingsPage({ searchParams }: { searchParam
     <OfficePage
       ctx={ctx}
       here={PATH}
-      bill={<Bill name="Bookings" line={shown === undefined ? 'Every party of every open day' : `${shown.title}, every party`} sums={`${counted(total, 'booking', 'bookings')}${asked.find === '' ? '' : ` for “${asked.find}”`}.`} />}
+      bill={<Bill name="Bookings" line={shown === undefined ? 'Every party of every open day' : `${shown.title}, every party`} sums={`${counted(total, 'booking', 'bookings')}${asked.find === '' ? '' : ` for “${asked.find}”`}.`} {...(total === 0 && asked.find === '' ? { rail: <RailRule state="empty" /> } : {})} />}
     >
       <h2>Parties</h2>
       <DayFilter days={days.map(({ slug, title, heldOn }) => ({ slug, title, year: heldOn.slice(0, 4) }))} shown={asked.day} path={PATH} />

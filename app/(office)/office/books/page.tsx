@@ -25,7 +25,7 @@ export default async function BooksPage({ searchParams }: { searchParams: Promis
   const asked = receiptsInput.parse(await searchParams);
   const [days, byFund, balances] = [await incomeByOpenDay(ctx), await incomeByFund(ctx), await accountBalances(ctx)];
   const [receipts, refunds, journal] = [await receiptLines(ctx, asked), await refundsOpen(ctx), await journalLines(ctx)];
-  const stuck = refunds.filter((refund) => refund.failedAt !== null).length;
+  const stuck = refunds.filter((refund) => refund.isByHandDue).length;
   const money = (amountMinor: number) => <Money amountMinor={amountMinor} currency={club.currency} locale={club.locale} />;
   const holds = (code: string) => balances.find((each) => each.code === code)?.balanceMinor ?? 0;
   return (
@@ -39,7 +39,7 @@ export default async function BooksPage({ searchParams }: { searchParams: Promis
           sums={<>{money(sumMinor(byFund.map((fund) => fund.cameInMinor)))} has come in. {money(holds('cards-clearing'))} is with the card service, {money(holds('cheques-in-hand'))} in cheques, {money(holds('cash-in-hand'))} in cash and {money(holds('bank'))} in the bank.</>}
         />
       }
-      toSettle={stuck === 0 ? [] : [{ id: 'refunds', by: 'now', weight: 'now', sentence: `${stuck === 1 ? 'One refund' : `${stuck} refunds`} the card service would not make`, link: { href: '#refunds', label: 'Pay them another way' } }]}
+      toSettle={stuck === 0 ? [] : [{ id: 'refunds', by: 'now', weight: 'now', sentence: `${stuck === 1 ? 'One refund' : `${stuck} refunds`} must be paid out by hand`, link: { href: '#refunds', label: 'Pay and book' } }]}
       foot="Nothing here is edited; a mistake is answered by a new entry that names it."
     >
       <Part title="By open day" place="first">

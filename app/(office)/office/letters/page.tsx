@@ -5,6 +5,7 @@ import { FindForm } from '@/components/office/find-form';
 import { LetterFilter } from '@/components/office/letter-filter';
 import { LetterTable } from '@/components/office/letter-table';
 import { Pagination } from '@/components/ui/pagination';
+import { RailRule } from '@/components/ui/rail-rule';
 import { letterPage } from '@/lib/letters/queries/list';
 import { letterListInput } from '@/lib/letters/schema';
 import { LETTER_PAGE_ROWS } from '@/lib/letters/views';
@@ -26,7 +27,7 @@ export default async function LettersPage({ searchParams }: { searchParams: Prom
     <OfficePage
       ctx={ctx}
       here={PATH}
-      bill={<Bill name="Letters" line="What the club sent and what could not be delivered; codes, links and addresses are blanked" sums={`${counted(total, 'letter', 'letters')}${asked.state === 'all' && asked.find === '' ? '' : ' of this kind'}.`} />}
+      bill={<Bill name="Letters" line="What the club sent and what could not be delivered; codes, links and addresses are blanked" sums={`${counted(total, 'letter', 'letters')}${asked.state === 'all' && asked.find === '' ? '' : ' of this kind'}.`} {...(total === 0 && asked.state === 'all' && asked.find === '' ? { rail: <RailRule state="empty" /> } : {})} />}
     >
       <h2>Letters</h2>
       <LetterFilter shown={asked.state} path={PATH} find={asked.find} />

@@ -1,5 +1,6 @@
 import type { Metadata } from 'next';
 import { Bill } from '@/components/layout/bill';
+import { CsvLink } from '@/components/office/csv-link';
 import { DaysTable } from '@/components/office/days-table';
 import { LinkButton } from '@/components/ui/link-button';
 import { RailRule } from '@/components/ui/rail-rule';
@@ -26,6 +27,7 @@ export default async function OfficeOpenDaysPage() {
     >
       <h2 className="mb-3">All open days</h2>
       <DaysTable days={days} today={today} club={club} empty="No open day is made yet. Make the first one; nobody sees it until you publish it." />
+      {days.length === 0 ? null : <p className="mt-4"><CsvLink href="/office/open-days/csv" what="this list" /></p>}
       {may(ctx.actor.roles, 'openDays.edit') ? <p className="mt-6"><LinkButton tone="main" href="/office/open-days/new">Make an open day</LinkButton></p> : null}
     </OfficePage>
   );

@@ -6,6 +6,7 @@ import { HouseholdLine } from '@/components/member/household-line';
 import { Pages } from '@/components/office/pages';
 import { RollSums } from '@/components/office/roll-sums';
 import { RollTable } from '@/components/office/roll-table';
+import { RailRule } from '@/components/ui/rail-rule';
 import { dayOf, formatDay } from '@/lib/core/time';
 import { lineFacts } from '@/lib/dues/queries';
 import { rollLines, rollSums } from '@/lib/dues/roll-queries';
@@ -26,7 +27,7 @@ export default async function RollPage({ searchParams }: { searchParams: Promise
   const opened = lines.find((line) => line.id === asked.open);
   const stations = opened === undefined ? [] : lineOf({ ...opened, ...(await lineFacts(ctx, opened.id)) }, today, club);
   return (
-    <OfficePage ctx={ctx} here="/office/roll" bill={<Bill name="The roll" line={`As it stands on ${formatDay(today, club)}`} sums={<RollSums sums={sums} shown={asked.standing} />} />} foot="How people are reached is shown only where a household is opened.">
+    <OfficePage ctx={ctx} here="/office/roll" bill={<Bill name="The roll" line={`As it stands on ${formatDay(today, club)}`} sums={<RollSums sums={sums} shown={asked.standing} />} {...(sums.households + sums.by.left === 0 ? { rail: <RailRule state="empty" /> } : {})} />} foot="How people are reached is shown only where a household is opened.">
       <h2>Households</h2>
       <FindForm path="/office/roll" label="Name, railway, street or number" find={asked.find} submit="Look on the roll" keep={keep} />
       <RollTable lines={lines} asked={asked} keep={keep} open={opened?.id ?? null} line={<HouseholdLine stations={stations} club={club} />} club={club} />

@@ -55,7 +55,7 @@ export default async function OfficeReceiptPage({ params }: { params: Promise<{ 
           <p className="mb-4">
             {payment.method === 'card' ? 'It goes back to the card it came from, within some days.' : 'Pay it out first, then book it here: it counts as gone at once.'} {payment.code === null ? 'The household’s term stays as it is.' : 'The party keeps its places; to free them, give them back on its booking.'}
           </p>
-          <GiveBackPaymentForm key={left} action={giveBackPaymentAction} paymentId={payment.id} amount={decimalText(left, minorDigits(payment.currency))} submit={payment.method === 'card' ? 'Give it back to the card' : 'Book it as paid out'} />
+          <GiveBackPaymentForm action={giveBackPaymentAction} paymentId={payment.id} amount={decimalText(left, minorDigits(payment.currency))} submit={payment.method === 'card' ? 'Give it back to the card' : 'Book it as paid out'} />
         </Part>
       ) : null}
     </OfficePage>
