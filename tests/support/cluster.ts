@@ -1,4 +1,4 @@
-import { execFileSync } from 'node:child_process';
+import { execFileSync, spawnSync } from 'node:child_process';
 import { readFileSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
 import { Client } from 'pg';
@@ -16,10 +16,25 @@ export function startCluster(name: string): DatabaseUrls {
   return { DATABASE_URL: read('DATABASE_URL'), MIGRATE_DATABASE_URL: read('MIGRATE_DATABASE_URL'), QUEUE_DATABASE_URL: read('QUEUE_DATABASE_URL'), ADMIN_DATABASE_URL: read('ADMIN_DATABASE_URL') };
 }
 
+/** Whether a cluster of this project runs now. */
+export function clusterRuns(name: string): boolean {
+  return spawnSync(at('scripts/postgres'), [name, 'status']).status === 0;
+}
+
+/** Stops a cluster, unless somebody else has begun to use it meanwhile. */
+export async function stopIdleCluster(name: string, adminUrl: string): Promise<void> {
+  const client = new Client({ connectionString: moved(adminUrl, 'postgres') });
+  await client.connect();
+  const { rows } = await client.query("select 1 from pg_stat_activity where backend_type = 'client backend' and pid <> pg_backend_pid()");
+  await client.end();
+  if (rows.length === 0) spawnSync(at('scripts/postgres'), [name, 'stop']);
+}
+
+const moved = (url: string, database: string) => url.replace(/[^/]*$/, database);
+
 /** The same addresses in another database of the same cluster. */
 export function inDatabase(urls: DatabaseUrls, name: string): DatabaseUrls {
-  const move = (url: string) => url.replace(/[^/]*$/, name);
-  return { DATABASE_URL: move(urls.DATABASE_URL), MIGRATE_DATABASE_URL: move(urls.MIGRATE_DATABASE_URL), QUEUE_DATABASE_URL: move(urls.QUEUE_DATABASE_URL), ADMIN_DATABASE_URL: move(urls.ADMIN_DATABASE_URL) };
+  return { DATABASE_URL: moved(urls.DATABASE_URL, name), MIGRATE_DATABASE_URL: moved(urls.MIGRATE_DATABASE_URL, name), QUEUE_DATABASE_URL: moved(urls.QUEUE_DATABASE_URL, name), ADMIN_DATABASE_URL: moved(urls.ADMIN_DATABASE_URL, name) };
 }
 
 /** Runs statements as the cluster's administrator. */

@@ -7,7 +7,7 @@ import { freePort } from '../../scripts/stack/ports';
 import { lastRun, type Processes } from '../../scripts/stack/processes';
 import { portalEnv, startStack, type StackSettings } from '../../scripts/stack/stack';
 import type { Order } from '../../scripts/stand-ins/cards/control';
-import { asAdmin, makeDatabase, startCluster, type DatabaseUrls } from './cluster';
+import { asAdmin, clusterRuns, makeDatabase, startCluster, stopIdleCluster, type DatabaseUrls } from './cluster';
 
 /** Where a test finds the running portal and what surrounds it; plain text, so that it travels in a variable. */
 export type Addresses = { site: string; cards: string; inbox: string; clockFile: string; database: DatabaseUrls; planted: Planted | null };
@@ -31,6 +31,7 @@ export async function startTestStack({ name, seeded, serverPort, more, cluster: 
   if (living !== null) throw new Error(`Another run (process ${living}) uses ${folder}.`);
   rmSync(join(root, folder), { recursive: true, force: true });
   const build = await ensureBuild();
+  const ranBefore = clusterRuns(clusterName);
   const cluster = startCluster(clusterName);
   const database = await makeDatabase(cluster, `stack_${name.replaceAll('-', '_')}`);
   const ports = { server: serverPort ?? (await freePort()), cards: await freePort(), smtp: await freePort(), inbox: await freePort() };
@@ -43,6 +44,7 @@ export async function startTestStack({ name, seeded, serverPort, more, cluster: 
     async stop() {
       await processes.stop();
       await asAdmin(cluster.ADMIN_DATABASE_URL, `drop database if exists ${database.DATABASE_URL.split('/').at(-1)} with (force)`);
+      if (!ranBefore) await stopIdleCluster(clusterName, cluster.ADMIN_DATABASE_URL);
     },
   };
 }
