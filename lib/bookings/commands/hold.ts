@@ -6,25 +6,24 @@ import { only } from '@/lib/core/only';
 import { Refusal, refuseIf } from '@/lib/core/refusal';
 import { asId, type Id } from '@/lib/core/ids';
 import type { Ctx, HolderActor } from '@/lib/infra/context';
-import { countTry } from '@/lib/infra/rate-limit';
 import { constraintOf, sqlStateOf } from '@/lib/infra/sql-state';
 import { clashSentence, holdRefusal, keptUntil, priced, type PricedVisit } from '../rules/hold';
 import { drawSpokenCode } from '../rules/spoken-code';
 import type { HoldInput } from '../schema';
-import { findWishFacts } from '../queries/entry-facts';
+import { countTryAndFindFacts } from '../queries/entry-facts';
 
 /** A family at one address may try again and again; a script may not. */
 const HOLDS_FROM_ONE_PLACE = { tries: 60, minutes: 10 };
 
 /**
  * Keeps all the wanted places for this browser, or none; returns the booking's id. Its earlier hold of the same open day
- * is given back in the same transaction. Three round trips: the limiter, the facts, and one statement that locks the
- * entry times in id order and decides.
+ * is given back in the same transaction. Two round trips: the limiter with the facts, and one statement that locks
+ * the entry times in id order and decides.
  */
 export async function holdPlaces(ctx: Ctx<HolderActor>, input: HoldInput): Promise<Id<'booking'>> {
   const { db, club, now, actor } = ctx;
-  await countTry(db, `hold:${ctx.client ?? actor.holderHash}`, HOLDS_FROM_ONE_PLACE, now);
-  const facts = await findWishFacts(db, input.openDayId, input.wanted.map((wish) => wish.entryTimeId));
+  const tried = { key: `hold:${ctx.client ?? actor.holderHash}`, limit: HOLDS_FROM_ONE_PLACE, now };
+  const facts = await countTryAndFindFacts(db, tried, input.openDayId, input.wanted.map((wish) => wish.entryTimeId));
   if (!facts) throw new Refusal('not_found');
   refuseIf(holdRefusal(facts.day, facts.entries, input.wanted, club, now));
   const clash = input.insists ? null : clashSentence(facts.entries, facts.minutes, club);

@@ -2,6 +2,7 @@ import 'server-only';
 import { sql } from 'drizzle-orm';
 import type { Queryable } from '@/db/client';
 import type { Id } from '@/lib/core/ids';
+import { refuseTries, tryCounted, type Limit } from '@/lib/infra/rate-limit';
 import type { MinutesFact } from '@/lib/opendays/rules/reach';
 import type { DayFacts, EntryFacts } from '@/lib/bookings/rules/hold';
 
@@ -13,13 +14,26 @@ type TextFacts = { day: AsText<DayFacts>; entries: AsText<EntryFacts>[]; minutes
 
 const instant = (text: string | null) => (text === null ? null : new Date(text));
 
+const factsOf = (openDayId: Id<'openDay'>, ids: readonly Id<'entryTime'>[]) => sql`wish_facts(${openDayId}::uuid, ${`{${ids.join(',')}}`}::uuid[])`;
+
 /**
  * All that the rules must know of these entry times, their open day and the minutes between their areas; null when there
  * is no such day. One call of a function whose plan is kept: this is the way of every hold.
  */
 export async function findWishFacts(db: Queryable, openDayId: Id<'openDay'>, ids: readonly Id<'entryTime'>[]): Promise<WishFacts | null> {
-  const { rows } = await db.execute<{ facts: TextFacts | null }>(sql`select wish_facts(${openDayId}::uuid, ${`{${ids.join(',')}}`}::uuid[]) as facts`);
-  const facts = rows[0]?.facts;
+  const { rows } = await db.execute<{ facts: TextFacts | null }>(sql`select ${factsOf(openDayId, ids)} as facts`);
+  return toFacts(rows[0]?.facts ?? null);
+}
+
+/** The same after the limiter has counted this try under `key`, in one round trip; refuses past the limit. */
+export async function countTryAndFindFacts(db: Queryable, tried: { key: string; limit: Limit; now: Date }, openDayId: Id<'openDay'>, ids: readonly Id<'entryTime'>[]): Promise<WishFacts | null> {
+  const { rows } = await db.execute<{ tries: number; facts: TextFacts | null }>(
+    sql`with tried as (${tryCounted(tried.key, tried.limit, tried.now)}) select tried.tries, ${factsOf(openDayId, ids)} as facts from tried`);
+  refuseTries(rows[0]?.tries ?? 0, tried.limit);
+  return toFacts(rows[0]?.facts ?? null);
+}
+
+function toFacts(facts: TextFacts | null): WishFacts | null {
   if (!facts) return null;
   const { day, entries, minutes } = facts;
   return {
