@@ -9,9 +9,8 @@ export function StandingLine({ standing, club }: StandingLineProps) {
   const sentence = standingSentence(standing, club);
   if (tone === 'plain') return <span>{sentence}</span>;
   return (
-    <span className={`inline-flex items-baseline gap-2 font-semibold ${tone === 'danger' ? 'text-danger' : 'text-caution'}`}>
-      <Sign kind={tone} />
-      {sentence}
+    <span className={`font-semibold ${tone === 'danger' ? 'text-danger' : 'text-caution'}`}>
+      <Sign kind={tone} /> {sentence}
     </span>
   );
 }

@@ -41,7 +41,7 @@ export async function changeOpenDay(ctx: AccountCtx, input: z.output<typeof open
       await tx.insert(prices).values({ openDayId: input.openDayId, kind, amountMinor: amounts[kind] })
         .onConflictDoUpdate({ target: [prices.openDayId, prices.stopId, prices.kind], set: { amountMinor: amounts[kind] } });
     }
-    await recordChange(tx, ctx, { action: 'changed an open day', subjectKind: 'open day', subjectId: input.openDayId, before: { title: before.title, heldOn: before.heldOn }, after: { title: input.title, heldOn: input.heldOn, ...amounts } });
+    await recordChange(tx, ctx, { action: 'changed an open day', subjectKind: 'open day', subjectId: input.openDayId, before: { title: before.title, heldOn: before.heldOn }, after: { title: input.title, heldOn: input.heldOn, adultMinor: amounts.adult, childMinor: amounts.child, babeMinor: amounts.babe } });
   });
 }
 

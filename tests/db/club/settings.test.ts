@@ -37,6 +37,13 @@ describe('the club\'s settings', () => {
     expect(holdMinutes).toBe(partyPeopleMax);
   });
 
+  it('take a refund step away when its boxes are emptied', () => {
+    const read = settingsInput.parse({ ...form, refundRules: [...form.refundRules, { hoursBefore: '', percent: '' }] });
+
+    expect(read.refundRules).toEqual([{ hoursBefore: 168, percent: 100 }, { hoursBefore: 1, percent: 50 }]);
+    expect(settingsInput.safeParse({ ...form, refundRules: [{ hoursBefore: '24', percent: '' }] }).success).toBe(false);
+  });
+
   it.each([
     { wrong: { holdMinutes: '0' }, field: 'holdMinutes' },
     { wrong: { holdMinutes: '61' }, field: 'holdMinutes' },

@@ -35,7 +35,7 @@ export default async function AuditPage({ searchParams }: { searchParams: Promis
           { key: 'who', head: 'Who', cell: (row) => row.email ?? row.actorKind },
           { key: 'what', head: 'What', names: 'row', cell: (row) => row.action },
           { key: 'on', head: 'On', cell: (row) => row.subjectKind },
-          { key: 'change', head: 'Before and after', cell: (row) => changeSentence(row.before, row.after) },
+          { key: 'change', head: 'Before and after', cell: (row) => changeSentence(row.before, row.after, ctx.club) },
         ]}
       />
       <Pages path={PATH} listing={listing} what="lines" shown={rows.length} total={total} />

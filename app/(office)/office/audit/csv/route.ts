@@ -12,6 +12,6 @@ export const GET = route({
   input: auditInput,
   run: async ({ ctx, input }) => {
     const { rows } = await auditPage(ctx, input, 'all');
-    return csvFile('audit-trail.csv', HEAD, rows.map((row) => [row.at.toISOString(), row.email ?? row.actorKind, row.action, row.subjectKind, row.subjectId, changeSentence(row.before, row.after)]));
+    return csvFile('audit-trail.csv', HEAD, rows.map((row) => [row.at.toISOString(), row.email ?? row.actorKind, row.action, row.subjectKind, row.subjectId, changeSentence(row.before, row.after, ctx.club)]));
   },
 });
