@@ -11,8 +11,8 @@ export type Id<K extends IdKind> = string & { readonly [kind]: K };
 
 const uuid = z.uuid();
 
-/** A zod schema for an id of kind `K`; anything but a UUID is refused. */
-export const idField = <K extends IdKind>() => uuid.transform((value) => value as Id<K>); // the one place where a string becomes an id
+/** A zod schema for an id of kind `K`; anything but a UUID is refused. Capitals become small letters: ids are compared as text. */
+export const idField = <K extends IdKind>() => uuid.transform((value) => value.toLowerCase() as Id<K>); // the one place where a string becomes an id
 
 /** A new random id. Works in the browser too: a phone without signal must be able to make one. */
 export const newId = <K extends IdKind>(): Id<K> => crypto.randomUUID() as Id<K>; // a fresh UUID has whatever kind its maker says

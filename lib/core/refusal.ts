@@ -7,6 +7,7 @@ export const REFUSALS = {
   not_found: 'That is not here any more, or never was. Go back and choose again.',
   not_allowed: 'That is not yours to change. Sign in as someone who may, or ask an officer.',
   too_many_tries: 'Too many tries in a short while. Wait a few minutes, then try again.',
+  busy: 'Many people are changing that just now, so nothing was done. Try again in a moment.',
   wrong_origin: 'That came from another website, so it was not done. Open this page again and try from here.',
   changed_meanwhile: 'Someone changed this while you were looking. Look again, then decide.',
   // holds and bookings

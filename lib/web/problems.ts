@@ -11,7 +11,7 @@ export function fieldErrorsOf(error: z.ZodError): Record<string, string[]> {
   return byField;
 }
 
-const STATUS: Partial<Record<RefusalCode, number>> = { not_found: 404, not_allowed: 403, wrong_origin: 403, too_many_tries: 429, cards_unavailable: 503, pass_unknown: 401, pass_revoked: 401 };
+const STATUS: Partial<Record<RefusalCode, number>> = { not_found: 404, not_allowed: 403, wrong_origin: 403, too_many_tries: 429, cards_unavailable: 503, busy: 503, pass_unknown: 401, pass_revoked: 401 };
 
 /** The HTTP status that a refusal answers with; 409 unless it says otherwise. */
 export const statusOf = (code: RefusalCode): number => STATUS[code] ?? 409;

@@ -65,7 +65,7 @@ async function applyPaid(tx: Tx, ctx: SystemCtx, { attempt, booking }: Locked, s
   if (isNews.length === 0) return 'kept';
   await tx.update(paymentAttempts).set({ endedAt: attempt.endedAt ?? ctx.now, outcome: 'paid', paymentIntentId: snapshot.paymentIntentId, sessionId: snapshot.sessionId }).where(eq(paymentAttempts.id, attempt.id));
   const placed = booking === null ? await settleDues(tx, ctx, attempt) : await settleBooking(tx, ctx, attempt, booking);
-  if (!placed) await sendAllBack(tx, ctx, attempt);
+  if (!placed) await sendAllBack(tx, ctx, attempt, booking);
   return placed ? 'confirmed' : 'refunded';
 }
 
@@ -123,10 +123,10 @@ async function tryInside(tx: Tx, work: (inner: Tx) => Promise<boolean>): Promise
 }
 
 /** Money without places: a full refund is due at once, with a letter that says so. */
-async function sendAllBack(tx: Tx, ctx: Ctx, attempt: Attempt): Promise<void> {
+async function sendAllBack(tx: Tx, ctx: Ctx, attempt: Attempt, booking: Booking | null): Promise<void> {
   const forWhat = attempt.bookingId === null ? 'dues' : 'tickets';
   await tx.insert(refunds).values({ attemptId: attempt.id, amountMinor: attempt.amountMinor, currency: attempt.currency, reason: forWhat === 'tickets' ? 'the places were gone' : 'it was paid already', askedAt: ctx.now, dueAt: ctx.now });
-  await postEntry(tx, ctx, { kind: 'unplaced', for: forWhat, amountMinor: attempt.amountMinor }, { sourceId: attempt.id, currency: attempt.currency });
+  await postEntry(tx, ctx, { kind: 'unplaced', for: forWhat, amountMinor: attempt.amountMinor }, { sourceId: attempt.id, currency: attempt.currency, openDayId: booking?.openDayId ?? null });
   const party = attempt.bookingId === null ? null : await findParty(tx, attempt.bookingId);
   if (party) await queueLetter(tx, { key: `places-lost:${attempt.id}`, kind: 'places-lost', to: party.to, madeAt: ctx.now, dueAt: ctx.now, openDayId: party.openDayId, bookingId: party.bookingId, facts: { refundMinor: attempt.amountMinor } });
   log.warn('money came without places', { attempt: attempt.id });

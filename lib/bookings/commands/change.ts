@@ -27,9 +27,9 @@ export async function changeVisit(ctx: Ctx<BookingActor>, input: ChangeInput): P
     const entry = await findTarget(tx, ctx, visit, input);
     const price = priceChange(visit, visit, entry);
     if ('refusal' in price) throw new Refusal(price.refusal);
-    const refundMinor = percentOfMinor(price.lessMinor, refundPercent(visit.opensAt, ctx.club, ctx.now));
+    const lessMinor = percentOfMinor(price.lessMinor, refundPercent(visit.opensAt, ctx.club, ctx.now));
     await move(tx, ctx, visit, entry, { adultMinor: entry.adultMinor, childMinor: entry.childMinor, babeMinor: entry.babeMinor });
-    await refundOf(tx, ctx, visit.bookingId, refundMinor, 'a cheaper entry time');
+    const refundMinor = await refundOf(tx, ctx, visit.bookingId, lessMinor, 'a cheaper entry time');
     await queueChangeLetters(tx, ctx, visit, visit.version + 1, { kind: 'change', refundMinor });
     return { refundMinor };
   });

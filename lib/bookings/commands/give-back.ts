@@ -49,8 +49,7 @@ async function take(tx: Tx, ctx: Ctx, visit: Standing, back: People, terms: { pe
   await movePlaces(tx, [{ entryTimeId: visit.entryTimeId, heads: heads - visit.heads }]);
   const version = visit.version + 1;
   await tx.update(visits).set(isGone ? { givenBackAt: ctx.now, version } : { ...pick(left), heads, version }).where(eq(visits.id, visit.id));
-  const refundMinor = percentOfMinor(costMinor(back, visit), terms.percent);
-  await refundOf(tx, ctx, visit.bookingId, refundMinor, terms.reason ?? 'places given back');
+  const refundMinor = await refundOf(tx, ctx, visit.bookingId, percentOfMinor(costMinor(back, visit), terms.percent), terms.reason ?? 'places given back');
   await queueChangeLetters(tx, ctx, visit, version, { kind: 'given-back', refundMinor, ...(terms.reason === undefined ? {} : { reason: terms.reason }) });
   if (isGone) await cancelIfEmpty(tx, ctx, visit.bookingId);
   return { refundMinor };

@@ -6,7 +6,7 @@ import { payments } from '@/db/schema/books';
 import { gardens } from '@/db/schema/gardens';
 import { gateFacts } from '@/db/schema/gate';
 import { entryTimes, stops } from '@/db/schema/opendays';
-import { oweRefund } from '@/lib/books/commands/refunds';
+import { leftOfPayment, oweRefund } from '@/lib/books/commands/refunds';
 import type { Id } from '@/lib/core/ids';
 import { firstOrNull, only } from '@/lib/core/only';
 import { Refusal, refuseIf } from '@/lib/core/refusal';
@@ -49,11 +49,15 @@ export async function lockVisit(tx: Tx, bookingId: Id<'booking'> | null, asked: 
 export const inWords = (visit: Pick<Standing, 'garden' | 'opensAt' | 'adults' | 'children' | 'babes'>, { club }: Ctx): string =>
   `${visit.garden} at ${formatTime(visit.opensAt, club)}, ${partyInWords(visit)}`;
 
-/** Owes this much of the booking's payment back; nothing for places that cost nothing or were not paid through us. */
-export async function refundOf(tx: Tx, ctx: Ctx, bookingId: Id<'booking'>, amountMinor: number, reason: string): Promise<void> {
-  if (amountMinor === 0) return;
+/**
+ * Owes this much of the booking's payment back, or what is left of it when an officer gave money back before; nothing for
+ * places that cost nothing or were not paid through us. Answers how much that is. The booking is locked.
+ */
+export async function refundOf(tx: Tx, ctx: Ctx, bookingId: Id<'booking'>, amountMinor: number, reason: string): Promise<number> {
   const payment = firstOrNull(await tx.select({ id: payments.id }).from(payments).where(eq(payments.bookingId, bookingId)).orderBy(asc(payments.recordedAt)).limit(1));
-  if (payment) await oweRefund(tx, ctx, { paymentId: payment.id, amountMinor, reason });
+  const owedMinor = payment ? Math.min(amountMinor, await leftOfPayment(tx, payment.id)) : 0;
+  if (payment && owedMinor > 0) await oweRefund(tx, ctx, { paymentId: payment.id, amountMinor: owedMinor, reason });
+  return owedMinor;
 }
 
 /** Owes the party the letter about a change, and the invitation that takes the visit's new state to its calendar. */

@@ -27,8 +27,7 @@ export async function oweRefund(tx: Tx, ctx: Ctx, wish: RefundWish): Promise<Ref
   if (!payment) throw new Refusal('not_found');
   if (payment.bookingId !== null) await tx.select({ id: bookings.id }).from(bookings).where(eq(bookings.id, payment.bookingId)).for('no key update');
   if (payment.chargeId !== null) await tx.select({ id: charges.id }).from(charges).where(eq(charges.id, payment.chargeId)).for('no key update');
-  const back = only(await tx.select({ sum: sql<number>`coalesce(sum(${refunds.amountMinor}), 0)::int` }).from(refunds).where(eq(refunds.paymentId, wish.paymentId)));
-  if (wish.amountMinor > payment.amountMinor - back.sum) throw new Refusal('refund_too_large');
+  if (wish.amountMinor > (await leftOfPayment(tx, wish.paymentId))) throw new Refusal('refund_too_large');
   const refund = only(await tx.insert(refunds).values({
     paymentId: wish.paymentId, amountMinor: wish.amountMinor, currency: payment.currency, reason: wish.reason, askedAt: ctx.now, dueAt: ctx.now,
     askedBy: ctx.actor.kind === 'account' ? ctx.actor.accountId : null,
@@ -37,6 +36,13 @@ export async function oweRefund(tx: Tx, ctx: Ctx, wish: RefundWish): Promise<Ref
   await postEntry(tx, ctx, { kind: 'refund-owed', for: payment.chargeId === null ? 'tickets' : 'dues', amountMinor: wish.amountMinor },
     { sourceId: refund.id, currency: payment.currency, householdId: payment.householdId, openDayId });
   return refund.id;
+}
+
+/** What of a payment is not given back or owed back yet, in minor units. Whoever acts on it has locked what was paid for. */
+export async function leftOfPayment(tx: Tx, paymentId: Id<'payment'>): Promise<number> {
+  const back = sql<number>`coalesce((select sum(${refunds.amountMinor}) from ${refunds} where ${refunds.paymentId} = ${payments.id}), 0)::int`;
+  const row = only(await tx.select({ amountMinor: payments.amountMinor, backMinor: sql<number>`${back}` }).from(payments).where(eq(payments.id, paymentId)));
+  return row.amountMinor - row.backMinor;
 }
 
 type RefundId = (typeof refunds.$inferSelect)['id'];

@@ -1,0 +1,113 @@
+import { and, eq, isNull } from 'drizzle-orm';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { getDb } from '@/db/client';
+import { visits } from '@/db/schema/bookings';
+import { journalEntries, payments, postings, refunds } from '@/db/schema/books';
+import { letters, letterTexts } from '@/db/schema/letters';
+import { prices } from '@/db/schema/opendays';
+import { applyPayment } from '@/lib/bookings/commands/apply-payment';
+import { changeVisit } from '@/lib/bookings/commands/change';
+import { giveBack, giveBackForParty } from '@/lib/bookings/commands/give-back';
+import { endHolds } from '@/lib/bookings/commands/places';
+import { holdPlaces } from '@/lib/bookings/commands/hold';
+import { holdInput } from '@/lib/bookings/schema';
+import { giveBackPayment } from '@/lib/books/commands/give-back-payment';
+import type { Id } from '@/lib/core/ids';
+import { only } from '@/lib/core/only';
+import { addMinutes } from '@/lib/core/time';
+import { aBrowser, aClub, anEntryTime, aStop, cleo, ctxOf, dov, NOON } from '../../support/cast';
+import type { CardsStandIn } from '../../support/cards-stand-in';
+import { liveHeadsAt, takenAt } from './hold-cast';
+import { aDayAhead, cardsAt, eveHolds, evePays, machine, paidSnapshot } from './pay-cast';
+
+let cards: CardsStandIn;
+beforeAll(async () => {
+  cards = await cardsAt();
+  await aClub();
+});
+afterAll(() => cards.stop());
+
+const TWO = { adults: 2, children: 0, babes: 0 };
+
+/** Eve's two places, paid with $16. */
+async function evePaid() {
+  const { day, time } = await aDayAhead();
+  const eve = await eveHolds(day.id, [time.id], NOON);
+  await applyPayment(await ctxOf(machine, NOON), await paidSnapshot(cards, (await evePays(eve, NOON)).sessionId));
+  const visit = only(await getDb().select({ id: visits.id }).from(visits).where(eq(visits.bookingId, eve.bookingId)));
+  const payment = only(await getDb().select({ id: payments.id }).from(payments).where(eq(payments.bookingId, eve.bookingId)));
+  return { day, time, bookingId: eve.bookingId, visitId: visit.id, paymentId: payment.id, by: { kind: 'booking' as const, bookingId: eve.bookingId } };
+}
+
+const backOf = async (paymentId: Id<'payment'>) => (await getDb().select({ amount: refunds.amountMinor }).from(refunds).where(eq(refunds.paymentId, paymentId))).map(({ amount }) => amount);
+const toldOf = async (bookingId: Id<'booking'>, kind: string) => (await getDb().select({ facts: letterTexts.facts }).from(letters).innerJoin(letterTexts, eq(letterTexts.letterId, letters.id))
+  .where(and(eq(letters.bookingId, bookingId), eq(letters.kind, kind)))).map(({ facts }) => facts);
+
+describe('places whose money the treasurer gave back already', () => {
+  it('can still be given back: nothing more is returned, and the letter says so', async () => {
+    const { time, bookingId, visitId, paymentId, by } = await evePaid();
+    await giveBackPayment(await ctxOf(await dov()), { paymentId, amount: '16.00', reason: 'a hard week' });
+
+    expect(await giveBack(await ctxOf(by), { visitId, version: 1, ...TWO })).toEqual({ refundMinor: 0 });
+
+    expect([await takenAt(time.id), await liveHeadsAt(time.id)]).toEqual([0, 0]);
+    expect(await backOf(paymentId)).toEqual([1600]);
+    expect(await toldOf(bookingId, 'given-back')).toMatchObject([{ refundMinor: 0 }]);
+  });
+
+  it('return only what is left of the payment, whoever gives them back', async () => {
+    const { visitId, paymentId } = await evePaid();
+    await giveBackPayment(await ctxOf(await dov()), { paymentId, amount: '10.00', reason: 'a hard week' });
+
+    expect(await giveBackForParty(await ctxOf(await cleo()), { visitId, version: 1, ...TWO, reason: 'storm', refundPercent: 100 })).toEqual({ refundMinor: 600 });
+
+    expect((await backOf(paymentId)).reduce((sum, amount) => sum + amount, 0)).toBe(1600);
+  });
+
+  it('can be changed to a cheaper time, with what is left of the difference', async () => {
+    const { day, visitId, paymentId, by } = await evePaid();
+    const free = await aStop(day.id, 2);
+    await getDb().insert(prices).values([{ openDayId: day.id, stopId: free.id, kind: 'adult', amountMinor: 0 }]);
+    const cheaper = await anEntryTime(free, { atMinutes: 60 });
+    await giveBackPayment(await ctxOf(await dov()), { paymentId, amount: '15.00', reason: 'a hard week' });
+
+    expect(await changeVisit(await ctxOf(by), { visitId, version: 1, entryTimeId: cheaper.id, insists: true })).toEqual({ refundMinor: 100 });
+  });
+});
+
+describe('an id typed in capitals', () => {
+  it('names the same entry time: no booking without visits comes of it', async () => {
+    const { day, time } = await aDayAhead();
+    const input = holdInput.parse({ openDayId: day.id, wanted: [{ entryTimeId: time.id.toUpperCase(), ...TWO }] });
+
+    const bookingId = await holdPlaces(await ctxOf(aBrowser()), input);
+
+    expect(await getDb().select({ heads: visits.heads }).from(visits).where(eq(visits.bookingId, bookingId))).toEqual([{ heads: 2 }]);
+    expect(await takenAt(time.id)).toBe(2);
+  });
+
+  it('is not a second entry time beside the same in small letters', async () => {
+    const { day, time } = await aDayAhead();
+
+    expect(holdInput.safeParse({ openDayId: day.id, wanted: [time.id, time.id.toUpperCase()].map((entryTimeId) => ({ entryTimeId, ...TWO })) }).success).toBe(false);
+  });
+});
+
+describe('money that came for places that are gone', () => {
+  it('stands in the books under its open day, coming and going', async () => {
+    const { day, time } = await aDayAhead({ capacity: 2 });
+    const eve = await eveHolds(day.id, [time.id], NOON);
+    const { sessionId, attemptId } = await evePays(eve, NOON);
+    const paid = await paidSnapshot(cards, sessionId);
+    await applyPayment(await ctxOf(machine, addMinutes(NOON, 60)), { ...paid, isPaid: false, status: 'expired' });
+    await endHolds(getDb(), addMinutes(NOON, 60));
+    await eveHolds(day.id, [time.id], addMinutes(NOON, 61));
+
+    expect(await applyPayment(await ctxOf(machine, addMinutes(NOON, 62)), paid)).toBe('refunded');
+
+    const lines = await getDb().select({ openDayId: postings.openDayId }).from(postings).innerJoin(journalEntries, eq(journalEntries.id, postings.entryId))
+      .where(and(eq(journalEntries.kind, 'unplaced'), eq(journalEntries.sourceId, attemptId)));
+    expect(lines).toEqual([{ openDayId: day.id }, { openDayId: day.id }]);
+    expect(await getDb().select({ id: visits.id }).from(visits).where(and(eq(visits.bookingId, eve.bookingId), isNull(visits.givenBackAt)))).toEqual([]);
+  });
+});
