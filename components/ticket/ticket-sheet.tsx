@@ -25,6 +25,7 @@ export function TicketSheet({ sheet: { clubName, to, title, letter, directions, 
         ))}
       </ol>
       <p className="mt-3 hidden max-w-none print:block"><em>Cut on the dashes, fold on the dots, and each card has its code on its back.</em></p>
+      <h2 className="sr-only">Tickets</h2>
       <div className={`mt-5 ${look['pairs']}`}>
         {tickets.map((ticket) => <TicketPair key={ticket.visitId} ticket={ticket} />)}
       </div>
