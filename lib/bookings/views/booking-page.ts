@@ -96,12 +96,15 @@ function addressWords(booking: Facts['booking'], club: PageClub, now: Date): str
   return now < booking.releasesAt ? `The gardens are people’s homes. Their addresses come by letter and stand here from ${when}.` : 'The addresses are for your party only. Please do not pass them on.';
 }
 
+/* A neighbourhood is named as a place ("the ridge") or as a whereabouts ("above the weir"). */
+const areaInWords = (area: string) => (area.startsWith('the ') ? `In ${area}` : area.replace(/^./u, (letter) => letter.toUpperCase()));
+
 function toPageVisit(visit: PageVisitFacts, around: { booking: Facts['booking']; live: readonly PageVisitFacts[]; board: BoardView | null; isLive: boolean }, club: PageClub, now: Date): PageVisit {
   const { adults, children, babes, arrivesAt } = visit;
   const refusal = visit.givenBackAt !== null || !around.isLive ? 'already_given_back' : visit.cameInAt !== null ? 'already_came_in' : changeRefusal(arrivesAt, club, now);
   const paid = { amountMinor: costMinor(visit, visit), currency: club.currency };
   return {
-    visitId: visit.visitId, version: visit.version, shortName: visit.shortName, at: formatTime(arrivesAt, club), place: visit.address ?? `In ${visit.area}`, directions: visit.directions,
+    visitId: visit.visitId, version: visit.version, shortName: visit.shortName, at: formatTime(arrivesAt, club), place: visit.address ?? areaInWords(visit.area), directions: visit.directions,
     ticket: toTicketView({ ...visit, entryAt: arrivesAt, code: around.booking.code, state: stateOf(visit, club) }, club), cautions: cautionsOf(visit),
     change: refusal === null ? { people: { adults, children, babes }, rule: refundRuleWords(arrivesAt, club, club), now: refundWords(paid, arrivesAt, club, club, now), others: around.board ? otherTimes(around.board, visit, around.live) : [] } : null,
     ended: refusal === 'changes_over' ? 'Changes ended before this entry time. Ask the coordinator.' : null,
@@ -119,7 +122,7 @@ function cautionsOf(visit: PageVisitFacts): string[] {
 
 function toDirections(visit: PageVisitFacts, club: PageClub): DirectionsView {
   return {
-    time: formatTime(visit.arrivesAt, club), shortName: visit.shortName, place: visit.address ?? `In ${visit.area}`, note: [visit.directions, ...cautionsOf(visit)].filter((part) => part !== null).join(' ') || null,
+    time: formatTime(visit.arrivesAt, club), shortName: visit.shortName, place: visit.address ?? areaInWords(visit.area), note: [visit.directions, ...cautionsOf(visit)].filter((part) => part !== null).join(' ') || null,
     journey: [visit.minutesFromLast === null ? '' : `${visit.minutesFromLast} min on the way`, `leave by ${formatTime(visit.leavesAt, club)}`].filter(Boolean).join('; '),
   };
 }
