@@ -2,6 +2,7 @@ import 'server-only';
 import { unstable_rethrow } from 'next/navigation';
 import { NextResponse, type NextRequest } from 'next/server';
 import { z } from 'zod';
+import { isReadableAddress } from '@/lib/core/readable-address';
 import { Refusal } from '@/lib/core/refusal';
 import type { Ctx, GateActor, SystemActor } from '@/lib/infra/context';
 import { readClock } from '@/lib/infra/clock';
@@ -35,7 +36,17 @@ const say = (status: number, body: object) => NextResponse.json(body, { status, 
 
 /** Builds a route handler, the one way there is: origin, size, actor, schema, command, status. */
 export function route<R extends RouteRequires, S extends z.ZodType = z.ZodType<undefined>>(parts: RouteParts<R, S>) {
+  const kept = parts.keepMs === undefined ? null : keepingAnswers(parts.keepMs);
   return async function handle(request: NextRequest, segment: { params: Promise<Record<string, string> | undefined> }): Promise<Response> {
+    if (kept === null) return answer(request, segment);
+    const { status, bytes } = await kept(request.nextUrl.pathname, async () => {
+      const made = await answer(request, segment);
+      return { status: made.status, bytes: new Uint8Array(await made.arrayBuffer()) };
+    });
+    return new Response(bytes, { status, headers: keptHeaders });
+  };
+
+  async function answer(request: NextRequest, segment: { params: Promise<Record<string, string> | undefined> }): Promise<Response> {
     try {
       const asked = await readRequest(parts, request, (await segment.params) ?? {}); // a path without a variable part has none
       if (asked instanceof Response) return asked;
@@ -50,7 +61,8 @@ export function route<R extends RouteRequires, S extends z.ZodType = z.ZodType<u
   }
 }
 
-type KeptAnswer = { status: number; text: string };
+type KeptAnswer = { status: number; bytes: Uint8Array<ArrayBuffer> };
+const keptHeaders = { ...privately, 'Content-Type': 'application/json' };
 const ADDRESSES_KEPT = 50; // a club has a few open days; anything else is someone guessing
 
 /** Gives everyone who asks for an address within `ms` one answer: a hundred phones at once are one query. Failures are not kept. */
@@ -72,10 +84,9 @@ function keepingAnswers(ms: number) {
 async function readRequest<R extends RouteRequires, S extends z.ZodType>(parts: RouteParts<R, S>, request: NextRequest, params: Record<string, string>) {
   const writes = request.method !== 'GET' && request.method !== 'HEAD';
   if (writes && parts.requires !== 'machine' && parts.requires !== 'gate' && !isSameOrigin(request)) throw new Refusal('wrong_origin');
-  const limit = parts.maxBytes ?? 64 * 1024;
-  if (Number(request.headers.get('content-length') ?? 0) > limit) return say(413, { message: 'That is more than this address takes.' });
-  const body = writes ? await request.text() : '';
-  if (Buffer.byteLength(body) > limit) return say(413, { message: 'That is more than this address takes.' });
+  if (!isReadableAddress(request.nextUrl)) return say(400, { message: 'That is not an address of ours.' });
+  const body = writes ? await readBody(request, parts.maxBytes ?? 64 * 1024) : '';
+  if (body === null) return say(413, { message: 'That is more than this address takes.' });
   const ctx = (await contextFor(parts.requires, request, params)) as Ctx<RouteActor<R>>; // contextFor answers with the actor that R asks for
   if (!parts.input) return { ctx, input: undefined as z.output<S>, params, request, body }; // no schema: nothing is read
   const plain = writes && parts.raw !== true ? parseJson(body) : Object.fromEntries(request.nextUrl.searchParams);
@@ -83,6 +94,19 @@ async function readRequest<R extends RouteRequires, S extends z.ZodType>(parts: 
   const parsed = parts.input.safeParse(plain);
   if (!parsed.success) return say(400, { message: 'Some of that is not right.', fields: fieldErrorsOf(parsed.error) });
   return { ctx, input: parsed.data, params, request, body };
+}
+
+/** The body as text, or null as soon as it is longer than `limit` bytes: what says nothing of its length is not kept either. */
+async function readBody(request: NextRequest, limit: number): Promise<string | null> {
+  if (Number(request.headers.get('content-length') ?? 0) > limit) return null;
+  const pieces: Uint8Array[] = [];
+  let bytes = 0;
+  for await (const piece of request.body ?? []) {
+    bytes += piece.byteLength;
+    if (bytes > limit) return null; // leaving the loop gives the stream up
+    pieces.push(piece);
+  }
+  return new TextDecoder().decode(Buffer.concat(pieces));
 }
 
 const BROKEN = Symbol('broken JSON');

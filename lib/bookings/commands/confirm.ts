@@ -29,8 +29,8 @@ export async function queueBookingLetter(tx: Tx, ctx: Ctx, bookingId: Id<'bookin
   if (kind === 'confirmation' || party.emailIsConfirmed) await queueInvitations(tx, ctx, party, kind); // a reminder changes them only by the address
 }
 
-/** Owes a party that wants them the invitation to each live visit, or to one, as it stands when the letter goes. */
-export async function queueInvitations(tx: Tx, ctx: Ctx, party: Addressee, cause: string, visitId?: Id<'visit'>): Promise<void> {
+/** Owes a party that wants them the invitation to each live visit as it stands when the letter goes. */
+export async function queueInvitations(tx: Tx, ctx: Ctx, party: Addressee, cause: string): Promise<void> {
   if (!party.wantsInvitations) return;
   const { bookingId, to, openDayId } = party;
   const live = await tx.select({ id: visits.id, version: visits.version }).from(visits).where(and(eq(visits.bookingId, bookingId), isNull(visits.givenBackAt))).orderBy(asc(visits.id));
