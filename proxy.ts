@@ -1,9 +1,11 @@
 import { NextResponse, type NextRequest } from 'next/server';
+import { isReadableAddress } from '@/lib/core/readable-address';
 
 const MAX_FORM_BYTES = 1024 * 1024;
 
 /** Gives each page its nonce and its Content-Security-Policy, and turns away forms from other websites. */
 export function proxy(request: NextRequest) {
+  if (!isReadableAddress(request.nextUrl)) return new Response('That is not an address of ours. Begin at the first page.', { status: 400 });
   if (request.method === 'POST') {
     const refused = refusePost(request);
     if (refused) return refused;

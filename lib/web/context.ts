@@ -5,6 +5,7 @@ import { notFound, redirect } from 'next/navigation';
 import { cache } from 'react';
 import { getDb } from '@/db/client';
 import { findBookingByLink, findOwnBooking } from '@/lib/bookings/access';
+import { isSpokenCode } from '@/lib/bookings/rules/spoken-code';
 import { getClub } from '@/lib/club/queries';
 import { Refusal } from '@/lib/core/refusal';
 import { readClock } from '@/lib/infra/clock';
@@ -65,6 +66,7 @@ async function holder(mayMakeCookie: boolean): Promise<HolderActor> {
 }
 
 async function booking(code: string): Promise<BookingActor> {
+  if (!isSpokenCode(code)) throw new Refusal('not_found'); // it names a cookie and a row
   const hash = await readBookingLink(code);
   const { db, now } = await base();
   const byLink = hash === null ? null : await findBookingByLink(db, code, hash, now);

@@ -23,6 +23,9 @@ export function drawSpokenCode(randomBytes: (count: number) => Uint8Array): stri
   }
 }
 
+/** Whether a text could be a code as it is stored and stands in an address. */
+export const isSpokenCode = (text: string): boolean => /^[0-9A-Z]{8}$/.test(text);
+
 /** The code as it is shown and said: two groups of four, "7Q2M XK4D". */
 export function showSpokenCode(code: string): string {
   return `${code.slice(0, 4)} ${code.slice(4)}`;

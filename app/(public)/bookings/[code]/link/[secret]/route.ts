@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { findBookingByLink } from '@/lib/bookings/access';
+import { isSpokenCode } from '@/lib/bookings/rules/spoken-code';
 import { hashSecret } from '@/lib/infra/secrets';
 import { keepBookingLink, setLargePrint } from '@/lib/web/cookies';
 import { route } from '@/lib/web/route';
@@ -14,7 +15,7 @@ export const GET = route({
   input: z.object({ print: z.literal('large').optional() }),
   run: async ({ ctx, params, input }) => {
     const { code = '', secret = '' } = params;
-    const isCode = /^[0-9A-Z]{8}$/.test(code);
+    const isCode = isSpokenCode(code);
     if (isCode && (await findBookingByLink(ctx.db, code, hashSecret(secret), ctx.now)) !== null) await keepBookingLink(code, secret);
     if (input.print === 'large') await setLargePrint();
     return new Response(null, {
