@@ -8,7 +8,7 @@ import { counted, inWords } from '@/lib/opendays/rules/words';
 type DayBillProps = {
   day: { title: string; heldOn: Day; placeLine: string; opensAt: Date; closesAt: Date; publishedAt: Date | null; calledOffAt: Date | null; parties: number; people: number; cameInMinor: number };
   stops: number;
-  sums: { capacity: number; taken: number; held: number };
+  sums: { capacity: number; taken: number; held: number; walkUps: number };
   isOver: boolean;
   club: ClubTime & { currency: string };
 };
@@ -21,7 +21,7 @@ export function DayBill({ day, stops, sums, isOver, club }: DayBillProps) {
       line={<><When on={day.heldOn} club={club} />, {stops === 0 ? 'no garden yet' : `${inWords(stops)} ${stops === 1 ? 'garden' : 'gardens'}`} {day.placeLine}, gates <When at={day.opensAt} show="time" club={club} /> to <When at={day.closesAt} show="time" club={club} /></>}
       sums={
         <>
-          <strong>{figure(sums.taken, club.locale)} of {figure(sums.capacity, club.locale)} places</strong> are taken{sums.held > 0 ? `, ${sums.held} of them kept for parties still deciding` : ''};{' '}
+          <strong>{figure(sums.taken, club.locale)} of {figure(sums.capacity, club.locale)} places</strong> are taken{sums.held > 0 ? `, ${sums.held} of them kept for parties still deciding` : ''}{sums.walkUps > 0 ? `, ${sums.walkUps} set aside for walk-ups` : ''};{' '}
           <strong>{counted(day.parties, 'party', 'parties')}, {day.people} people</strong> have booked. <strong><Money amountMinor={day.cameInMinor} currency={club.currency} locale={club.locale} /></strong> has come in. {state(day, isOver)}
         </>
       }

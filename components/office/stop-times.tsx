@@ -22,7 +22,8 @@ export function StopTimesTable({ times, path, open, mayEdit, club, change, close
         { key: 'start', head: 'Start', names: 'row', cell: (time) => (mayEdit ? <RowLink isOpen={time.id === open} href={time.id === open ? path : `${path}?open=${time.id}`}><span className="font-mono">{start(time)}</span><span className="sr-only">, change or close it</span></RowLink> : <span className="font-mono">{start(time)}</span>) },
         { key: 'until', head: 'In until', set: 'figures', cell: (time) => <When at={time.graceUntil} show="time" club={club} /> },
         { key: 'taken', head: 'Places taken', set: 'figures', cell: (time) => `${time.taken} of ${time.capacity}` },
-        { key: 'held', head: 'Kept, deciding', set: 'figures', cell: (time) => (time.held === 0 ? '' : time.held) },
+        { key: 'held', head: 'Kept', set: 'figures', cell: (time) => (time.held === 0 ? '' : time.held) },
+        { key: 'walk-ups', head: 'Set aside', set: 'figures', cell: (time) => (time.walkUps === 0 ? '' : time.walkUps) },
         { key: 'people', head: 'People', set: 'figures', cell: (time) => time.people },
         { key: 'state', head: 'How it stands', cell: (time) => (time.closedAt !== null ? 'closed to new parties' : time.taken >= time.capacity ? 'full' : 'open') },
       ]}

@@ -16,9 +16,10 @@ import { standingOf } from './rules/standing';
 import { classKey, owedMinor, termEnd } from './standing-sql';
 import { receiptNumber, type ChargeView, type DuesView, type ReceiptView } from './views';
 
-/** The acting household's dues: standing, charges newest first, receipts. */
+/** The acting household's dues: standing, charges newest first, receipts of dues alone (tickets have their booking's page). */
 export async function memberDues(ctx: MemberCtx): Promise<DuesView> {
-  return householdDues(ctx, ctx.actor.householdId);
+  const dues = await householdDues(ctx, ctx.actor.householdId);
+  return { ...dues, receipts: dues.receipts.filter((receipt) => receipt.termTo !== null) };
 }
 
 /** The acting household's line: its dated facts and how it stands. */

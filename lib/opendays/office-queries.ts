@@ -52,7 +52,7 @@ export async function findOfficeDay({ db }: AccountCtx, slug: string) {
 export async function officeTimes({ db }: AccountCtx, openDayId: Id<'openDay'>) {
   return db.select({
     stopId: stops.id, number: stops.number, garden: gardens.railwayName, shortName: gardens.shortName, stayMinutes: stops.stayMinutes, headsLimit: stops.headsLimit, hostLimit: gardens.headsLimit,
-    entryTimeId: entryTimes.id, opensAt: entryTimes.opensAt, graceUntil: entryTimes.graceUntil, capacity: entryTimes.capacity, taken: entryTimes.taken, closedAt: entryTimes.closedAt,
+    entryTimeId: entryTimes.id, opensAt: entryTimes.opensAt, graceUntil: entryTimes.graceUntil, capacity: entryTimes.capacity, taken: entryTimes.taken, walkUps: entryTimes.walkUps, closedAt: entryTimes.closedAt,
     confirmedHeads, expectedPeople,
   })
     .from(stops).innerJoin(gardens, eq(gardens.id, stops.gardenId)).leftJoin(entryTimes, eq(entryTimes.stopId, stops.id))

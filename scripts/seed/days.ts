@@ -51,7 +51,7 @@ function seedDay(key: SeedDay['key'], heldOn: Day, title: string, starts: readon
 /** The three open days of the demo: one two to three weeks ago, one a week or two ahead, one in six or seven weeks. */
 export function seedDays({ past, next, later }: SeedCalendar): { past: SeedDay; next: SeedDay; later: SeedDay } {
   return {
-    past: seedDay('past', past, 'Friends and Neighbours Day', HOURLY, { adultMinor: 700, childMinor: 300, babeMinor: 0 }, { placeLine: 'six gardens on both banks', howToCome: 'By car along Valley Road; there is a bus to the halt on the hour.' }),
+    past: seedDay('past', past, 'Friends and Neighbours Day', HOURLY, { adultMinor: 700, childMinor: 300, babeMinor: 0 }, { placeLine: 'on both banks', howToCome: 'By car along Valley Road; there is a bus to the halt on the hour.' }),
     next: seedDay('next', next, `${seasonOf(next)} Open Gardens`, EVERY_45, { adultMinor: 800, childMinor: 400, babeMinor: 0 }, { placeLine: 'in and around Alder Fork', howToCome: 'By car along Valley Road or Quarry Road; the bus stops at the halt on the hour. Tea at the chapel hall all day.' }),
     later: seedDay('later', later, 'Five Gardens and Tea', HOURLY, { adultMinor: 500, childMinor: 200, babeMinor: 0 }, { placeLine: 'up and down the valley', howToCome: 'By car; the lanes at the long meadows are narrow, and soft after rain.' }),
   };

@@ -34,7 +34,7 @@ const people = new Map<ActorName, AccountActor>();
 beforeAll(async () => {
   await aClub();
   const now = new Date();
-  const day = await anOpenDay({ heldOn: dayOf(now, 'America/New_York'), opensAt: addMinutes(now, -60), closesAt: addMinutes(now, 240) }); // going on: the gate's phone may see its place
+  const day = await anOpenDay({ slug: 'today', heldOn: dayOf(now, 'America/New_York'), opensAt: addMinutes(now, -60), closesAt: addMinutes(now, 240) }); // going on: the gate's phone may see its place
   const stop = await aStop(day.id);
   const booking = only(await getDb().insert(bookings).values({ openDayId: day.id, code: CODE, madeAt: now, heldUntil: now, confirmedAt: now, totalMinor: 0, currency: 'USD' }).returning({ id: bookings.id }));
   await getDb().insert(bookingContacts).values({ bookingId: booking.id, name: 'Eve Marlow', email: 'eve@visitors.example' });
@@ -109,7 +109,7 @@ describe('who may do what', () => {
     const request = new NextRequest(`http://127.0.0.1:3000${path}`, {
       method, headers: { origin: 'http://127.0.0.1:3000', host: '127.0.0.1:3000', ...(gateKey === undefined ? {} : { authorization: `Bearer ${gateKey}` }) }, ...(method === 'GET' ? {} : { body: '{}' }),
     });
-    const params = Promise.resolve({ code: CODE, slug: 'no-such', openDay: newId<'openDay'>(), secret: newSecret() });
+    const params = Promise.resolve({ code: CODE, slug: 'today', openDay: newId<'openDay'>(), secret: newSecret() });
 
     const response = await asBrowser(cookies, () => (handle as (request: NextRequest, segment: { params: Promise<Record<string, string>> }) => Promise<Response>)(request, { params })); // namesIn has found a handler
 

@@ -55,6 +55,11 @@ export const ACTIONS: Readonly<Record<string, Who>> = {
   inviteOfficerAction: ['administrator'],
   takeRoleAction: ['administrator'],
   saveSettingsAction: ['administrator'],
+  moveVisitAction: COORDINATOR,
+  giveBackForPartyAction: COORDINATOR,
+  giveBackPaymentAction: ['treasurer'],
+  paidByHandAction: ['treasurer'],
+  sendAgainAction: ['coordinator', 'administrator'],
 };
 
 /** Every route handler but next-auth's own and the health answer. */
@@ -74,4 +79,10 @@ export const ROUTES: Readonly<Record<string, Who>> = {
   'POST /api/gate/ticket': ['gate phone'],
   'GET /office/roll/csv': ['secretary', 'treasurer'],
   'GET /office/books/csv': ['treasurer'],
+  'GET /office/open-days/csv': ['coordinator', 'treasurer'],
+  'GET /office/open-days/[slug]/csv': ['coordinator', 'treasurer'],
+  'GET /office/bookings/csv': ['coordinator', 'treasurer'],
+  'GET /office/letters/csv': OFFICERS,
+  'GET /office/people/csv': ['administrator'],
+  'GET /office/audit/csv': ['administrator'],
 };

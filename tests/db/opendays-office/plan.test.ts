@@ -72,7 +72,7 @@ describe('an open day of the office', () => {
     const stopsNow = toOfficeStops(await officeTimes(ctx, day.id));
 
     expect(await findOfficeDay(ctx, day.slug)).toMatchObject({ parties: 1, people: 4, cameInMinor: 0, lettersFailing: 0 });
-    expect(sumsOf(stopsNow)).toEqual({ capacity: 24, taken: 8, held: 2 });
+    expect(sumsOf(stopsNow)).toEqual({ capacity: 24, taken: 8, held: 2, walkUps: 0 });
     expect(stopsNow[0]?.times.map((each) => each.people)).toEqual([4, 4]);
     expect((await officeOpenDays(ctx)).find((each) => each.id === day.id)).toMatchObject({ stops: 1, capacity: 24, taken: 8 });
   });

@@ -14,7 +14,7 @@ import { show } from '../ui/stage';
 const CLUB = { timeZone: 'America/New_York', locale: 'en-US', hourCycle: 'h23' as const, currency: 'USD' };
 const TEN = new Date('2027-05-15T14:00:00Z');
 const at = (minutes: number) => new Date(TEN.getTime() + minutes * 60_000);
-const time = (minutes: number, changes: Partial<OfficeTime> = {}): OfficeTime => ({ id: newId<'entryTime'>(), opensAt: at(minutes), graceUntil: at(minutes + 20), capacity: 12, taken: 4, held: 0, people: 4, closedAt: null, ...changes });
+const time = (minutes: number, changes: Partial<OfficeTime> = {}): OfficeTime => ({ id: newId<'entryTime'>(), opensAt: at(minutes), graceUntil: at(minutes + 20), capacity: 12, taken: 4, held: 0, walkUps: 0, people: 4, closedAt: null, ...changes });
 const stop = (number: number, shortName: string, times: OfficeTime[]): OfficeStop => ({ id: newId<'stop'>(), number, garden: shortName, shortName, stayMinutes: 35, headsLimit: 20, hostLimit: 28, capacity: 0, taken: 0, people: 0, times });
 const words = (element: Element | null | undefined) => element?.textContent?.replace(/\s+/g, ' ').trim();
 type Day = Parameters<typeof DayBill>[0]['day'];
@@ -22,7 +22,7 @@ const pressed = async () => idleForm;
 
 describe('the bill of an open day', () => {
   const day: Day = { title: 'Spring Open Gardens', heldOn: '2027-05-15', placeLine: 'in the valley', opensAt: TEN, closesAt: at(360), publishedAt: TEN, calledOffAt: null, parties: 171, people: 502, cameInMinor: 620_400 };
-  const sums = { capacity: 1139, taken: 1014, held: 0 };
+  const sums = { capacity: 1139, taken: 1014, held: 0, walkUps: 0 };
   const said = (changes: Partial<Day> = {}, isOver = false) => words(show(<DayBill day={{ ...day, ...changes }} stops={7} sums={sums} isOver={isOver} club={CLUB} />).querySelector('.bill'));
 
   it('puts the figures into sentences', () => {

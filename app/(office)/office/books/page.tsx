@@ -39,7 +39,7 @@ export default async function BooksPage({ searchParams }: { searchParams: Promis
           sums={<>{money(sumMinor(byFund.map((fund) => fund.cameInMinor)))} has come in. {money(holds('cards-clearing'))} is with the card service, {money(holds('cheques-in-hand'))} in cheques, {money(holds('cash-in-hand'))} in cash and {money(holds('bank'))} in the bank.</>}
         />
       }
-      toSettle={stuck === 0 ? [] : [{ id: 'refunds', by: 'now', weight: 'now', sentence: `${stuck === 1 ? 'One refund' : `${stuck} refunds`} must be paid out by hand`, link: { href: '#refunds', label: 'Pay and book' } }]}
+      {...(stuck === 0 ? {} : { toSettle: [{ id: 'refunds', by: 'now', weight: 'now' as const, sentence: `${stuck === 1 ? 'One refund' : `${stuck} refunds`} must be paid out by hand`, link: { href: '#refunds', label: 'Pay and book' } }] })}
       foot="Nothing here is edited; a mistake is answered by a new entry that names it."
     >
       <Part title="By open day" place="first">

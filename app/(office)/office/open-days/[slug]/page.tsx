@@ -29,8 +29,8 @@ export default async function OfficeDayPage({ params }: { params: Promise<{ slug
       copy={copy}
       here={path}
       bill={<DayBill day={day} stops={stops.length} sums={sumsOf(stops)} isOver={day.closesAt <= now} club={club} />}
-      toSettle={(mayEdit ? toSettle(day, stops, now) : []).map(({ id, by, sentence, href, label }, index) => ({
-        id, sentence, by: by === null ? 'now' : <When on={by} style="bare" club={club} />, link: { href, label }, weight: index === 0 ? 'now' : 'usual',
+      toSettle={(mayEdit ? toSettle(day, stops, now) : []).map(({ id, by, sentence, href, label }) => ({
+        id, sentence, by: by === null ? 'now' : <When on={by} style="bare" club={club} />, link: { href, label }, weight: by === null ? 'now' : 'usual',
       }))}
       foot="Every change on this sheet is in the audit trail."
     >
