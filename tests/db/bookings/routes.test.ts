@@ -1,3 +1,6 @@
+import { rmSync, writeFileSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import { eq } from 'drizzle-orm';
 import { NextRequest } from 'next/server';
 import Stripe from 'stripe';
@@ -16,12 +19,20 @@ import { takenAt } from './hold-cast';
 
 vi.mock('next/headers', () => frameworkHeaders());
 
+/** Handlers read the clock themselves: here it says noon on 1 May 2027, as the tests do. */
+const clock = join(tmpdir(), `leafhalt-clock-${process.pid}`);
+
 let cards: CardsStandIn;
 beforeAll(async () => {
+  writeFileSync(clock, String(NOON.getTime() - Date.now()));
+  process.env['CLOCK_OFFSET_FILE'] = clock;
   cards = await cardsAt();
   await aClub();
 });
-afterAll(() => cards.stop());
+afterAll(async () => {
+  rmSync(clock, { force: true });
+  await cards.stop();
+});
 
 const SITE = 'http://127.0.0.1:3000';
 const none = { params: Promise.resolve({}) };
