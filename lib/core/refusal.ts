@@ -51,6 +51,7 @@ export const REFUSALS = {
   // office
   capacity_below_taken: 'More places are taken than that. Move or give back some first.',
   entry_times_overlap: 'Another entry time at this garden starts then. Choose another start.',
+  day_has_times: 'Entry times stand on that day already, so it cannot be moved. Make another open day.',
   has_visits: 'People hold places there. Move them or give the places back first.',
   heads_over_limit: 'The garden carries fewer people than that. The host has the last word, downwards.',
   slug_taken: 'Another page has that name. Change a word.',

@@ -25,6 +25,7 @@ export async function startDuesPayment(ctx: MemberCtx, { chargeId }: z.output<ty
     const outstanding = charge.amountMinor - (await paidMinor(tx, chargeId));
     if (outstanding <= 0) throw new Refusal('already_paid');
     const opened = await openAttempt(tx, now, { chargeId }, { amountMinor: outstanding, currency: charge.currency });
+    if (opened.amountMinor !== outstanding) throw new Refusal('changed_meanwhile', { sentence: 'Some of it was paid another way since you began to pay by card. Wait half an hour until that payment ends, then pay the rest.' });
     const name = `${charge.className} dues to ${formatDay(charge.termTo, club, 'short')}`;
     return { attempt: opened, checkout: { lines: [{ name, amountMinor: outstanding }], email: actor.email, donePath: '/member/dues?paid=look', backPath: '/member/dues' } };
   });

@@ -24,7 +24,7 @@ import type { entryTimeChangeInput, entryTimeIdInput, entryTimesInput } from '..
 export async function makeEntryTimes(ctx: AccountCtx, input: z.output<typeof entryTimesInput>): Promise<number> {
   return inTransaction(ctx.db, async (tx) => {
     const stop = firstOrNull(await tx.select({ openDayId: stops.openDayId, heldOn: openDays.heldOn, headsLimit: stops.headsLimit })
-      .from(stops).innerJoin(openDays, eq(openDays.id, stops.openDayId)).where(eq(stops.id, input.stopId)));
+      .from(stops).innerJoin(openDays, eq(openDays.id, stops.openDayId)).where(eq(stops.id, input.stopId)).for('no key update', { of: openDays })); // the day itself must not change meanwhile
     if (!stop) throw new Refusal('not_found');
     refuseOver(input.capacity, stop.headsLimit);
     const starts = entryStarts(stop.heldOn, input.firstAt, input.lastAt, input.everyMinutes, ctx.club.timeZone);
@@ -58,8 +58,9 @@ export async function changeEntryTime(ctx: AccountCtx, input: z.output<typeof en
 
 async function change(tx: Tx, ctx: AccountCtx, input: z.output<typeof entryTimeChangeInput>): Promise<number> {
   const { entryTimeId } = input;
-  const affected = await lockBookingsAt(tx, entryTimeId);
+  await lockBookingsAt(tx, entryTimeId);
   const before = await lockEntryTime(tx, entryTimeId);
+  const affected = await confirmedAt(tx, entryTimeId); // read after the locks: who gave back or moved meanwhile is not told
   refuseOver(input.capacity, before.headsLimit);
   const opensAt = instantOf(before.heldOn, input.opensAt, ctx.club.timeZone);
   await tx.update(entryTimes).set({ opensAt, graceUntil: addMinutes(opensAt, input.graceMinutes), capacity: input.capacity }).where(eq(entryTimes.id, entryTimeId));
@@ -77,12 +78,17 @@ async function change(tx: Tx, ctx: AccountCtx, input: z.output<typeof entryTimeC
 
 type Affected = { bookingId: Id<'booking'>; visitId: Id<'visit'> };
 
-/** The confirmed live visits at an entry time, with their bookings locked in id order. */
-async function lockBookingsAt(tx: Tx, entryTimeId: Id<'entryTime'>): Promise<Affected[]> {
-  return tx.select({ bookingId: bookings.id, visitId: visits.id }).from(bookings).innerJoin(visits, eq(visits.bookingId, bookings.id))
-    .where(and(eq(visits.entryTimeId, entryTimeId), isNull(visits.givenBackAt), isNotNull(bookings.confirmedAt)))
+/** Locks the confirmed bookings with places at an entry time, in id order. */
+async function lockBookingsAt(tx: Tx, entryTimeId: Id<'entryTime'>): Promise<void> {
+  await tx.select({ id: bookings.id }).from(bookings).innerJoin(visits, eq(visits.bookingId, bookings.id)).where(confirmedThere(entryTimeId))
     .orderBy(asc(bookings.id)).for('no key update', { of: bookings });
 }
+
+/** The confirmed live visits at an entry time, by booking. */
+const confirmedAt = (tx: Tx, entryTimeId: Id<'entryTime'>): Promise<Affected[]> =>
+  tx.select({ bookingId: bookings.id, visitId: visits.id }).from(bookings).innerJoin(visits, eq(visits.bookingId, bookings.id)).where(confirmedThere(entryTimeId)).orderBy(asc(bookings.id));
+
+const confirmedThere = (entryTimeId: Id<'entryTime'>) => and(eq(visits.entryTimeId, entryTimeId), isNull(visits.givenBackAt), isNotNull(bookings.confirmedAt));
 
 async function lockEntryTime(tx: Tx, entryTimeId: Id<'entryTime'>) {
   const row = firstOrNull(await tx.select({

@@ -3,7 +3,7 @@ import { and, eq, isNull, sql } from 'drizzle-orm';
 import type { z } from 'zod';
 import type { Tx } from '@/db/client';
 import { gardens } from '@/db/schema/gardens';
-import { openDays, prices, stops } from '@/db/schema/opendays';
+import { entryTimes, openDays, prices, stops } from '@/db/schema/opendays';
 import { recordChange } from '@/lib/club/commands';
 import type { Id } from '@/lib/core/ids';
 import { parseMoney } from '@/lib/core/money';
@@ -36,6 +36,7 @@ export async function changeOpenDay(ctx: AccountCtx, input: z.output<typeof open
   const amounts = readPrices(ctx, input);
   await inTransaction(ctx.db, async (tx) => {
     const before = await lockDay(tx, input.openDayId);
+    if (input.heldOn !== before.heldOn) await refuseWithTimes(tx, input.openDayId);
     await tx.update(openDays).set(columnsOf(ctx, input)).where(eq(openDays.id, input.openDayId));
     for (const kind of KINDS) {
       await tx.insert(prices).values({ openDayId: input.openDayId, kind, amountMinor: amounts[kind] })
@@ -66,6 +67,12 @@ async function lockDay(tx: Tx, id: Id<'openDay'>) {
     .from(openDays).where(eq(openDays.id, id)).for('no key update'));
   if (!day) throw new Refusal('not_found');
   return day;
+}
+
+/** Entry times, and with them the tickets, stand on the day: it cannot be moved under them. The day is locked. */
+async function refuseWithTimes(tx: Tx, openDayId: Id<'openDay'>): Promise<void> {
+  const times = await tx.select({ id: entryTimes.id }).from(entryTimes).where(eq(entryTimes.openDayId, openDayId)).limit(1);
+  if (times.length > 0) throw new Refusal('day_has_times', { fields: { heldOn: 'Keep the day, or make another open day.' } });
 }
 
 /** Shows an open day to everyone and opens its booking. */
