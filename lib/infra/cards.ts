@@ -82,6 +82,10 @@ function refundOf(refund: Stripe.Refund): RefundSnapshot {
   return { refundId: refund.id, ourId: refund.metadata?.['refund'] ?? null, state, amountMinor: refund.amount };
 }
 
+/* A quoted or otherwise rare local part is a legal address (RFC 5321 section 4.1.2) that the processor may refuse together with the
+   whole session; its page asks for one itself when none is given. */
+const isPlain = (email: string) => /^[\w.'+-]+@/.test(email);
+
 /** Makes a payment session for cards only: nothing that settles days later. The same key gets the same session. */
 export async function createSession(wish: NewSession): Promise<SessionSnapshot> {
   const currency = wish.currency.toLowerCase();
@@ -92,7 +96,7 @@ export async function createSession(wish: NewSession): Promise<SessionSnapshot> 
     client_reference_id: wish.attemptId,
     metadata: { attempt: wish.attemptId },
     payment_intent_data: { metadata: { attempt: wish.attemptId } },
-    ...(wish.email === null ? {} : { customer_email: wish.email }),
+    ...(wish.email !== null && isPlain(wish.email) ? { customer_email: wish.email } : {}),
     expires_at: Math.ceil(wish.expiresAt.getTime() / 1000),
     success_url: wish.doneUrl,
     cancel_url: wish.backUrl,
