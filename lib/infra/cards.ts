@@ -86,6 +86,9 @@ function refundOf(refund: Stripe.Refund): RefundSnapshot {
    whole session; its page asks for one itself when none is given. */
 const isPlain = (email: string) => /^[\w.'+-]+@/.test(email);
 
+/** An address that every processor takes; a rarer one (a quoted local part is legal) is not worth a payment that fails. The payer types it there. */
+const PLAIN_EMAIL = /^[A-Za-z0-9_+-]+(?:\.[A-Za-z0-9_+-]+)*@[A-Za-z0-9.-]+$/;
+
 /** Makes a payment session for cards only: nothing that settles days later. The same key gets the same session. */
 export async function createSession(wish: NewSession): Promise<SessionSnapshot> {
   const currency = wish.currency.toLowerCase();

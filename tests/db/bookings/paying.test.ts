@@ -1,7 +1,7 @@
 import { eq, sql } from 'drizzle-orm';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { getDb } from '@/db/client';
-import { bookings } from '@/db/schema/bookings';
+import { bookingContacts, bookings } from '@/db/schema/bookings';
 import { cardPayments, journalEntries, paymentAttempts, payments, postings, refunds } from '@/db/schema/books';
 import { letters, lettersDue } from '@/db/schema/letters';
 import { applyPayment } from '@/lib/bookings/commands/apply-payment';
@@ -55,6 +55,14 @@ describe('pressing Pay', () => {
     expect(await refusalOf(startPayment(await ctxOf(gift.who, now), gift))).toBe('nothing_to_pay');
     expect(await refusalOf(startPayment(await ctxOf(silent, now), { bookingId: unsaid }))).toBe('terms_not_agreed');
     expect(await refusalOf(confirmFree(await ctxOf(late.who, now), late))).toBe('must_be_paid');
+  });
+
+  it('works for an address that is legal and rare, which the card service need not know', async () => {
+    const { day, time } = await aDayAhead();
+    const eve = await eveHolds(day.id, [time.id], now);
+    await getDb().update(bookingContacts).set({ email: '"eve marlow"@visitors.example' }).where(eq(bookingContacts.bookingId, eve.bookingId));
+
+    expect((await evePays(eve, now)).url).toMatch(/\/pay\/cs_test_/);
   });
 
   it('does nothing for a stranger’s hold', async () => {
