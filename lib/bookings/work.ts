@@ -6,7 +6,6 @@ import { getClub } from '@/lib/club/queries';
 import { systemCtx } from '@/lib/infra/system';
 import { readClock } from '@/lib/infra/clock';
 import { endHolds } from './commands/places';
-import { queueReminders } from './commands/reminders';
 import { settleAttempt, settleAttempts } from './commands/settle';
 import { compareTaken } from './queries/taken';
 import { SETTLE_ATTEMPT, settleAttemptPayload } from './jobs';
@@ -24,7 +23,6 @@ let comparedOn: Day | null = null;
 export const sweeps: (() => Promise<void>)[] = [
   async function openPayments() { await settleAttempts(await systemCtx('open payments', getClub)); },
   async function endedHolds() { await endHolds(getDb(), readClock()); },
-  async function remindersDue() { await queueReminders(await systemCtx('reminders', getClub)); },
   async function takenCompared() {
     const { db, now, club } = await systemCtx('taken compared', getClub);
     const today = dayOf(now, club.timeZone);

@@ -14,7 +14,6 @@ export const REFUSALS = {
   places_gone: 'Those places went to someone else a moment ago. Choose another time; the rest of your choice is kept.',
   entry_time_closed: 'That entry time is closed. Choose another.',
   entry_time_over: 'That entry time is over. Choose a later one.',
-  sales_ended: 'Online booking for that entry time has ended. Ask at the gate for a place.',
   open_day_not_open: 'This open day is not taking bookings.',
   wrong_open_day: 'Those times belong to different open days. Choose times of one day.',
   nobody_in_party: 'Say how many people are coming: at least one.',
@@ -42,7 +41,6 @@ export const REFUSALS = {
   wrong_password: 'That address and password do not belong together. Try again, or ask for a code by letter.',
   password_too_short: 'A password needs at least 15 characters. Four words are good.',
   password_too_common: 'That password is on every list of guessed ones. Choose another.',
-  email_taken: 'Someone signs in with that address already.',
   role_held: 'That person holds this role already.',
   last_administrator: 'The club needs at least one administrator. Give the role to someone else first.',
   // dues and books
@@ -52,7 +50,6 @@ export const REFUSALS = {
   capacity_below_taken: 'More places are taken than that. Move or give back some first.',
   entry_times_overlap: 'Another entry time at this garden starts then. Choose another start.',
   day_has_times: 'Entry times stand on that day already, so it cannot be moved. Make another open day.',
-  has_visits: 'People hold places there. Move them or give the places back first.',
   heads_over_limit: 'The garden carries fewer people than that. The host has the last word, downwards.',
   slug_taken: 'Another page has that name. Change a word.',
   // gate

@@ -14,19 +14,11 @@ import { lockLiveHold, lockOwn } from './keeping';
 /** Makes kept places the party's own, in the caller's transaction, and owes it the letters. The booking row is locked and not confirmed. */
 export async function confirmBooking(tx: Tx, ctx: Ctx, bookingId: Id<'booking'>): Promise<void> {
   await tx.update(bookings).set({ confirmedAt: ctx.now, releasedAt: null }).where(eq(bookings.id, bookingId));
-  await queueBookingLetter(tx, ctx, bookingId, 'confirmation', bookingId);
-}
-
-/**
- * Owes a party a letter of this kind about its booking, and each live visit's own invitation if it wants them. `cause`
- * keeps the same happening from being written about twice.
- */
-export async function queueBookingLetter(tx: Tx, ctx: Ctx, bookingId: Id<'booking'>, kind: 'confirmation' | 'reminder', cause: string): Promise<void> {
   const party = await findParty(tx, bookingId);
   if (!party) return;
   const { to, openDayId } = party;
-  await queueLetter(tx, { key: `${kind}:${cause}`, kind, to, madeAt: ctx.now, dueAt: ctx.now, openDayId, bookingId, facts: {} });
-  if (kind === 'confirmation' || party.emailIsConfirmed) await queueInvitations(tx, ctx, party, kind); // a reminder changes them only by the address
+  await queueLetter(tx, { key: `confirmation:${bookingId}`, kind: 'confirmation', to, madeAt: ctx.now, dueAt: ctx.now, openDayId, bookingId, facts: {} });
+  await queueInvitations(tx, ctx, party, 'confirmation');
 }
 
 /** Owes a party that wants them the invitation to each live visit as it stands when the letter goes. */
@@ -44,14 +36,14 @@ export async function queueInvitation(tx: Tx, ctx: Ctx, party: Pick<Addressee, '
 }
 
 /** Whom to write to about a booking. */
-export type Addressee = { bookingId: Id<'booking'>; to: { name: string; address: string }; openDayId: Id<'openDay'>; wantsInvitations: boolean; emailIsConfirmed: boolean };
+export type Addressee = { bookingId: Id<'booking'>; to: { name: string; address: string }; openDayId: Id<'openDay'>; wantsInvitations: boolean };
 
 /** Whom to write to about a booking, or null when it gave no address. */
 export async function findParty(tx: Tx, bookingId: Id<'booking'>): Promise<Addressee | null> {
-  const row = firstOrNull(await tx.select({ name: bookingContacts.name, email: bookingContacts.email, openDayId: bookings.openDayId, wantsInvitations: bookings.wantsInvitations, emailConfirmedAt: bookingContacts.emailConfirmedAt, madeBy: bookingContacts.madeBy })
+  const row = firstOrNull(await tx.select({ name: bookingContacts.name, email: bookingContacts.email, openDayId: bookings.openDayId, wantsInvitations: bookings.wantsInvitations })
     .from(bookings).innerJoin(bookingContacts, eq(bookingContacts.bookingId, bookings.id)).where(eq(bookings.id, bookingId)));
   if (!row || row.email === null) return null;
-  return { bookingId, to: { name: row.name, address: row.email }, openDayId: row.openDayId, wantsInvitations: row.wantsInvitations, emailIsConfirmed: row.emailConfirmedAt !== null || row.madeBy !== null };
+  return { bookingId, to: { name: row.name, address: row.email }, openDayId: row.openDayId, wantsInvitations: row.wantsInvitations };
 }
 
 /** Confirms places that cost nothing; a second press finds them confirmed and is content. Answers the booking's code. */

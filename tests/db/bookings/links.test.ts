@@ -3,7 +3,6 @@ import { beforeAll, describe, expect, it } from 'vitest';
 import { getDb } from '@/db/client';
 import { bookingContacts, visits } from '@/db/schema/bookings';
 import { placeShowings } from '@/db/schema/gardens';
-import { letters } from '@/db/schema/letters';
 import { bearerLinks } from '@/db/schema/people';
 import { findBookingByFeed, findBookingByLink, findOwnBooking } from '@/lib/bookings/access';
 import { confirmFree } from '@/lib/bookings/commands/confirm';
@@ -11,7 +10,6 @@ import { giveBack } from '@/lib/bookings/commands/give-back';
 import { keepAgain, keepLonger, letGo } from '@/lib/bookings/commands/keeping';
 import { confirmEmail, makeFeed, openBooking, revokeFeed } from '@/lib/bookings/commands/links';
 import { endHolds } from '@/lib/bookings/commands/places';
-import { queueReminders } from '@/lib/bookings/commands/reminders';
 import { showBooking, showCalendar } from '@/lib/bookings/commands/show-booking';
 import { findHold } from '@/lib/bookings/queries/hold';
 import { compareTaken } from '@/lib/bookings/queries/taken';
@@ -154,19 +152,6 @@ describe('the exact place of a garden', () => {
     await revokeFeed(await ctxOf(byLetter));
     expect(await findBookingByFeed(getDb(), hashSecret(second), NOON)).toBeNull();
     expect((await getDb().select().from(bearerLinks).where(eq(bearerLinks.kind, 'calendar'))).every((link) => link.secretHash !== second)).toBe(true);
-  });
-});
-
-describe('reminders', () => {
-  it('are owed once to each confirmed party, from the release time on', async () => {
-    const { bookingId } = await eveConfirmed();
-    const remindersOf = async () => (await getDb().select({ kind: letters.kind }).from(letters).where(eq(letters.bookingId, bookingId))).filter((letter) => letter.kind === 'reminder').length;
-
-    await queueReminders(await ctxOf(machine, addMinutes(released, -1)));
-    expect(await remindersOf()).toBe(0);
-    await queueReminders(await ctxOf(machine, released));
-    await queueReminders(await ctxOf(machine, addMinutes(released, 15)));
-    expect(await remindersOf()).toBe(1);
   });
 });
 
