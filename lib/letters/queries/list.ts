@@ -3,7 +3,6 @@ import { and, count, desc, eq, exists, ilike, isNotNull, isNull, or, sql, type S
 import { letters, lettersDue, letterTexts, sendings } from '@/db/schema/letters';
 import type { Id } from '@/lib/core/ids';
 import { firstOrNull } from '@/lib/core/only';
-import { Refusal } from '@/lib/core/refusal';
 import type { AccountCtx } from '@/lib/infra/context';
 import type { LetterListInput } from '../schema';
 import { LETTER_PAGE_ROWS, toLetterRow, type LetterPage, type LetterView } from '../views';
@@ -38,14 +37,7 @@ function conditions(db: AccountCtx['db'], { state, kind, find }: LetterListInput
   ];
 }
 
-/** One letter as the office may read it, with each try to send it. */
-export async function getLetter(ctx: AccountCtx, letterId: Id<'letter'>): Promise<LetterView> {
-  const letter = await findLetter(ctx, letterId);
-  if (!letter) throw new Refusal('not_found');
-  return letter;
-}
-
-/** As `getLetter`, but null when there is none. */
+/** One letter as the office may read it, with each try to send it; null when there is none. */
 export async function findLetter({ db }: AccountCtx, letterId: Id<'letter'>): Promise<LetterView | null> {
   const row = firstOrNull(await db.select({ ...rowColumns, text: letterTexts.text }).from(letters)
     .leftJoin(letterTexts, eq(letterTexts.letterId, letters.id)).leftJoin(lettersDue, eq(lettersDue.letterId, letters.id)).where(eq(letters.id, letterId)));
