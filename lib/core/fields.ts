@@ -59,8 +59,8 @@ export const phoneField = optionalTextField(40).refine((text) => text === null |
   error: 'A telephone number has digits, spaces and perhaps a plus. Leave it empty if you like.',
 });
 
-/** A calendar day from a date box. */
-export const dayField = z.string({ error: 'Choose a day.' }).refine(isDay, { error: 'Choose a day.' });
+/** A calendar day from a date box, of a year that a club has lived or may plan for. */
+export const dayField = z.string({ error: 'Choose a day.' }).refine((text) => isDay(text) && text >= '1900' && text < '2200', { error: 'Choose a day.' });
 
 /** A wall-clock time from a time box, `HH:MM`. */
 export const timeField = z.string({ error: 'Choose a time.' }).regex(/^([01]\d|2[0-3]):[0-5]\d$/, { error: 'Choose a time like 10:45.' });

@@ -6,6 +6,7 @@ import { contactDetails, households, people } from '@/db/schema/people';
 import { likeOf, PAGE_ROWS, type Listing } from '@/lib/core/listing';
 import { dayOf } from '@/lib/core/time';
 import type { AccountCtx } from '@/lib/infra/context';
+import { may } from '@/lib/people/rules/capabilities';
 import { standingOf, type Standing } from './rules/standing';
 import type { RollFilter, RollSort } from './schema';
 import { classKey, owedMinor, standingKind, termEnd } from './standing-sql';
@@ -37,7 +38,7 @@ export async function rollLines(ctx: AccountCtx, asked: Asked, extent: 'page' | 
     className: membershipClasses.name, isForLife: sql<boolean>`coalesce(${membershipClasses.isForLife}, false)`, termEnd, owedMinor, railways, total: sql<number>`count(*) over ()::int`,
   })
     .from(households).leftJoin(membershipClasses, eq(membershipClasses.key, classKey))
-    .where(and(matching(asked.find), asked.standing === 'all' ? undefined : eq(standingKind(today, club.duesKeptOnDays), asked.standing)))
+    .where(and(matching(asked.find, may(ctx.actor.roles, 'people.see')), asked.standing === 'all' ? undefined : eq(standingKind(today, club.duesKeptOnDays), asked.standing)))
     .orderBy(asked.order === 'asc' ? asc(order) : desc(order), asc(households.memberNumber))
     .limit(limit).offset(extent === 'page' ? (asked.page - 1) * PAGE_ROWS : 0);
   const lines = rows.map((row): RollLine => ({
@@ -47,16 +48,16 @@ export async function rollLines(ctx: AccountCtx, asked: Asked, extent: 'page' | 
   return { lines, total: rows[0]?.total ?? 0 };
 }
 
-/* By name, railway, street, e-mail or number. */
-function matching(find: string): SQL | undefined {
+/* By name, railway or number; by street and e-mail only for who may see them, or finding would tell where somebody lives. */
+function matching(find: string, seesContacts: boolean): SQL | undefined {
   const like = likeOf(find);
   if (like === null) return undefined;
   return or(
     ilike(households.name, like),
     /^\d{1,6}$/.test(find) ? eq(households.memberNumber, Number(find)) : undefined,
     sql`exists (select from ${gardens} g where g.household_id = ${households.id} and g.railway_name ilike ${like})`,
-    sql`exists (select from ${people} p left join ${contactDetails} c on c.person_id = p.id where p.household_id = ${households.id}
-      and (p.given_name || ' ' || p.family_name ilike ${like} or c.email ilike ${like} or c.street ilike ${like}))`,
+    sql`exists (select from ${people} p where p.household_id = ${households.id} and p.given_name || ' ' || p.family_name ilike ${like})`,
+    seesContacts ? sql`exists (select from ${people} p join ${contactDetails} c on c.person_id = p.id where p.household_id = ${households.id} and (c.email ilike ${like} or c.street ilike ${like}))` : undefined,
   );
 }
 

@@ -9,7 +9,9 @@ export const FACTS_A_BATCH = 200;
 const instant = z.iso.datetime().pipe(z.coerce.date());
 const heads = z.number().int().min(0).max(99);
 const people = { adults: heads, children: heads, babes: heads };
-const reason = z.string().trim().max(200).transform((text) => text || null).nullable();
+/* A batch is never lost for its words: what no text of the database may hold is left out of them. */
+const words = (max: number) => z.string().max(max).transform((text) => text.replaceAll('\u0000', ''));
+const reason = words(200).transform((text) => text.trim() || null).nullable();
 
 /** A device's own key, made on the phone: 32 random bytes in base64url (RFC 4648 section 5). */
 export const deviceKey = z.string().regex(/^[A-Za-z0-9_-]{43}$/, { error: 'That is not a gate device.' });
@@ -23,14 +25,14 @@ export const deviceNumber = z.object({ number: z.number().int() });
 
 /** One fact as a phone sends it. A refusal and an admission name a visit; an undo names what it takes back. */
 export const sentFact = z
-  .object({ id: idField<'gateFact'>(), kind: z.enum(FACT_KINDS), undoesId: idField<'gateFact'>().nullable(), visitId: idField<'visit'>().nullable(), ...people, at: instant, verdict: z.string().max(40).nullable(), reason })
+  .object({ id: idField<'gateFact'>(), kind: z.enum(FACT_KINDS), undoesId: idField<'gateFact'>().nullable(), visitId: idField<'visit'>().nullable(), ...people, at: instant, verdict: words(40).nullable(), reason })
   .refine((fact) => (fact.kind === 'undo') === (fact.undoesId !== null), { error: 'An undo names what it takes back, and nothing else does.' })
   .refine((fact) => fact.kind !== 'admit' || fact.visitId !== null, { error: 'An admission names its ticket.' })
   .refine((fact) => fact.kind === 'undo' || fact.kind === 'refuse' || fact.adults + fact.children + fact.babes > 0, { error: 'Say how many people.' });
 export type SentFact = z.output<typeof sentFact>;
 
 /** A batch of facts with the phone's own time of sending, by which its clock is set right. */
-export const recordFactsInput = z.object({ phoneTime: instant, listVersion: z.string().max(80), facts: z.array(sentFact).min(1).max(FACTS_A_BATCH) });
+export const recordFactsInput = z.object({ phoneTime: instant, listVersion: words(80), facts: z.array(sentFact).min(1).max(FACTS_A_BATCH) });
 export type RecordFactsInput = z.output<typeof recordFactsInput>;
 
 /** What became of each fact. `kept` also answers a repeat; `refused` facts are kept as refusals. */

@@ -1,12 +1,13 @@
+import { eq } from 'drizzle-orm';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { getDb } from '@/db/client';
 import { charges, terms } from '@/db/schema/dues';
-import { households, people } from '@/db/schema/people';
+import { contactDetails, households, people } from '@/db/schema/people';
 import { only } from '@/lib/core/only';
 import { addDays } from '@/lib/core/time';
 import { rollLines, rollSums } from '@/lib/dues/roll-queries';
 import { ROLL_FILTERS, rollInput } from '@/lib/dues/schema';
-import { aClub, ctxOf, NOON, wren } from '@/tests/support/cast';
+import { ada, aClub, ctxOf, dov, NOON, wren } from '@/tests/support/cast';
 
 /** The same numbers in every run: a linear congruential generator (constants of Numerical Recipes). */
 function dice(seed: number) {
@@ -80,5 +81,15 @@ describe('the roll', () => {
     expect((await all({ find: 'number 12' })).lines.map((line) => line.memberNumber)).toContain(5012);
     const owed = (await all({ sort: 'owed', order: 'desc' })).lines.map((line) => line.owedMinor);
     expect(owed).toEqual([...owed].sort((a, b) => b - a));
+  });
+
+  it('is searched by street and e-mail only for who may see how people are reached', async () => {
+    const member = await ada();
+    await getDb().update(contactDetails).set({ street: '9 Quiet Mews' }).where(eq(contactDetails.email, member.email));
+    const found = async (officer: Awaited<ReturnType<typeof wren>>, find: string) => (await rollLines(await ctxOf(officer), rollInput.parse({ find }))).total;
+
+    expect([await found(await wren(), 'quiet mews'), await found(await wren(), member.email)]).toEqual([1, 1]);
+    expect([await found(await dov(), 'quiet mews'), await found(await dov(), member.email)]).toEqual([0, 0]);
+    expect(await found(await dov(), 'Fennimore')).toBe(1);
   });
 });

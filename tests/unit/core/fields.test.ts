@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { emailField, headsField, isEmail, notesField, phoneField, textField, tickField, wholeField } from '@/lib/core/fields';
+import { dayField, emailField, headsField, isEmail, notesField, phoneField, textField, tickField, wholeField } from '@/lib/core/fields';
 
 const sentence = (result: { success: boolean; error?: { issues: { message: string }[] } }) => result.error?.issues[0]?.message;
 
@@ -51,6 +51,10 @@ describe('what people type', () => {
 
   it.each([['+1 555 0100', true], ['', true], ['abc', false], ['12', false]])('a telephone number %j: %s', (typed, expected) => {
     expect(phoneField.safeParse(typed).success).toBe(expected);
+  });
+
+  it.each([['2027-05-15', true], ['1900-01-01', true], ['2199-12-31', true], ['1899-12-31', false], ['0000-01-01', false], ['9999-12-31', false], ['2027-02-29', false], ['', false]])('a day %j: %s', (typed, expected) => {
+    expect(dayField.safeParse(typed).success).toBe(expected);
   });
 
   it('reads whole numbers within their bounds only', () => {

@@ -25,6 +25,12 @@ describe('the wire format of gate facts', () => {
     expect(sentFact.safeParse({ ...admit, ...changes }).success).toBe(false);
   });
 
+  test('what no text may hold is left out of the words a phone sends', () => {
+    const sent = recordFactsInput.parse({ phoneTime: admit.at, listVersion: 'v\u00001', facts: [{ ...admit, verdict: 'let\u0000_in', reason: 'wet\u0000 feet' }] });
+
+    expect([sent.listVersion, sent.facts[0]?.verdict, sent.facts[0]?.reason]).toEqual(['v1', 'let_in', 'wet feet']);
+  });
+
   test('an empty reason is no reason', () => {
     expect(sentFact.parse({ ...admit, reason: '  ' }).reason).toBeNull();
   });

@@ -12,6 +12,7 @@ import { lineFacts } from '@/lib/dues/queries';
 import { rollLines, rollSums } from '@/lib/dues/roll-queries';
 import { lineOf } from '@/lib/dues/rules/line';
 import { rollInput } from '@/lib/dues/schema';
+import { may } from '@/lib/people/rules/capabilities';
 import { pageContext } from '@/lib/web/context';
 import { OfficePage } from '../office-page';
 
@@ -29,7 +30,7 @@ export default async function RollPage({ searchParams }: { searchParams: Promise
   return (
     <OfficePage ctx={ctx} here="/office/roll" bill={<Bill name="The roll" line={`As it stands on ${formatDay(today, club)}`} sums={<RollSums sums={sums} shown={asked.standing} />} {...(sums.households + sums.by.left === 0 ? { rail: <RailRule state="empty" /> } : {})} />} foot="How people are reached is shown only where a household is opened.">
       <h2>Households</h2>
-      <FindForm path="/office/roll" label="Name, railway, street or number" find={asked.find} submit="Look on the roll" keep={keep} />
+      <FindForm path="/office/roll" label={may(ctx.actor.roles, 'people.see') ? 'Name, railway, street or number' : 'Name, railway or number'} find={asked.find} submit="Look on the roll" keep={keep} />
       <RollTable lines={lines} asked={asked} keep={keep} open={opened?.id ?? null} line={<HouseholdLine stations={stations} club={club} />} club={club} />
       <Pages path="/office/roll" listing={asked} what="households" shown={lines.length} total={total} keep={keep} />
       <p className="mt-4"><CsvLink href={`/office/roll/csv?${new URLSearchParams({ ...keep, find: asked.find, sort: asked.sort, order: asked.order })}`} what="this list" /></p>
