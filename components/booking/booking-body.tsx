@@ -1,5 +1,5 @@
 import Link from 'next/link';
-import { VisitorLine } from '@/components/day-graph/visitor-line';
+import { OwnDay } from '@/components/day-graph/visitor-line';
 import { Post } from '@/components/drawing/post';
 import { Columns, Part } from '@/components/layout/columns';
 import { TicketPair } from '@/components/ticket/ticket-pair';
@@ -29,7 +29,7 @@ export function BookingBody({ page, actions }: { page: BookingPage; actions: Boo
           </p>
         </div>
       ) : null}
-      {page.day ? <VisitorLine board={page.day.board} day={page.day.line} postOf={(stopId) => <PostOf page={page} stopId={stopId} />} /> : null}
+      {page.day ? <OwnDay board={page.day.board} day={page.day.line} postOf={(stopId) => <PostOf page={page} stopId={stopId} />} /> : null}
       <section className="part">
         <h2 className="mb-1">The way, and changes</h2>
         {page.addresses === '' ? null : <p className="note mb-4">{page.addresses}</p>}

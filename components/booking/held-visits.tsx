@@ -25,7 +25,7 @@ export function HeldVisits({ hold, locale }: HeldVisitsProps) {
               </span>
             </th>
             <td className="figures hidden py-2 pr-4 text-xl font-semibold sm:table-cell">{visit.at}</td>
-            <td className="hidden py-2 pr-4 whitespace-nowrap sm:table-cell">{visit.people}</td>
+            <td className="hidden py-2 pr-4 sm:table-cell">{visit.people}</td>
             <td className="figures py-2 text-right">{visit.costMinor === 0 ? 'free' : <Money amountMinor={visit.costMinor} currency={hold.currency} locale={locale} />}</td>
           </tr>
         ))}

@@ -34,6 +34,15 @@ export function VisitorLine({ board, day, postOf }: VisitorLineProps) {
   );
 }
 
+/** The party's day on a page without the board. */
+export function OwnDay(props: VisitorLineProps) {
+  return (
+    <div className={styles.alone}>
+      <VisitorLine {...props} />
+    </div>
+  );
+}
+
 const percent = (share: number) => `${Math.round(share * 10_000) / 100}%`;
 
 function Plot({ graph }: { graph: Graph }) {
