@@ -54,7 +54,8 @@ async function decide(db: Queryable, statement: () => ReturnType<typeof sql>): P
       const refused = [...REFUSED_BY_DATABASE].find(([code]) => code === state);
       if (refused) throw new Refusal(refused[1]);
       const isWorthAnother = TRIED_AGAIN.has(state) || DRAWN_AGAIN.has(constraintOf(error) ?? '');
-      if (!isWorthAnother || tries === 4) throw error;
+      if (!isWorthAnother) throw error;
+      if (tries === 4) throw new Refusal('busy');
     }
   }
 }

@@ -17,7 +17,7 @@ import { only } from '@/lib/core/only';
 import { addMinutes } from '@/lib/core/time';
 import { aBrowser, aClub, anEntryTime, aStop, cleo, ctxOf, dov, NOON } from '../../support/cast';
 import type { CardsStandIn } from '../../support/cards-stand-in';
-import { liveHeadsAt, takenAt } from './hold-cast';
+import { keep, liveHeadsAt, refusalOf, takenAt } from './hold-cast';
 import { aDayAhead, cardsAt, eveHolds, evePays, machine, paidSnapshot } from './pay-cast';
 
 let cards: CardsStandIn;
@@ -72,6 +72,21 @@ describe('places whose money the treasurer gave back already', () => {
     await giveBackPayment(await ctxOf(await dov()), { paymentId, amount: '15.00', reason: 'a hard week' });
 
     expect(await changeVisit(await ctxOf(by), { visitId, version: 1, entryTimeId: cheaper.id, insists: true })).toEqual({ refundMinor: 100 });
+  });
+});
+
+describe('an entry time that stays locked', () => {
+  it('is answered in words, and nothing is kept', async () => {
+    const { day, time } = await aDayAhead();
+    const other = await getDb().$client.connect();
+    await other.query('begin');
+    await other.query('select 1 from entry_times where id = $1 for update', [time.id]);
+
+    expect(await refusalOf(keep(day.id, [time.id]))).toBe('busy');
+
+    await other.query('rollback');
+    other.release();
+    expect([await takenAt(time.id), await liveHeadsAt(time.id)]).toEqual([0, 0]);
   });
 });
 
