@@ -58,7 +58,8 @@ export const GOOD_CARD = '4242 4242 4242 4242';
 export const DECLINED_CARD = '4000 0000 0000 0002';
 
 /** Types a card on the card service's own page and presses its button. */
-export async function payWith(page: Page, card: string): Promise<void> {
+export async function payWith(page: Page, card: string, email?: string): Promise<void> {
+  if (email !== undefined) await page.getByLabel('E-mail').fill(email); // asked for only where the portal could not tell it
   await page.getByLabel('Card number').fill(card);
   await page.getByRole('button', { name: /^Pay / }).click();
 }
