@@ -1,11 +1,11 @@
-import { formatMoney } from '@/lib/core/money';
+import { formatMoney, type Money } from '@/lib/core/money';
 import { dayOf, formatDay, formatTime, type ClubTime } from '@/lib/core/time';
 import type { Id } from '@/lib/core/ids';
 import { chosenCells } from '@/lib/opendays/rules/board';
 import { dayLine, type DayLine } from '@/lib/opendays/rules/day-line';
 import { partyInWords } from '@/lib/opendays/rules/prices';
 import type { BoardView } from '@/lib/opendays/views';
-import { changeRefusal, refundRuleWords, refundWords, type RefundRule } from '../rules/refund';
+import { changeRefusal, refundMinor, refundRuleWords, refundWords, type RefundRule } from '../rules/refund';
 import { costMinor } from '../rules/party';
 import { otherTimes } from '../rules/other-times';
 import { sheetTitle, toTicketView, type DirectionsView, type TicketSheetView, type TicketView } from '../rules/ticket-view';
@@ -56,7 +56,7 @@ type Facts = {
   booking: { code: string; heldOn: string; title: string; placeLine: string; totalMinor: number; releasesAt: Date; isCancelled: boolean; isCalledOff: boolean; emailIsConfirmed: boolean; name: string; shown: readonly unknown[] };
   visits: readonly PageVisitFacts[];
   day: { board: BoardView } | null;
-  more: { email: string | null; hasFeed: boolean; receipt: string | null; paidMinor: number; backMinor: number };
+  more: { email: string | null; hasFeed: boolean; receipt: string | null; paidMinor: number; backMinor: number; leftMinor: number };
   mayConfirmEmail: boolean;
 };
 type PageClub = ClubTime & RefundRule & { name: string; currency: string };
@@ -66,7 +66,7 @@ export function toBookingPage({ booking, visits, day, more, mayConfirmEmail }: F
   const live = visits.filter((visit) => visit.givenBackAt === null);
   const state = booking.isCalledOff ? 'called-off' : booking.isCancelled ? 'cancelled' : 'live';
   const board = state === 'live' ? (day?.board ?? null) : null;
-  const pageVisits = visits.map((visit) => toPageVisit(visit, { booking, live, board, isLive: state === 'live' }, club, now));
+  const pageVisits = visits.map((visit) => toPageVisit(visit, { booking, live, board, isLive: state === 'live', leftMinor: more.leftMinor }, club, now));
   const sums = sumsOf(live, more, club);
   return {
     code: booking.code, title: live.length === 0 ? booking.title : sheetTitle(live.length, booking.heldOn, club), line: `${booking.title}, ${formatDay(booking.heldOn, club)}, ${booking.placeLine}`,
@@ -99,16 +99,23 @@ function addressWords(booking: Facts['booking'], club: PageClub, now: Date): str
 /* A neighbourhood is named as a place ("the ridge") or as a whereabouts ("above the weir"). */
 const areaInWords = (area: string) => (area.startsWith('the ') ? `In ${area}` : area.replace(/^./u, (letter) => letter.toUpperCase()));
 
-function toPageVisit(visit: PageVisitFacts, around: { booking: Facts['booking']; live: readonly PageVisitFacts[]; board: BoardView | null; isLive: boolean }, club: PageClub, now: Date): PageVisit {
+function toPageVisit(visit: PageVisitFacts, around: { booking: Facts['booking']; live: readonly PageVisitFacts[]; board: BoardView | null; isLive: boolean; leftMinor: number }, club: PageClub, now: Date): PageVisit {
   const { adults, children, babes, arrivesAt } = visit;
   const refusal = visit.givenBackAt !== null || !around.isLive ? 'already_given_back' : visit.cameInAt !== null ? 'already_came_in' : changeRefusal(arrivesAt, club, now);
   const paid = { amountMinor: costMinor(visit, visit), currency: club.currency };
   return {
     visitId: visit.visitId, version: visit.version, shortName: visit.shortName, at: formatTime(arrivesAt, club), place: visit.address ?? areaInWords(visit.area), directions: visit.directions,
     ticket: toTicketView({ ...visit, entryAt: arrivesAt, code: around.booking.code, state: stateOf(visit, club) }, club), cautions: cautionsOf(visit),
-    change: refusal === null ? { people: { adults, children, babes }, rule: refundRuleWords(arrivesAt, club, club), now: refundWords(paid, arrivesAt, club, club, now), others: around.board ? otherTimes(around.board, visit, around.live) : [] } : null,
+    change: refusal === null ? { people: { adults, children, babes }, rule: refundRuleWords(arrivesAt, club, club), now: returnWords(paid, around.leftMinor, arrivesAt, club, now), others: around.board ? otherTimes(around.board, visit, around.live) : [] } : null,
     ended: refusal === 'changes_over' ? 'Changes ended before this entry time. Ask the coordinator.' : null,
   };
+}
+
+/* An officer may have given money back before: then no more than what is left of the payment is promised. */
+function returnWords(paid: Money, leftMinor: number, entryAt: Date, club: PageClub, now: Date): string {
+  if (refundMinor(paid.amountMinor, entryAt, club, now) <= leftMinor) return refundWords(paid, entryAt, club, club, now);
+  if (leftMinor === 0) return 'Nothing comes back any more: your payment went back before. Someone else can come.';
+  return `${formatMoney({ amountMinor: leftMinor, currency: paid.currency }, club.locale)} comes back the way you paid: the rest of your payment went back before.`;
 }
 
 function stateOf(visit: PageVisitFacts, club: PageClub): TicketView['state'] {
@@ -117,8 +124,11 @@ function stateOf(visit: PageVisitFacts, club: PageClub): TicketView['state'] {
 }
 
 function cautionsOf(visit: PageVisitFacts): string[] {
-  return [...(visit.hasWater ? ['There is water: hold small hands.'] : []), ...(visit.isSteam ? ['Live steam is hot: look, do not touch.'] : []), ...(visit.stepsNote === null ? [] : [visit.stepsNote]), ...visit.cautions];
+  return [...(visit.hasWater ? ['There is water: hold small hands.'] : []), ...(visit.isSteam ? ['Live steam is hot: look, do not touch.'] : []), ...(visit.stepsNote === null ? [] : [visit.stepsNote]), ...visit.cautions].map(asSentence);
 }
+
+/** A host's note as a sentence of its own: "three steps up" becomes "Three steps up." */
+const asSentence = (note: string) => `${note.charAt(0).toUpperCase()}${note.slice(1)}${/[.!?]$/.test(note) ? '' : '.'}`;
 
 function toDirections(visit: PageVisitFacts, club: PageClub): DirectionsView {
   return {
