@@ -8,13 +8,13 @@ import { keptSecret } from './secrets';
 import { command, needRoom, step } from './step';
 
 const FOLDERS = ['app', 'components', 'lib', 'db', 'public'];
-const FILES = ['proxy.ts', 'next.config.js', 'postcss.config.mjs', 'package-lock.json', 'tsconfig.json', 'scripts/setup/tsconfig.build.json'];
+const FILES = ['proxy.ts', 'instrumentation.ts', 'next.config.js', 'postcss.config.mjs', 'package-lock.json', 'tsconfig.json', 'scripts/setup/tsconfig.build.json'];
 const KEPT = 3;
 
 /** A fingerprint of everything that the build reads. */
 export function sourceHash(): string {
   const hash = createHash('sha256').update(process.version);
-  const inside = FOLDERS.flatMap((folder) => filesIn(folder)).filter((name) => !name.startsWith('public/vendor/'));
+  const inside = FOLDERS.flatMap((folder) => filesIn(folder)).filter((name) => !/^public\/(vendor|pictures)\//.test(name));
   for (const name of [...inside.sort(), ...FILES]) {
     const path = join(root, name);
     if (existsSync(path)) hash.update(name).update('\0').update(readFileSync(path)).update('\0');
