@@ -15,7 +15,7 @@ type FindFormProps = {
 export function FindForm({ path, label, find, submit, keep = {} }: FindFormProps) {
   return (
     <form action={path} method="get" role="search" className="my-4 flex flex-wrap items-end gap-4 print:hidden">
-      <label className="grid gap-1 font-semibold">
+      <label className="grid max-w-full grid-cols-1 gap-1 font-semibold">
         {label}
         <input type="search" name="find" defaultValue={find} maxLength={200} className={controlLook('half', 'text')} />
       </label>
