@@ -82,10 +82,6 @@ function refundOf(refund: Stripe.Refund): RefundSnapshot {
   return { refundId: refund.id, ourId: refund.metadata?.['refund'] ?? null, state, amountMinor: refund.amount };
 }
 
-/* A quoted or otherwise rare local part is a legal address (RFC 5321 section 4.1.2) that the processor may refuse together with the
-   whole session; its page asks for one itself when none is given. */
-const isPlain = (email: string) => /^[\w.'+-]+@/.test(email);
-
 /** An address that every processor takes; a rarer one (a quoted local part is legal) is not worth a payment that fails. The payer types it there. */
 const PLAIN_EMAIL = /^[A-Za-z0-9_+-]+(?:\.[A-Za-z0-9_+-]+)*@[A-Za-z0-9.-]+$/;
 
@@ -99,7 +95,7 @@ export async function createSession(wish: NewSession): Promise<SessionSnapshot> 
     client_reference_id: wish.attemptId,
     metadata: { attempt: wish.attemptId },
     payment_intent_data: { metadata: { attempt: wish.attemptId } },
-    ...(wish.email !== null && isPlain(wish.email) ? { customer_email: wish.email } : {}),
+    ...(wish.email !== null && PLAIN_EMAIL.test(wish.email) ? { customer_email: wish.email } : {}),
     expires_at: Math.ceil(wish.expiresAt.getTime() / 1000),
     success_url: wish.doneUrl,
     cancel_url: wish.backUrl,
