@@ -70,6 +70,7 @@ async function findMore(db: Queryable, bookingId: Id<'booking'>) {
     receipt: sql<string | null>`(select ${payments.receiptYear} || '/' || lpad(${payments.receiptNumber}::text, 4, '0') from ${payments} where ${payments.bookingId} = ${bookings.id} order by ${payments.recordedAt} limit 1)`,
     paidMinor: sql<number>`coalesce((select sum(${payments.amountMinor})::int from ${payments} where ${payments.bookingId} = ${bookings.id}), 0)`,
     backMinor: sql<number>`coalesce((select sum(${refunds.amountMinor})::int from ${refunds} join ${payments} on ${payments.id} = ${refunds.paymentId} where ${payments.bookingId} = ${bookings.id} and ${refunds.failedAt} is null), 0)`,
+    leftMinor: sql<number>`coalesce((select sum(${payments.amountMinor} - coalesce((select sum(${refunds.amountMinor}) from ${refunds} where ${refunds.paymentId} = ${payments.id}), 0))::int from ${payments} where ${payments.bookingId} = ${bookings.id}), 0)`,
   }).from(bookings).innerJoin(bookingContacts, eq(bookingContacts.bookingId, bookings.id)).where(eq(bookings.id, bookingId)));
 }
 

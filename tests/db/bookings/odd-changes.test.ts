@@ -8,6 +8,7 @@ import { prices } from '@/db/schema/opendays';
 import { applyPayment } from '@/lib/bookings/commands/apply-payment';
 import { changeVisit } from '@/lib/bookings/commands/change';
 import { giveBack, giveBackForParty } from '@/lib/bookings/commands/give-back';
+import { showBooking } from '@/lib/bookings/commands/show-booking';
 import { endHolds } from '@/lib/bookings/commands/places';
 import { holdPlaces } from '@/lib/bookings/commands/hold';
 import { holdInput } from '@/lib/bookings/schema';
@@ -53,6 +54,16 @@ describe('places whose money the treasurer gave back already', () => {
     expect([await takenAt(time.id), await liveHeadsAt(time.id)]).toEqual([0, 0]);
     expect(await backOf(paymentId)).toEqual([1600]);
     expect(await toldOf(bookingId, 'given-back')).toMatchObject([{ refundMinor: 0 }]);
+  });
+
+  it('are promised no more than what is left, before the button', async () => {
+    const { paymentId, by } = await evePaid();
+    const promise = async () => (await showBooking(await ctxOf(by))).visits[0]?.change?.now;
+    expect(await promise()).toBe('All $16.00 comes back the way you paid.');
+
+    await giveBackPayment(await ctxOf(await dov()), { paymentId, amount: '10.00', reason: 'a hard week' });
+
+    expect(await promise()).toBe('$6.00 comes back the way you paid: the rest of your payment went back before.');
   });
 
   it('return only what is left of the payment, whoever gives them back', async () => {
