@@ -16,14 +16,14 @@ export function BookingList({ bookings, club, link }: BookingListProps) {
       <ul className="border-t-2 border-ink">
         {booking.visits.map((visit) => <VisitLine key={visit.id} visit={visit} club={club} />)}
       </ul>
-      <Link className="link inline-flex min-h-11 items-center" href={`/bookings/${booking.code}`}>{link}<span className="sr-only">: {booking.day}</span></Link>
+      <Link className="link relative inline-flex min-h-11 items-center" href={`/bookings/${booking.code}`}>{link}<span className="sr-only">: {booking.day}</span></Link>
     </section>
   ));
 }
 
 function VisitLine({ visit, club }: { visit: Visit; club: ClubTime }) {
   return (
-    <li className="flex flex-wrap items-baseline gap-x-5 border-b border-rule py-2">
+    <li className="flex flex-wrap items-baseline gap-x-5 overflow-x-clip border-b border-rule py-2">
       <strong className="w-20 font-mono"><When at={visit.opensAt} show="time" club={club} /></strong>
       <NipCard stopNumber={visit.number} width={38} />
       <span className={visit.givenBackAt === null ? 'font-semibold' : ''}>{visit.number} {visit.garden}</span>
