@@ -19,12 +19,16 @@ export function proxy(request: NextRequest) {
   headers.set('content-security-policy', policy);
   const response = NextResponse.next({ request: { headers } });
   response.headers.set('content-security-policy', policy);
+  if (siteOrigin()?.startsWith('https:')) response.headers.set('strict-transport-security', 'max-age=31536000'); // a year (RFC 6797 section 6.1)
   return response;
 }
 
+/** The site's own origin; its address may be set with a path or a slash at the end. */
+const siteOrigin = (): string | null => (process.env.SITE_URL === undefined ? null : new URL(process.env.SITE_URL).origin);
+
 function refusePost(request: NextRequest): Response | null {
   const origin = request.headers.get('origin');
-  if (origin !== null && origin !== `${request.nextUrl.protocol}//${request.headers.get('host')}` && origin !== process.env.SITE_URL) {
+  if (origin !== null && origin !== `${request.nextUrl.protocol}//${request.headers.get('host')}` && origin !== siteOrigin()) {
     return new Response('That came from another website, so it was not done. Open the page again and try from there.', { status: 403 });
   }
   if (Number(request.headers.get('content-length') ?? 0) > MAX_FORM_BYTES) {

@@ -1,5 +1,5 @@
 import 'server-only';
-import { eq, sql } from 'drizzle-orm';
+import { sql } from 'drizzle-orm';
 import type { Tx } from '@/db/client';
 import { journalEntries, postings, receiptCounters } from '@/db/schema/books';
 import type { Id } from '@/lib/core/ids';
@@ -35,20 +35,6 @@ export async function postEntry(tx: Tx, ctx: Ctx, event: BusinessEvent, source: 
 }
 
 const accountOf = ({ actor }: Ctx) => (actor.kind === 'account' ? actor.accountId : null);
-
-/** Books the exact opposite of an entry, once; null when it was reversed before. */
-export async function reverseEntry(tx: Tx, ctx: Ctx, entryId: Id<'journalEntry'>): Promise<Id<'journalEntry'> | null> {
-  const entry = firstOrNull(await tx.insert(journalEntries).values({
-    kind: 'reversal', sourceId: entryId, happenedOn: dayOf(ctx.now, ctx.club.timeZone), madeAt: ctx.now, madeBy: accountOf(ctx), reversesId: entryId,
-  }).onConflictDoNothing().returning({ id: journalEntries.id }));
-  if (!entry) return null;
-  const lines = await tx.select({ account: postings.account, fund: postings.fund, amountMinor: postings.amountMinor, currency: postings.currency, openDayId: postings.openDayId, householdId: postings.householdId })
-    .from(postings).where(eq(postings.entryId, entryId));
-  await tx.insert(postings).values(lines.map((line) => ({
-    entryId: entry.id, account: line.account, fund: line.fund, amountMinor: -line.amountMinor, currency: line.currency, openDayId: line.openDayId, householdId: line.householdId,
-  })));
-  return entry.id;
-}
 
 /** The next receipt number of a year. Locks the year's counter until the transaction ends, so take it last: no number is ever left out. */
 export async function nextReceipt(tx: Tx, year: number): Promise<{ year: number; number: number }> {

@@ -3,6 +3,7 @@ import { cookies } from 'next/headers';
 import { redirect } from 'next/navigation';
 import { CODE_MINUTES } from '@/lib/people/commands/sign-in';
 import type { Id } from '@/lib/core/ids';
+import { env } from '@/lib/infra/env';
 import { endSession, startSession } from '@/lib/web/auth';
 
 /** Gives the browser its session, then leads to the account's own pages. */
@@ -21,7 +22,7 @@ const ASKED = 'asked-code';
 
 /** Leads to the box for the code; the address travels in a cookie, never in the page's own address. */
 export async function askedThen({ email }: { email: string }): Promise<void> {
-  (await cookies()).set(ASKED, email, { httpOnly: true, sameSite: 'lax', path: '/sign-in', maxAge: CODE_MINUTES * 60 });
+  (await cookies()).set(ASKED, email, { httpOnly: true, sameSite: 'lax', secure: env().SITE_URL.startsWith('https:'), path: '/sign-in', maxAge: CODE_MINUTES * 60 });
   redirect('/sign-in/code');
 }
 

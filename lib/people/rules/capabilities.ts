@@ -11,9 +11,6 @@ const GRANTS = {
 /** A thing an officer may do. */
 export type Capability = (typeof GRANTS)[Role][number];
 
-/** Every capability there is, each once. */
-export const CAPABILITIES: readonly Capability[] = [...new Set(Object.values(GRANTS).flat())];
-
 /** Whether someone who holds `roles` may do what `capability` names. */
 export const may = (roles: readonly Role[], capability: Capability): boolean =>
   roles.some((role) => GRANTS[role].some((granted) => granted === capability));

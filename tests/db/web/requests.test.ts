@@ -1,5 +1,5 @@
 import { NextRequest } from 'next/server';
-import { beforeAll, describe, expect, it, vi } from 'vitest';
+import { afterEach, beforeAll, describe, expect, it, vi } from 'vitest';
 import { asBrowser, frameworkHeaders, sessionOf } from '@/tests/support/request';
 import { POST as postHold } from '@/app/api/holds/route';
 import { GET as getPlate } from '@/app/(public)/gardens/[slug]/plate/route';
@@ -55,5 +55,20 @@ describe('a request that is not one of ours', () => {
     const member = await sessionOf((await ben()).signInId);
 
     for (const code of ['x', 'AAAA\u0000AAA', 'a'.repeat(500)]) expect((await asBrowser(member, () => getCalendar(ask('/bookings/x/calendar.ics'), params({ code })))).status, code).toBe(404);
+  });
+});
+
+describe('a page of a site on https', () => {
+  const site = process.env['SITE_URL'];
+  afterEach(() => { process.env['SITE_URL'] = site; });
+
+  it('tells browsers to stay on https, and takes forms from its own pages though its address is set with a path', () => {
+    const form = new NextRequest('http://10.0.0.7:3000/sign-in', { method: 'POST', headers: { host: '10.0.0.7:3000', origin: 'https://club.example' } });
+    expect(proxy(ask('/')).headers.get('strict-transport-security')).toBeNull();
+
+    process.env['SITE_URL'] = 'https://club.example/';
+
+    expect(proxy(ask('/')).headers.get('strict-transport-security')).toBe('max-age=31536000');
+    expect(proxy(form).status).toBe(200);
   });
 });
