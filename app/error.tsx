@@ -10,6 +10,9 @@ const digestOf = (error: unknown) =>
   typeof error === 'object' && error !== null && 'digest' in error && typeof error.digest === 'string' ? error.digest : null;
 
 /** The page when something broke: what it means for the reader, the way back, and a number to quote. */
+
+const HOME = '/';
+
 export default function ErrorPage({ error, retry }: ErrorPageProps) {
   const digest = digestOf(error);
   return (
@@ -29,7 +32,7 @@ export default function ErrorPage({ error, retry }: ErrorPageProps) {
           Try that again
         </Button>
         {/* A whole new page, not a client-side step: what broke may be the script itself. */}
-        <a href="/" className="link inline-flex min-h-11 items-center">
+        <a href={HOME} className="link inline-flex min-h-11 items-center">
           Begin at the first page
         </a>
       </p>

@@ -70,8 +70,8 @@ const routeFiles = inApp.filter((path) => path.endsWith('/route.ts') && !/^app\/
 async function namesIn(files: string[]): Promise<Map<string, unknown>> {
   const found = new Map<string, unknown>();
   for (const file of files) {
-    const module: Record<string, unknown> = await import(file);
-    for (const [name, value] of Object.entries(module)) found.set(file.endsWith('route.ts') ? `${name} ${addressOf(file)}` : name, value);
+    const exported: Record<string, unknown> = await import(file);
+    for (const [name, value] of Object.entries(exported)) found.set(file.endsWith('route.ts') ? `${name} ${addressOf(file)}` : name, value);
   }
   return found;
 }
