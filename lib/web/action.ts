@@ -47,7 +47,7 @@ async function attempt<R extends Requires, S extends z.ZodType, O>(parts: Action
     unstable_rethrow(error);
     if (error instanceof Refusal) return { state: refusedState(error, form) };
     log.error('action failed', error);
-    throw error;
+    throw new Error('an action failed: its line in the log says why'); // the framework prints what is thrown, and a query's error holds what was typed
   }
 }
 
