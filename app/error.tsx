@@ -9,10 +9,9 @@ type ErrorPageProps = { error: unknown; retry: () => void };
 const digestOf = (error: unknown) =>
   typeof error === 'object' && error !== null && 'digest' in error && typeof error.digest === 'string' ? error.digest : null;
 
-/** The page when something broke: what it means for the reader, the way back, and a number to quote. */
-
 const HOME = '/';
 
+/** The page when something broke: what it means for the reader, the way back, and a number to quote. */
 export default function ErrorPage({ error, retry }: ErrorPageProps) {
   const digest = digestOf(error);
   return (
