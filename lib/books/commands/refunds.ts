@@ -53,17 +53,17 @@ const due = {
 };
 const fromCards = sql`${paymentAttempts.id} = coalesce(${refunds.attemptId}, ${payments.attemptId})`;
 
-/** Sends every card refund that is due to the processor, oldest first, at most 50 a call. Back-off is in the row, with no last try. */
+/** Sends every card refund that is due to the processor, oldest first, at most 50 a call; stops when it does not answer. Back-off is in the row, with no last try. */
 export async function sendRefunds(ctx: SystemCtx): Promise<void> {
   const rows = await ctx.db.select({ id: refunds.id }).from(refunds)
     .leftJoin(payments, eq(payments.id, refunds.paymentId)).innerJoin(paymentAttempts, fromCards)
     .where(and(isNull(refunds.doneAt), isNull(refunds.failedAt), lte(refunds.dueAt, ctx.now), isNotNull(paymentAttempts.paymentIntentId)))
     .orderBy(asc(refunds.dueAt)).limit(50);
-  for (const { id } of rows) await sendRefund(ctx, id);
+  for (const { id } of rows) if ((await sendRefund(ctx, id)) === 'silent') return; // the other sweeps must not wait for it
 }
 
 /** Sends one refund if it is still due. The next try is written down before the processor is asked, so that two workers do not both ask. */
-async function sendRefund(ctx: SystemCtx, refundId: RefundId): Promise<void> {
+async function sendRefund(ctx: SystemCtx, refundId: RefundId): Promise<'asked' | 'silent'> {
   const refund = await inTransaction(ctx.db, async (tx) => {
     const locked = await tx.select({ id: refunds.id }).from(refunds).where(and(eq(refunds.id, refundId), isNull(refunds.doneAt), isNull(refunds.failedAt), lte(refunds.dueAt, ctx.now))).for('no key update');
     if (locked.length === 0) return null;
@@ -71,15 +71,17 @@ async function sendRefund(ctx: SystemCtx, refundId: RefundId): Promise<void> {
     if (row) await tx.update(refunds).set({ tries: row.tries + 1, dueAt: addMinutes(ctx.now, nextTryMinutes(row.tries)) }).where(eq(refunds.id, refundId));
     return row;
   });
-  if (!refund || refund.paymentIntentId === null) return;
+  if (!refund || refund.paymentIntentId === null) return 'asked';
   const { id, paymentIntentId, amountMinor, tries } = refund;
   try {
     // A key replays its answer for a day, failures included: so look first whether an earlier try was done after all.
     const known = tries === 0 ? null : await findRefund(id, paymentIntentId);
     await applyRefund(ctx, known ?? await createRefund({ refundId: id, paymentIntentId, amountMinor, idempotencyKey: `refund-${id}-${tries}` }));
+    return 'asked';
   } catch (error) {
     if (!(error instanceof CardsProblem)) throw error;
     log.warn('refund not made yet', { refund: id, tries: tries + 1, answered: error.isAnswer, code: error.code });
+    return error.isAnswer ? 'asked' : 'silent';
   }
 }
 

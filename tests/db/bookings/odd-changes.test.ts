@@ -12,6 +12,7 @@ import { showBooking } from '@/lib/bookings/commands/show-booking';
 import { endHolds } from '@/lib/bookings/commands/places';
 import { holdPlaces } from '@/lib/bookings/commands/hold';
 import { holdInput } from '@/lib/bookings/schema';
+import { sendRefunds } from '@/lib/books/commands/refunds';
 import { giveBackPayment } from '@/lib/books/commands/give-back-payment';
 import type { Id } from '@/lib/core/ids';
 import { only } from '@/lib/core/only';
@@ -83,6 +84,24 @@ describe('places whose money the treasurer gave back already', () => {
     await giveBackPayment(await ctxOf(await dov()), { paymentId, amount: '15.00', reason: 'a hard week' });
 
     expect(await changeVisit(await ctxOf(by), { visitId, version: 1, entryTimeId: cheaper.id, insists: true })).toEqual({ refundMinor: 100 });
+  });
+});
+
+describe('a card service that does not answer', () => {
+  it('is not asked about every refund of a sweep: the others wait for the next one', async () => {
+    const triesOf = async (paymentId: Id<'payment'>) => only(await getDb().select({ tries: refunds.tries, doneAt: refunds.doneAt }).from(refunds).where(eq(refunds.paymentId, paymentId)));
+    await sendRefunds(await ctxOf(machine, addMinutes(NOON, 600))); // what earlier tests owe
+    const [first, second] = [await evePaid(), await evePaid()];
+    await giveBack(await ctxOf(first.by, addMinutes(NOON, 601)), { visitId: first.visitId, version: 1, ...TWO });
+    await giveBack(await ctxOf(second.by, addMinutes(NOON, 602)), { visitId: second.visitId, version: 1, ...TWO });
+
+    await cards.order({ do: 'trouble', dropNext: 20, onlyPath: 'refunds' });
+    await sendRefunds(await ctxOf(machine, addMinutes(NOON, 603)));
+    await cards.order({ do: 'trouble' });
+
+    expect([(await triesOf(first.paymentId)).tries, (await triesOf(second.paymentId)).tries]).toEqual([1, 0]);
+    await sendRefunds(await ctxOf(machine, addMinutes(NOON, 605)));
+    expect([(await triesOf(first.paymentId)).doneAt, (await triesOf(second.paymentId)).doneAt]).not.toContain(null);
   });
 });
 
