@@ -44,7 +44,7 @@ test('a coordinator moves an entry time, and the party gets an updated invitatio
 test('a treasurer records a cheque and sees the money; a secretary finds the household and takes the roll along', async ({ page, browser }) => {
   await signInAs(page, 'Dov');
   await page.goto('/office/roll');
-  await page.getByLabel('Name, railway, street or number').fill('Plumtree');
+  await page.getByRole('searchbox').fill('Plumtree');
   await page.getByRole('button', { name: 'Look on the roll' }).click();
   await page.getByRole('table').getByRole('link', { name: /Plumtree/ }).click();
   await page.getByRole('link', { name: /^The household: / }).click();
@@ -70,7 +70,7 @@ test('a treasurer records a cheque and sees the money; a secretary finds the hou
   const desk = await (await browser.newContext()).newPage();
   await signInAs(desk, 'Wren');
   await desk.goto('/office/roll');
-  await desk.getByLabel('Name, railway, street or number').fill('plumtree');
+  await desk.getByRole('searchbox').fill('plumtree');
   await desk.getByRole('button', { name: 'Look on the roll' }).click();
   await expect(desk.getByRole('table').getByRole('row').filter({ hasText: 'Plumtree' })).toContainText(/Paid/i);
   const coming = desk.waitForEvent('download');
