@@ -21,6 +21,7 @@ export const CODE_MINUTES = 15;
 const CODE_TRIES = 5;
 const ASKING = { tries: 5, minutes: 15 };
 const GUESSING = { tries: 20, minutes: 15 };
+const GUESSING_A_DAY = { tries: 100, minutes: 24 * 60 }; // no more than 100 wrong guesses in a row (NIST SP 800-63B-4, section 3.2.2)
 
 const addressKey = (what: string, email: string) => `${what}:${hashSecret(email.toLowerCase()).slice(0, 22)}`;
 const sameEmail = (email: string) => sql`lower(${accounts.email}) = lower(${email})`;
@@ -28,6 +29,7 @@ const sameEmail = (email: string) => sql`lower(${accounts.email}) = lower(${emai
 /** Counts a try at signing in, by address and by client; both in the database, so two servers share one count. */
 async function countGuess({ db, now, client }: Ctx, email: string): Promise<void> {
   await countTry(db, addressKey('sign-in', email), GUESSING, now);
+  await countTry(db, addressKey('sign-in-a-day', email), GUESSING_A_DAY, now);
   if (client !== null) await countTry(db, `sign-in-from:${client}`, { tries: 60, minutes: 15 }, now);
 }
 

@@ -93,6 +93,22 @@ describe('signing in', () => {
     await expect(signInWithPassword(ctx, { email: 'nobody@testvalley.example', password: 'four words are good' })).rejects.toMatchObject({ code: 'wrong_password' });
   });
 
+  it('takes no more than a hundred guesses a day, however slowly they come; the letter’s link still works', async () => {
+    const ada = await anAccount('Ada Guessed');
+    for (let guess = 0; guess < 100; guess += 1) {
+      const ctx = await ctxOf(stranger, addMinutes(NOON, guess * 10));
+      await expect(signInWithCode(ctx, { email: ada.email, code: '000000' })).rejects.toMatchObject({ code: 'wrong_code' });
+    }
+    const late = await ctxOf(stranger, addMinutes(NOON, 1000));
+    await askForCode(late, { email: ada.email });
+    const { code, secret } = await newestCode(ada.email);
+
+    await expect(signInWithCode(late, { email: ada.email, code })).rejects.toMatchObject({ code: 'too_many_tries' });
+
+    await expect(signInWithLink(late, { secret })).resolves.toBeDefined();
+    await expect(signInWithPassword(await ctxOf(stranger, addMinutes(NOON, 1440)), { email: ada.email, password: 'x' })).rejects.toMatchObject({ code: 'wrong_password' });
+  });
+
   it('ends every sign-in at once', async () => {
     const ada = await anAccount('Ada Leaves');
     const other = await getDb().insert(signIns).values({ accountId: ada.accountId, method: 'link', signedInAt: NOON }).returning({ id: signIns.id });
