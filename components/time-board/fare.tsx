@@ -18,7 +18,7 @@ export function Fare({ board, chosen, party, heads, state, problem, isSending, i
   return (
     <div className={styles.fare} data-chosen={isAwake && chosen.length > 0}>
       <div className="grid gap-1.5">
-        {refused === null ? null : <Notice tone="danger" word={null}><Refused message={refused} state={state} /></Notice>}
+        {refused === null ? null : <Notice tone="danger" word={null}><Refused message={refused} state={state} isClash={problem === null && state.code === 'clash'} /></Notice>}
         {isAwake && chosen.length > 0 ? (
           <p className="max-w-none leading-snug">
             <span className={styles.narrowOnly}>{visitsInLine(board, chosen)}. </span>
@@ -34,12 +34,12 @@ export function Fare({ board, chosen, party, heads, state, problem, isSending, i
 }
 
 /** The server's own words; after a clash, the box that says the party means it. */
-function Refused({ message, state }: { message: string; state: FormState }) {
+function Refused({ message, state, isClash }: { message: string; state: FormState; isClash: boolean }) {
   return (
     <>
       <p>{message}</p>
       {Object.values(state.fieldErrors ?? {}).flat().map((sentence) => <p key={sentence}>{sentence}</p>)}
-      {state.code === 'clash' ? (
+      {isClash ? (
         <label className="inline-flex min-h-11 cursor-pointer items-center gap-3"><input type="checkbox" name="insists" className="tick-box" /> choose it all the same</label>
       ) : null}
     </>
