@@ -2,7 +2,7 @@
 // (production build, a database of its own), photographs it with Debian's Chromium, and stops it.
 import { mkdirSync } from 'node:fs';
 import { chromium, type Browser, type Page } from 'playwright';
-import { signIns } from './seed/run';
+import { DEMO_SIGN_INS } from './seed/sign-ins';
 import { startTestStack } from '../tests/support/stack';
 
 type Picture = { name: string; path: string; width: number; height: number; scheme?: 'light' | 'dark'; as?: 'coordinator' | 'treasurer' | 'secretary'; before?: (page: Page) => Promise<void> };
@@ -28,7 +28,7 @@ async function chooseTwo(page: Page): Promise<void> {
 }
 
 async function signIn(browser: Browser, site: string, does: string) {
-  const person = signIns.find((one) => one.does.startsWith(does));
+  const person = DEMO_SIGN_INS.find((one) => one.does.startsWith(does));
   if (!person) throw new Error(`nobody in the demo club is ${does}`);
   const context = await browser.newContext({ baseURL: site });
   const page = await context.newPage();

@@ -4,7 +4,7 @@ import { startTransition, useActionState, useEffect, useId, useRef, useState, us
 import { useForm } from 'react-hook-form';
 import type { z } from 'zod';
 import { Button } from '@/components/ui/button';
-import type { ButtonTone } from '@/components/ui/button-look';
+import type { ButtonSize, ButtonTone } from '@/components/ui/button-look';
 import { FormFieldsContext, type FormFields } from '@/components/ui/form-fields';
 import { Notice } from '@/components/ui/notice';
 import { idleForm, type FormAction, type FormState } from '@/lib/core/form-state';
@@ -24,6 +24,7 @@ type ActionFormProps = {
   /** What is said while it happens. */
   sending?: string;
   tone?: ButtonTone;
+  size?: ButtonSize;
   /** After success: keep what was typed, or clear the boxes for the next one. */
   whenDone?: 'keep' | 'clear';
   /** The way on after a refusal, by its code ("choose it all the same"). */
@@ -53,7 +54,7 @@ type ActionFormProps = {
  * Names nest with dots (`wanted.0.adults`); several boxes of one list end in `[]`. Fixed facts travel as
  * `<input type="hidden" name="openDayId" value={id} />`. Two buttons: give the second `name` and `value`.
  */
-export function ActionForm({ action, schema, values, submit, sending = 'One moment.', tone = 'main', whenDone = 'keep', wayOn, done, aside, children }: ActionFormProps) {
+export function ActionForm({ action, schema, values, submit, sending = 'One moment.', tone = 'main', size = 'usual', whenDone = 'keep', wayOn, done, aside, children }: ActionFormProps) {
   const [state, send, isPending] = useActionState(action, idleForm);
   const element = useRef<HTMLFormElement>(null);
   const isSending = useRef(false);
@@ -88,7 +89,7 @@ export function ActionForm({ action, schema, values, submit, sending = 'One mome
         />
         {children}
         <div className="flex flex-wrap items-center gap-x-5 gap-y-3">
-          <Button type="submit" tone={tone} aria-disabled={isPending}>
+          <Button type="submit" tone={tone} size={size} aria-disabled={isPending}>
             {submit}
           </Button>
           {aside}

@@ -53,6 +53,6 @@ export function NewPasswordForm({ action, has }: { action: FormAction; has: 'pas
 }
 
 /** A form that is only its button. */
-export function PressForm({ action, submit, tone = 'bare' }: { action: FormAction; submit: string; tone?: 'bare' | 'plain' | 'danger' }) {
-  return <ActionForm action={action} submit={submit} tone={tone} />;
+export function PressForm({ action, submit, tone = 'bare', size = 'usual' }: { action: FormAction; submit: string; tone?: 'bare' | 'plain' | 'danger'; size?: 'usual' | 'small' }) {
+  return <ActionForm action={action} submit={submit} tone={tone} size={size} />;
 }

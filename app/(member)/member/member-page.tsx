@@ -21,7 +21,7 @@ export function MemberPage({ ctx: { actor, club }, here, children }: MemberPageP
     { href: '/account', label: 'Sign-ins' },
   ];
   return (
-    <MemberSheet club={{ name: club.name, line: club.footLine }} account={{ href: '/member', label: actor.name }} lines={lines} here={here} signOut={<PressForm action={signOutAction} submit="Sign out" />}>
+    <MemberSheet club={{ name: club.name, line: club.footLine }} account={{ href: '/member', label: actor.name }} lines={lines} here={here} signOut={<PressForm action={signOutAction} submit="Sign out" size="small" />}>
       {children}
     </MemberSheet>
   );

@@ -21,7 +21,7 @@ export function OfficePage({ ctx: { actor, club, now }, own, ...copy }: OfficePa
       clubName={club.name}
       printedAt={<When at={now} club={club} style="bare" />}
       contents={own === undefined ? general : [own, ...general]}
-      signOut={<PressForm action={signOutAction} submit="Sign out" />}
+      signOut={<PressForm action={signOutAction} submit="Sign out" size="small" />}
       {...copy}
     />
   );
