@@ -67,8 +67,11 @@ export async function paidMinor(tx: Tx, chargeId: Id<'charge'>): Promise<number>
   return only(await tx.select({ sum: sql<number>`coalesce(sum(${payments.amountMinor}), 0)::int` }).from(payments).where(eq(payments.chargeId, chargeId))).sum;
 }
 
+/* The constraint against overlapping terms decides; it writes nothing when it refuses. */
 async function makeTerm(tx: Tx, ctx: Ctx, charge: { householdId: Id<'household'>; classKey: string; termFrom: Day; termTo: Day }): Promise<void> {
-  await tx.insert(terms).values({ householdId: charge.householdId, classKey: charge.classKey, during: `[${charge.termFrom},${addDays(charge.termTo, 1)})`, madeAt: ctx.now });
+  const made = await tx.insert(terms).values({ householdId: charge.householdId, classKey: charge.classKey, during: `[${charge.termFrom},${addDays(charge.termTo, 1)})`, madeAt: ctx.now })
+    .onConflictDoNothing().returning({ id: terms.id });
+  if (made.length === 0) throw new Refusal('already_paid', { sentence: 'Some of those days are paid for already, by another term of this household.' });
 }
 
 async function queueReceipt(tx: Tx, ctx: Ctx, { paymentId, householdId }: { paymentId: Id<'payment'>; householdId: Id<'household'> }): Promise<void> {

@@ -21,10 +21,16 @@ const facts = {
 };
 type OpenAttempt = { id: Id<'attempt'>; idempotencyKey: string; amountMinor: number; currency: string; openedAt: Date; sessionId: string | null; sessionExpiresAt: Date | null; heldUntil: Date | null };
 
-/** Asks the processor about every open attempt, oldest first; stops when it does not answer, the next sweep goes on. */
+/** Asks the processor about every open attempt, oldest first; stops when it does not answer, the next sweep goes on. One that breaks does not keep the others waiting. */
 export async function settleAttempts(ctx: SystemCtx): Promise<void> {
   const open = await ctx.db.select({ id: paymentAttempts.id }).from(paymentAttempts).where(isNull(paymentAttempts.endedAt)).orderBy(asc(paymentAttempts.openedAt)).limit(100);
-  for (const { id } of open) if ((await settleAttempt(ctx, id)) === 'silent') return;
+  for (const { id } of open) {
+    const outcome = await settleAttempt(ctx, id).catch((error: unknown) => {
+      log.error('payment attempt', error, { attempt: id });
+      return 'asked' as const;
+    });
+    if (outcome === 'silent') return;
+  }
 }
 
 /**

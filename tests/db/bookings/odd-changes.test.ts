@@ -10,6 +10,7 @@ import { changeVisit } from '@/lib/bookings/commands/change';
 import { giveBack, giveBackForParty } from '@/lib/bookings/commands/give-back';
 import { showBooking } from '@/lib/bookings/commands/show-booking';
 import { endHolds } from '@/lib/bookings/commands/places';
+import { settleAttempts } from '@/lib/bookings/commands/settle';
 import { holdPlaces } from '@/lib/bookings/commands/hold';
 import { holdInput } from '@/lib/bookings/schema';
 import { sendRefunds } from '@/lib/books/commands/refunds';
@@ -20,7 +21,7 @@ import { addMinutes } from '@/lib/core/time';
 import { aBrowser, aClub, anEntryTime, aStop, cleo, ctxOf, dov, NOON } from '../../support/cast';
 import type { CardsStandIn } from '../../support/cards-stand-in';
 import { keep, liveHeadsAt, refusalOf, takenAt } from './hold-cast';
-import { aDayAhead, cardsAt, eveHolds, evePays, machine, paidSnapshot } from './pay-cast';
+import { aDayAhead, bookingOf, cardsAt, eveHolds, evePays, machine, paidSnapshot } from './pay-cast';
 
 let cards: CardsStandIn;
 beforeAll(async () => {
@@ -102,6 +103,25 @@ describe('a card service that does not answer', () => {
     expect([(await triesOf(first.paymentId)).tries, (await triesOf(second.paymentId)).tries]).toEqual([1, 0]);
     await sendRefunds(await ctxOf(machine, addMinutes(NOON, 605)));
     expect([(await triesOf(first.paymentId)).doneAt, (await triesOf(second.paymentId)).doneAt]).not.toContain(null);
+  });
+});
+
+describe('one payment that cannot be settled now', () => {
+  it('does not keep the others from being settled in the same sweep', async () => {
+    const { day, time } = await aDayAhead();
+    const [first, second] = [await eveHolds(day.id, [time.id], NOON), await eveHolds(day.id, [time.id], NOON)];
+    for (const [at, hold] of [first, second].entries()) await cards.order({ do: 'pay', session: (await evePays(hold, addMinutes(NOON, at / 60))).sessionId });
+    const other = await getDb().$client.connect();
+    await other.query('begin');
+    await other.query('select 1 from bookings where id = $1 for update', [first.bookingId]);
+
+    await settleAttempts(await ctxOf(machine, addMinutes(NOON, 1)));
+
+    await other.query('rollback');
+    other.release();
+    expect([(await bookingOf(first.bookingId)).confirmedAt, (await bookingOf(second.bookingId)).confirmedAt]).toEqual([null, addMinutes(NOON, 1)]);
+    await settleAttempts(await ctxOf(machine, addMinutes(NOON, 2)));
+    expect((await bookingOf(first.bookingId)).confirmedAt).toEqual(addMinutes(NOON, 2));
   });
 });
 

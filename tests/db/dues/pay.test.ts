@@ -1,15 +1,16 @@
 import { eq } from 'drizzle-orm';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { getDb } from '@/db/client';
-import { paymentAttempts } from '@/db/schema/books';
-import { charges } from '@/db/schema/dues';
+import { paymentAttempts, payments, refunds } from '@/db/schema/books';
+import { charges, terms } from '@/db/schema/dues';
+import { applyPayment } from '@/lib/bookings/commands/apply-payment';
 import { recordPayment } from '@/lib/dues/commands';
 import { startDuesPayment } from '@/lib/dues/pay';
 import { only } from '@/lib/core/only';
 import type { AccountActor } from '@/lib/infra/context';
 import { ada, aClub, ben, ctxOf, dov, NOON } from '@/tests/support/cast';
 import type { CardsStandIn } from '../../support/cards-stand-in';
-import { cardsAt } from '../bookings/pay-cast';
+import { cardsAt, machine, paidSnapshot } from '../bookings/pay-cast';
 import { refusalOf } from '../bookings/hold-cast';
 
 let cards: CardsStandIn;
@@ -58,5 +59,34 @@ describe('dues paid by card', () => {
 
     expect(await sessions()).toHaveLength(before);
     expect(await getDb().select({ amount: paymentAttempts.amountMinor }).from(paymentAttempts).where(eq(paymentAttempts.chargeId, chargeId))).toEqual([{ amount: 6200 }]);
+  });
+});
+
+describe('dues for days that a term covers already', () => {
+  const covered = async (householdId: AccountActor['householdId']) => {
+    if (householdId === null) throw new Error('a member has a household');
+    await getDb().insert(terms).values({ householdId, classKey: 'household', during: '[2026-07-01,2027-07-01)', madeAt: NOON });
+  };
+
+  it('are refused in words when they come as a cheque', async () => {
+    const account = await ada();
+    const { chargeId } = await owing(account);
+    await covered(account.householdId);
+
+    expect(await refusalOf(recordPayment(await ctxOf(await dov()), { chargeId, method: 'cheque', amount: '62.00', receivedOn: '2027-04-30', reference: null }))).toBe('already_paid');
+
+    expect(await getDb().select({ id: payments.id }).from(payments).where(eq(payments.chargeId, chargeId))).toEqual([]);
+  });
+
+  it('go back in full when they come by card', async () => {
+    const account = await ada();
+    const { chargeId, member } = await owing(account);
+    await startDuesPayment(member, { chargeId });
+    await covered(account.householdId);
+    const { id, sessionId } = only(await getDb().select({ id: paymentAttempts.id, sessionId: paymentAttempts.sessionId }).from(paymentAttempts).where(eq(paymentAttempts.chargeId, chargeId)));
+
+    expect(await applyPayment(await ctxOf(machine), await paidSnapshot(cards, sessionId ?? ''))).toBe('refunded');
+
+    expect(await getDb().select({ amount: refunds.amountMinor }).from(refunds).where(eq(refunds.attemptId, id))).toEqual([{ amount: 6200 }]);
   });
 });
