@@ -5,6 +5,7 @@ import { bookings, visits } from '@/db/schema/bookings';
 import { paymentAttempts } from '@/db/schema/books';
 import type { Id } from '@/lib/core/ids';
 import { firstOrNull, only } from '@/lib/core/only';
+import { log } from '@/lib/infra/log';
 import { inTransaction } from '@/lib/infra/transaction';
 
 /** Places taken (positive) or given back (negative) at one entry time. */
@@ -46,12 +47,18 @@ export async function endHold(db: Db | Tx, bookingId: Id<'booking'>, now: Date):
   });
 }
 
-/** Gives back every hold that has run out and has no payment open, oldest first, at most 200 a call; how many. */
+/** Gives back every hold that has run out and has no payment open, oldest first, at most 200 a call; how many. One that breaks does not keep the others. */
 export async function endHolds(db: Db, now: Date): Promise<number> {
   const ended = await db.select({ id: bookings.id }).from(bookings)
     .where(and(isNull(bookings.confirmedAt), isNull(bookings.releasedAt), lte(bookings.heldUntil, now), notExists(openAttempt(db))))
     .orderBy(asc(bookings.heldUntil)).limit(200);
   let count = 0;
-  for (const { id } of ended) if (await endHold(db, id, now)) count += 1;
+  for (const { id } of ended) {
+    const isEnded = await endHold(db, id, now).catch((error: unknown) => {
+      log.error('ended hold', error, { booking: id });
+      return false;
+    });
+    if (isEnded) count += 1;
+  }
   return count;
 }

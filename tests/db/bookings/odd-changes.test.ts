@@ -125,6 +125,22 @@ describe('one payment that cannot be settled now', () => {
   });
 });
 
+describe('one hold that cannot be given back now', () => {
+  it('does not keep the others from being given back in the same sweep', async () => {
+    const { day, time } = await aDayAhead();
+    const [first, second] = [await keep(day.id, [time.id]), await keep(day.id, [time.id], aBrowser(), { now: addMinutes(NOON, 1 / 60) })];
+    const other = await getDb().$client.connect();
+    await other.query('begin');
+    await other.query('select 1 from bookings where id = $1 for update', [first]);
+
+    await endHolds(getDb(), addMinutes(NOON, 30));
+
+    await other.query('rollback');
+    other.release();
+    expect([(await bookingOf(first)).releasedAt, (await bookingOf(second)).releasedAt]).toEqual([null, addMinutes(NOON, 30)]);
+  });
+});
+
 describe('an entry time that stays locked', () => {
   it('is answered in words, and nothing is kept', async () => {
     const { day, time } = await aDayAhead();
