@@ -11,10 +11,9 @@ import { addMinutes } from '@/lib/core/time';
 import type { BookingActor, Ctx, HolderActor } from '@/lib/infra/context';
 import { hashSecret, newSecret } from '@/lib/infra/secrets';
 import { inTransaction } from '@/lib/infra/transaction';
+import { linksEndAt } from '@/lib/letters/links';
 import type { HoldIdInput } from '../schema';
 import { findParty, queueInvitations } from './confirm';
-
-const LINK_DAYS = 60; // after the day, as in the letters
 
 /** A secret whose hash alone is kept; `kind` says how it was handed over. */
 async function newLink(db: Queryable, kind: 'browser' | 'calendar', code: string, now: Date, expiresAt: Date): Promise<string> {
@@ -28,7 +27,7 @@ export async function openBooking({ db, actor, now }: Ctx<HolderActor>, input: H
   const own = firstOrNull(await db.select({ code: bookings.code, closesAt: openDays.closesAt }).from(bookings).innerJoin(openDays, eq(openDays.id, bookings.openDayId))
     .where(and(eq(bookings.id, input.bookingId), eq(bookings.holderHash, actor.holderHash), isNotNull(bookings.confirmedAt))));
   if (!own) throw new Refusal('not_found');
-  return { code: own.code, secret: await newLink(db, 'browser', own.code, now, addMinutes(own.closesAt, LINK_DAYS * 1440)) };
+  return { code: own.code, secret: await newLink(db, 'browser', own.code, now, linksEndAt(own.closesAt)) };
 }
 
 /** Makes the private calendar feed of a booking, once; an earlier link stops working. Answers the secret, which is shown this once. */
@@ -36,7 +35,7 @@ export async function makeFeed(ctx: Ctx<BookingActor>): Promise<string> {
   return inTransaction(ctx.db, async (tx) => {
     const own = await findOwn(tx, ctx.actor.bookingId);
     await tx.update(bearerLinks).set({ revokedAt: ctx.now }).where(and(eq(bearerLinks.kind, 'calendar'), eq(bearerLinks.subjectId, own.code), isNull(bearerLinks.revokedAt)));
-    return newLink(tx, 'calendar', own.code, ctx.now, addMinutes(own.closesAt, LINK_DAYS * 1440));
+    return newLink(tx, 'calendar', own.code, ctx.now, linksEndAt(own.closesAt));
   });
 }
 

@@ -8,12 +8,11 @@ import type { Id } from '@/lib/core/ids';
 import { firstOrNull } from '@/lib/core/only';
 import { addMinutes } from '@/lib/core/time';
 import type { ClubSettings } from '@/lib/infra/context';
+import { linksEndAt } from '../links';
 import type { BookingFacts, LetterVisit } from '../rules/booking-letter';
 
 /** A booking for a letter, but for its private link; `shown` are the gardens whose address it says. */
 export type BookingForLetter = Omit<BookingFacts, 'link'> & { openDayId: Id<'openDay'>; linkEndsAt: Date; isCalledOff: boolean; name: string; email: string | null; shown: Id<'garden'>[] };
-
-const LINK_DAYS = 60; // after the day: for the receipt and for what was left behind
 
 /** A booking as it stands now, for whoever its letters go to; null when it is not confirmed. */
 export async function findBookingForLetter(db: Queryable, bookingId: Id<'booking'>, club: ClubSettings, now: Date): Promise<BookingForLetter | null> {
@@ -33,7 +32,7 @@ export async function findBookingForLetter(db: Queryable, bookingId: Id<'booking
   return {
     code: row.code, madeAt: row.madeAt, totalMinor: row.totalMinor, heldOn: row.heldOn, title: row.title, placeLine: row.placeLine, releasesAt,
     isCancelled: row.cancelledAt !== null, emailIsConfirmed, wantsInvitations: row.wantsInvitations, visits: its, openDayId: row.openDayId,
-    linkEndsAt: addMinutes(row.closesAt, LINK_DAYS * 1440), isCalledOff: row.calledOffAt !== null, name: row.name, email: row.email, shown,
+    linkEndsAt: linksEndAt(row.closesAt), isCalledOff: row.calledOffAt !== null, name: row.name, email: row.email, shown,
   };
 }
 
