@@ -1,10 +1,11 @@
 'use client';
 
+import Link from 'next/link';
 import { ActionForm } from '@/components/forms/action-form';
 import { Checkbox } from '@/components/ui/checkbox';
 import { Input } from '@/components/ui/input';
 import { detailsInput } from '@/lib/bookings/schema';
-import type { FormAction } from '@/lib/core/form-state';
+import type { FormAction, FormState } from '@/lib/core/form-state';
 import type { ButtonTone } from '@/components/ui/button-look';
 
 type OneButtonProps = { action: FormAction; bookingId: string; submit: string; sending?: string; tone?: ButtonTone };
@@ -27,11 +28,14 @@ type DetailsFormProps = {
   isPaid: boolean;
 };
 
+/* The time ran out while they typed: the page, looked at anew, offers the same places again. */
+const lookAgain = ({ code }: FormState) => (code === 'hold_over' ? <p className="mt-2"><Link className="link" href="/hold?look=again">See what can still be kept</Link></p> : null);
+
 /** Who the party is, the visit rules, and the one button that pays or confirms. */
 export function DetailsForm({ action, bookingId, typed, visitRules, submit, isPaid }: DetailsFormProps) {
   const values = { name: typed.name, email: typed.email, phone: typed.phone, wantsInvitations: typed.wantsInvitations ? 'on' : '' };
   return (
-    <ActionForm action={action} schema={detailsInput} values={values} submit={submit} sending={isPaid ? 'Asking the card service for its page.' : 'Writing your places down.'}>
+    <ActionForm action={action} schema={detailsInput} values={values} wayOn={lookAgain} submit={submit} sending={isPaid ? 'Asking the card service for its page.' : 'Writing your places down.'}>
       <input type="hidden" name="bookingId" value={bookingId} />
       <Input name="name" label="Your name" hint="As the gate will ask for it." autoComplete="name" required />
       <Input name="email" label="E-mail" hint="Your tickets go there, and anything that changes." type="email" autoComplete="email" required />

@@ -89,7 +89,7 @@ export async function saveDetails(ctx: Ctx<HolderActor>, input: DetailsInput): P
 /** Keeps the same places for the same people once more after a hold ran out, with what was typed; answers the new booking. */
 export async function keepAgain(ctx: Ctx<HolderActor>, input: HoldIdInput): Promise<Id<'booking'>> {
   const { db, actor } = ctx;
-  const old = firstOrNull(await db.select({ openDayId: bookings.openDayId, insistsAt: bookings.insistsAt, confirmedAt: bookings.confirmedAt }).from(bookings)
+  const old = firstOrNull(await db.select({ openDayId: bookings.openDayId, insistsAt: bookings.insistsAt, confirmedAt: bookings.confirmedAt, wantsInvitations: bookings.wantsInvitations }).from(bookings)
     .where(and(eq(bookings.id, input.bookingId), eq(bookings.holderHash, actor.holderHash))));
   if (!old) throw new Refusal('not_found');
   if (old.confirmedAt !== null) throw new Refusal('changed_meanwhile');
@@ -97,5 +97,6 @@ export async function keepAgain(ctx: Ctx<HolderActor>, input: HoldIdInput): Prom
   const bookingId = await holdPlaces(ctx, { openDayId: old.openDayId, wanted, insists: old.insistsAt !== null });
   const typed = firstOrNull(await db.select({ name: bookingContacts.name, email: bookingContacts.email, phone: bookingContacts.phone }).from(bookingContacts).where(eq(bookingContacts.bookingId, input.bookingId)));
   if (typed) await db.insert(bookingContacts).values({ bookingId, name: typed.name, email: typed.email, phone: typed.phone }).onConflictDoNothing();
+  await db.update(bookings).set({ wantsInvitations: old.wantsInvitations }).where(eq(bookings.id, bookingId));
   return bookingId;
 }

@@ -44,7 +44,7 @@ export function confirmationLetter(booking: BookingFacts, club: LetterClub): Let
     preview: `${spanWords(visits, club)}. Your tickets open without a signal once you have looked at them.`,
     lead: [{ kind: 'paragraph', parts: [`Places are yours: ${everyoneWords(visits)}. ${cost} If a phone fails, say this at the gate: `, spoken(booking), '.'] }],
     body: [...dayBlocks(visits, club), ...ticketBlocks(booking, visits, club), ...lastWords(booking, visits, club)],
-    foot: `Sent because you booked on ${formatDay(dayOf(booking.madeAt, club.timeZone), club, 'bare')}; one reminder follows. Leafhalt`,
+    foot: `Sent because you booked on ${formatDay(dayOf(booking.madeAt, club.timeZone), club, 'bare')}${booking.madeAt < booking.releasesAt ? '; one reminder follows' : ''}. Leafhalt`,
   };
 }
 
