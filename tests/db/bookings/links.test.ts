@@ -1,7 +1,7 @@
 import { eq } from 'drizzle-orm';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { getDb } from '@/db/client';
-import { bookingContacts, visits } from '@/db/schema/bookings';
+import { bookingContacts, bookings, visits } from '@/db/schema/bookings';
 import { placeShowings } from '@/db/schema/gardens';
 import { bearerLinks } from '@/db/schema/people';
 import { findBookingByFeed, findBookingByLink, findOwnBooking } from '@/lib/bookings/access';
@@ -68,12 +68,13 @@ describe('a hold', () => {
     const { day, time } = await aDayAhead();
     const eve = await eveHolds(day.id, [time.id], NOON);
     const later = addMinutes(NOON, 15);
+    await getDb().update(bookings).set({ wantsInvitations: false }).where(eq(bookings.id, eve.bookingId));
     await endHolds(getDb(), later);
 
     expect(await findHold(await ctxOf(eve.who, later))).toMatchObject({ state: 'over', typed: { name: 'Eve Marlow', email: 'eve@visitors.example' } });
     await keepAgain(await ctxOf(eve.who, later), eve);
 
-    expect(await findHold(await ctxOf(eve.who, later))).toMatchObject({ state: 'kept', typed: { name: 'Eve Marlow' }, keptUntil: '12:25' });
+    expect(await findHold(await ctxOf(eve.who, later))).toMatchObject({ state: 'kept', typed: { name: 'Eve Marlow', wantsInvitations: false }, keptUntil: '12:25' });
     expect(await findHold(await ctxOf(aBrowser(), later))).toBeNull();
     expect(await refusalOf(keepAgain(await ctxOf(aBrowser(), later), eve))).toBe('not_found');
   });

@@ -43,6 +43,17 @@ describe('what a confirmation says', () => {
     expect(free).toContain('2 adults and 1 child at Garden 1 and 1 adult at Garden 3. They cost nothing.');
   });
 
+  it('promises a reminder only to who books before the addresses are released', () => {
+    const released = new Date('2027-05-12T14:00:00Z');
+
+    expect(confirmationLetter(aBooking({ madeAt: new Date(released.getTime() - 1) }), club).foot).toContain('one reminder follows');
+    expect(confirmationLetter(aBooking({ madeAt: released }), club).foot).not.toContain('reminder');
+  });
+
+  it('leads to itself in large print', () => {
+    expect(letterHtml(confirmationLetter(aBooking(), club))).toContain('/link/s3cret?print=large');
+  });
+
   it('leaves out what was given back', () => {
     const one = confirmationLetter(aBooking({ visits: [aVisit(1, '10:00'), aVisit(3, '11:30', { isGivenBack: true })] }), club);
 
