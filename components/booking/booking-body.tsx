@@ -8,9 +8,9 @@ import { Notice } from '@/components/ui/notice';
 import type { BookingPage } from '@/lib/bookings/views/booking-page';
 import type { FormAction } from '@/lib/core/form-state';
 import { BookingButton } from './booking-forms';
+import type { BookingActions } from './booking-actions';
 import { VisitPart } from './visit-part';
 
-export type BookingActions = { giveBack: FormAction; change: FormAction; confirmEmail: FormAction; makeFeed: FormAction; revokeFeed: FormAction };
 
 /** The party's own page below its bill: tickets, the way, the day, what may still be changed. */
 export function BookingBody({ page, actions }: { page: BookingPage; actions: BookingActions }) {

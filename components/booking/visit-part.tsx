@@ -1,5 +1,5 @@
 import type { PageVisit } from '@/lib/bookings/views/booking-page';
-import type { BookingActions } from './booking-body';
+import type { BookingActions } from './booking-actions';
 import { ChangeForm, GiveBackForm } from './booking-forms';
 
 type VisitPartProps = { visit: PageVisit; code: string; actions: Pick<BookingActions, 'giveBack' | 'change'> };
