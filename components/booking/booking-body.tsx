@@ -11,7 +11,6 @@ import { BookingButton } from './booking-forms';
 import type { BookingActions } from './booking-actions';
 import { VisitPart } from './visit-part';
 
-
 /** The party's own page below its bill: tickets, the way, the day, what may still be changed. */
 export function BookingBody({ page, actions }: { page: BookingPage; actions: BookingActions }) {
   const live = page.visits.filter((visit) => visit.ticket.state.kind !== 'given-back');
