@@ -6,9 +6,11 @@ import { Select, type Choice } from '@/components/ui/select';
 import { Textarea } from '@/components/ui/textarea';
 import { Row } from './row';
 import type { FormAction } from '@/lib/core/form-state';
-import { entryTimeChangeInput, entryTimesInput, noticeInput, openDayChangeInput, openDayInput, planNoteInput, stopChangeInput, stopInput } from '@/lib/opendays/schema';
+import { entryTimeChangeInput, entryTimesInput, noticeInput, openDayChangeInput, openDayInput, planNoteInput, stopChangeInput, stopInput, stopPricesInput } from '@/lib/opendays/schema';
 
-export type DayParts = { title: string; placeLine: string; howToCome: string; heldOn: string; opensAt: string; closesAt: string; adult: string; child: string; babe: string };
+export type DayParts = { title: string; placeLine: string; howToCome: string; heldOn: string; opensAt: string; closesAt: string; adult: string; child: string; babe: string; partyPeopleMax: string };
+
+type Kinds = { adult: string; child: string; babe: string };
 
 function DayFields({ day }: { day: DayParts }) {
   return (
@@ -25,6 +27,7 @@ function DayFields({ day }: { day: DayParts }) {
         <Input name="child" label="A child pays" inputMode="decimal" defaultValue={day.child} width="short" required />
         <Input name="babe" label="A babe in arms pays" inputMode="decimal" defaultValue={day.babe} width="short" required />
       </Row>
+      <Input name="partyPeopleMax" label="People in one party, at most" hint="Empty: as many as the club’s settings say." inputMode="numeric" defaultValue={day.partyPeopleMax} width="heads" />
       <Textarea name="howToCome" label="How to come" rows={3} defaultValue={day.howToCome} />
     </>
   );
@@ -73,6 +76,20 @@ export function StopChangeForm({ action, stop }: { action: FormAction; stop: { i
       <Row>
         <Input name="stayMinutes" label="Usual stay in minutes" inputMode="numeric" defaultValue={String(stop.stayMinutes)} width="heads" required />
         <Input name="headsLimit" label={`People at once, at most (the host said ${stop.hostLimit})`} inputMode="numeric" defaultValue={String(stop.headsLimit)} width="heads" required />
+      </Row>
+    </ActionForm>
+  );
+}
+
+/** What a visit costs at this stop, where it is not what the open day says. */
+export function StopPricesForm({ action, stopId, own, day }: { action: FormAction; stopId: string; own: Kinds; day: Kinds }) {
+  return (
+    <ActionForm action={action} schema={stopPricesInput} submit="Keep these prices" tone="plain">
+      <input type="hidden" name="stopId" value={stopId} />
+      <Row>
+        <Input name="adult" label={`An adult (the day says ${day.adult})`} inputMode="decimal" defaultValue={own.adult} width="short" />
+        <Input name="child" label={`A child (${day.child})`} inputMode="decimal" defaultValue={own.child} width="short" />
+        <Input name="babe" label={`A babe in arms (${day.babe})`} inputMode="decimal" defaultValue={own.babe} width="short" />
       </Row>
     </ActionForm>
   );

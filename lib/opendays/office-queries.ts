@@ -17,6 +17,8 @@ const confirmedHeads = sql<number>`coalesce((select sum(v.heads) from ${visits} 
 const expectedPeople = sql<number>`coalesce((select sum(v.adults + v.children + v.babes) from ${visits} v join ${bookings} b on b.id = v.booking_id
   where v.entry_time_id = ${entryTimes.id} and v.given_back_at is null and b.confirmed_at is not null), 0)::int`;
 
+const ownPrices = sql<{ adult?: number; child?: number; babe?: number }>`coalesce((select json_object_agg(p.kind, p.amount_minor) from ${prices} p where p.stop_id = ${stops.id}), '{}')`;
+
 const cameIn = sql<number>`coalesce((select -sum(p.amount_minor) from ${postings} p where p.open_day_id = ${full(openDays.id)} and p.account = 'ticket-income'), 0)::int`;
 
 /** All open days, the latest first, with their places and what they brought in, at most 60. */
@@ -36,7 +38,7 @@ export async function findOfficeDay({ db }: AccountCtx, slug: string) {
   const live = sql`from ${bookings} b where b.open_day_id = ${full(openDays.id)} and b.confirmed_at is not null and b.cancelled_at is null`;
   return firstOrNull(await db.select({
     id: openDays.id, slug: openDays.slug, title: openDays.title, placeLine: openDays.placeLine, howToCome: openDays.howToCome, heldOn: openDays.heldOn, opensAt: openDays.opensAt, closesAt: openDays.closesAt,
-    publishedAt: openDays.publishedAt, calledOffAt: openDays.calledOffAt,
+    publishedAt: openDays.publishedAt, calledOffAt: openDays.calledOffAt, partyPeopleMax: openDays.partyPeopleMax,
     adultMinor: price('adult'), childMinor: price('child'), babeMinor: price('babe'),
     parties: sql<number>`(select count(*) ${live})::int`,
     people: sql<number>`coalesce((select sum(m.heads) from (select max(v.adults + v.children + v.babes) as heads from ${visits} v join ${bookings} b on b.id = v.booking_id
@@ -53,7 +55,7 @@ export async function officeTimes({ db }: AccountCtx, openDayId: Id<'openDay'>) 
   return db.select({
     stopId: stops.id, number: stops.number, garden: gardens.railwayName, shortName: gardens.shortName, stayMinutes: stops.stayMinutes, headsLimit: stops.headsLimit, hostLimit: gardens.headsLimit,
     entryTimeId: entryTimes.id, opensAt: entryTimes.opensAt, graceUntil: entryTimes.graceUntil, capacity: entryTimes.capacity, taken: entryTimes.taken, walkUps: entryTimes.walkUps, closedAt: entryTimes.closedAt,
-    confirmedHeads, expectedPeople,
+    confirmedHeads, expectedPeople, ownPrices,
   })
     .from(stops).innerJoin(gardens, eq(gardens.id, stops.gardenId)).leftJoin(entryTimes, eq(entryTimes.stopId, stops.id))
     .where(eq(stops.openDayId, openDayId)).orderBy(asc(stops.number), asc(entryTimes.opensAt)).limit(500);

@@ -2,20 +2,23 @@ import type { Id } from '@/lib/core/ids';
 import type { Role } from '@/lib/core/words';
 import { may, type Capability } from '@/lib/people/rules/capabilities';
 
+/** What a stop charges instead of the open day's prices, by kind, in minor units; a kind that is not there pays the day's. */
+export type OwnPrices = { adult?: number; child?: number; babe?: number };
+
 type Row = {
   stopId: Id<'stop'>; number: number; garden: string; shortName: string; stayMinutes: number; headsLimit: number; hostLimit: number;
   entryTimeId: Id<'entryTime'> | null; opensAt: Date | null; graceUntil: Date | null; capacity: number | null; taken: number | null; walkUps: number | null; closedAt: Date | null;
-  confirmedHeads: number; expectedPeople: number;
+  confirmedHeads: number; expectedPeople: number; ownPrices: OwnPrices;
 };
 
 export type OfficeTime = { id: Id<'entryTime'>; opensAt: Date; graceUntil: Date; capacity: number; taken: number; held: number; walkUps: number; people: number; closedAt: Date | null };
-export type OfficeStop = { id: Id<'stop'>; number: number; garden: string; shortName: string; stayMinutes: number; headsLimit: number; hostLimit: number; capacity: number; taken: number; people: number; times: OfficeTime[] };
+export type OfficeStop = { id: Id<'stop'>; number: number; garden: string; shortName: string; stayMinutes: number; headsLimit: number; hostLimit: number; ownPrices: OwnPrices; capacity: number; taken: number; people: number; times: OfficeTime[] };
 
 /** Rows of one entry time each, already in order, as stops with their times and sums. `held` is what is kept and not yet confirmed; `walkUps` what is set aside for people without a ticket. */
 export function toOfficeStops(rows: readonly Row[]): OfficeStop[] {
   const stops = new Map<string, OfficeStop>();
   for (const row of rows) {
-    const stop = stops.get(row.stopId) ?? { id: row.stopId, number: row.number, garden: row.garden, shortName: row.shortName, stayMinutes: row.stayMinutes, headsLimit: row.headsLimit, hostLimit: row.hostLimit, capacity: 0, taken: 0, people: 0, times: [] };
+    const stop = stops.get(row.stopId) ?? { id: row.stopId, number: row.number, garden: row.garden, shortName: row.shortName, stayMinutes: row.stayMinutes, headsLimit: row.headsLimit, hostLimit: row.hostLimit, ownPrices: row.ownPrices, capacity: 0, taken: 0, people: 0, times: [] };
     stops.set(row.stopId, stop);
     const { entryTimeId, opensAt, graceUntil, capacity, taken, walkUps } = row;
     if (entryTimeId === null || opensAt === null || graceUntil === null || capacity === null || taken === null || walkUps === null) continue;

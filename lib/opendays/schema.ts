@@ -10,6 +10,9 @@ const slugField = z.string({ error: 'Type a short name for the address.' }).tran
 /** An amount as typed; read in the club's currency by the command. */
 const priceField = z.string({ error: 'Type a price; 0 is free.' }).max(20);
 
+/** A whole number that may be left out: the club's own holds then. */
+const optionalWhole = (bounds: { min: number; max: number }) => z.union([z.literal('').transform(() => null), wholeField(bounds)]).optional().transform((value) => value ?? null);
+
 const dayParts = {
   title: textField('the open day’s name', 60),
   placeLine: textField('where it is, in a few words', 80),
@@ -20,6 +23,7 @@ const dayParts = {
   adult: priceField,
   child: priceField,
   babe: priceField,
+  partyPeopleMax: optionalWhole({ min: 1, max: 99 }),
 };
 
 export const openDayInput = z.object({ slug: slugField, ...dayParts });
@@ -35,6 +39,11 @@ export const stopInput = z.object({
 });
 
 export const stopChangeInput = z.object({ stopId: idField<'stop'>(), stayMinutes: wholeField({ min: 5, max: 240 }), headsLimit: wholeField({ min: 1, max: 500 }) });
+
+/** A price that may be left out: the open day's own holds then. */
+const ownPriceField = z.string().max(20).optional().transform((text) => (text ?? '').trim());
+
+export const stopPricesInput = z.object({ stopId: idField<'stop'>(), adult: ownPriceField, child: ownPriceField, babe: ownPriceField });
 
 const timeParts = { graceMinutes: wholeField({ min: 1, max: 240 }), capacity: wholeField({ min: 0, max: 500 }) };
 

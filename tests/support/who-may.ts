@@ -43,6 +43,7 @@ export const ACTIONS: Readonly<Record<string, Who>> = {
   publishOpenDayAction: COORDINATOR,
   addStopAction: COORDINATOR,
   changeStopAction: COORDINATOR,
+  setStopPricesAction: COORDINATOR,
   makeEntryTimesAction: COORDINATOR,
   changeEntryTimeAction: COORDINATOR,
   closeEntryTimeAction: COORDINATOR,

@@ -46,11 +46,13 @@ export async function changeOpenDay(ctx: AccountCtx, input: z.output<typeof open
   });
 }
 
-function columnsOf({ club }: AccountCtx, input: { title: string; placeLine: string; howToCome: string | null; heldOn: string; opensAt: string; closesAt: string }) {
+type DayWords = { title: string; placeLine: string; howToCome: string | null; heldOn: string; opensAt: string; closesAt: string; partyPeopleMax: number | null };
+
+function columnsOf({ club }: AccountCtx, input: DayWords) {
   const opensAt = instantOf(input.heldOn, input.opensAt, club.timeZone);
   const closesAt = instantOf(input.heldOn, input.closesAt, club.timeZone);
   if (closesAt <= opensAt) throw new Refusal('entry_time_over', { sentence: 'The gates close after they open.', fields: { closesAt: 'Choose a later time.' } });
-  return { title: input.title, placeLine: input.placeLine, howToCome: input.howToCome, heldOn: input.heldOn, opensAt, closesAt };
+  return { title: input.title, placeLine: input.placeLine, howToCome: input.howToCome, heldOn: input.heldOn, opensAt, closesAt, partyPeopleMax: input.partyPeopleMax };
 }
 
 function readPrices({ club }: AccountCtx, typed: Prices): Record<(typeof KINDS)[number], number> {

@@ -10,7 +10,7 @@ import { aClub, anOpenDay, cleo, ctxOf } from '@/tests/support/cast';
 import { refusalOf } from '../bookings/hold-cast';
 import { aFreeDay, aParty, lettersTo } from './office-cast';
 
-const words = { title: 'Test Open Gardens', placeLine: 'in the test valley', howToCome: null, opensAt: '10:00', closesAt: '16:00', adult: '0', child: '0', babe: '0' };
+const words = { title: 'Test Open Gardens', placeLine: 'in the test valley', howToCome: null, opensAt: '10:00', closesAt: '16:00', adult: '0', child: '0', babe: '0', partyPeopleMax: null };
 
 /** Comes back once some connection of this database waits for a lock. */
 async function someoneWaits(): Promise<void> {

@@ -12,7 +12,7 @@ import { aClub, aGarden, anEntryTime, anOpenDay, cleo, ctxOf, NOON } from '@/tes
 import { keep, refusalOf } from '../bookings/hold-cast';
 import { aFreeDay, aParty, auditOf } from './office-cast';
 
-const spring = { slug: 'spring', title: 'Spring Open Gardens', placeLine: 'in the valley', howToCome: null, heldOn: '2027-05-15', opensAt: '10:00', closesAt: '16:00', adult: '8', child: '4.50', babe: '0' };
+const spring = { slug: 'spring', title: 'Spring Open Gardens', placeLine: 'in the valley', howToCome: null, heldOn: '2027-05-15', opensAt: '10:00', closesAt: '16:00', adult: '8', child: '4.50', babe: '0', partyPeopleMax: null };
 
 async function made(slug: string) {
   const ctx = await ctxOf(await cleo());

@@ -15,7 +15,7 @@ const CLUB = { timeZone: 'America/New_York', locale: 'en-US', hourCycle: 'h23' a
 const TEN = new Date('2027-05-15T14:00:00Z');
 const at = (minutes: number) => new Date(TEN.getTime() + minutes * 60_000);
 const time = (minutes: number, changes: Partial<OfficeTime> = {}): OfficeTime => ({ id: newId<'entryTime'>(), opensAt: at(minutes), graceUntil: at(minutes + 20), capacity: 12, taken: 4, held: 0, walkUps: 0, people: 4, closedAt: null, ...changes });
-const stop = (number: number, shortName: string, times: OfficeTime[]): OfficeStop => ({ id: newId<'stop'>(), number, garden: shortName, shortName, stayMinutes: 35, headsLimit: 20, hostLimit: 28, capacity: 0, taken: 0, people: 0, times });
+const stop = (number: number, shortName: string, times: OfficeTime[]): OfficeStop => ({ id: newId<'stop'>(), number, garden: shortName, shortName, stayMinutes: 35, headsLimit: 20, hostLimit: 28, ownPrices: {}, capacity: 0, taken: 0, people: 0, times });
 const words = (element: Element | null | undefined) => element?.textContent?.replace(/\s+/g, ' ').trim();
 type Day = Parameters<typeof DayBill>[0]['day'];
 const pressed = async () => idleForm;

@@ -3,8 +3,9 @@ import { refresh } from 'next/cache';
 import { redirect } from 'next/navigation';
 import { changeEntryTime, closeEntryTime, makeEntryTimes, reopenEntryTime } from '@/lib/opendays/commands/entry-times';
 import { writeToParties } from '@/lib/opendays/commands/notice';
+import { setStopPrices } from '@/lib/opendays/commands/stop-prices';
 import { addPlanNote, addStop, changeOpenDay, changeStop, makeOpenDay, publishOpenDay } from '@/lib/opendays/commands/plan';
-import { entryTimeChangeInput, entryTimeIdInput, entryTimesInput, noticeInput, openDayChangeInput, openDayIdInput, openDayInput, planNoteInput, stopChangeInput, stopInput } from '@/lib/opendays/schema';
+import { entryTimeChangeInput, entryTimeIdInput, entryTimesInput, noticeInput, openDayChangeInput, openDayIdInput, openDayInput, planNoteInput, stopChangeInput, stopInput, stopPricesInput } from '@/lib/opendays/schema';
 import { action } from '@/lib/web/action';
 import { doneWith } from './done';
 
@@ -17,6 +18,8 @@ export const publishOpenDayAction = action({ requires: 'openDays.edit', input: o
 export const addStopAction = action({ requires: 'openDays.edit', input: stopInput, run: addStop, after: () => doneWith('The garden is a stop. Make its entry times next.') });
 
 export const changeStopAction = action({ requires: 'openDays.edit', input: stopChangeInput, run: changeStop, after: () => doneWith('Kept.') });
+
+export const setStopPricesAction = action({ requires: 'openDays.edit', input: stopPricesInput, run: setStopPrices, after: () => doneWith('These prices hold here from now on.') });
 
 export const makeEntryTimesAction = action({ requires: 'openDays.edit', input: entryTimesInput, run: makeEntryTimes, after: (made) => doneWith(made === 1 ? 'One entry time is made.' : `${made} entry times are made.`) });
 

@@ -13,7 +13,7 @@ export default async function NewOpenDayPage() {
   const heldOn = addMonths(dayOf(ctx.now, ctx.club.timeZone), 3);
   return (
     <OfficePage ctx={ctx} here="/office/open-days" bill={<Bill name="A new open day" line="Nobody sees it until you publish it; gardens and entry times come next" />}>
-      <OpenDayForm action={makeOpenDayAction} day={{ title: '', placeLine: '', howToCome: '', heldOn, opensAt: '10:00', closesAt: '16:00', adult: '8.00', child: '4.00', babe: '0' }} />
+      <OpenDayForm action={makeOpenDayAction} day={{ title: '', placeLine: '', howToCome: '', heldOn, opensAt: '10:00', closesAt: '16:00', adult: '8.00', child: '4.00', babe: '0', partyPeopleMax: '' }} />
     </OfficePage>
   );
 }

@@ -39,7 +39,7 @@ export default async function PlanPage({ params }: { params: Promise<{ slug: str
         <OpenDayChangeForm
           action={changeOpenDayAction}
           openDayId={day.id}
-          day={{ title: day.title, placeLine: day.placeLine, howToCome: day.howToCome ?? '', heldOn: day.heldOn, opensAt: time(day.opensAt), closesAt: time(day.closesAt), adult: price(day.adultMinor), child: price(day.childMinor), babe: price(day.babeMinor) }}
+          day={{ title: day.title, placeLine: day.placeLine, howToCome: day.howToCome ?? '', heldOn: day.heldOn, opensAt: time(day.opensAt), closesAt: time(day.closesAt), adult: price(day.adultMinor), child: price(day.childMinor), babe: price(day.babeMinor), partyPeopleMax: day.partyPeopleMax === null ? '' : String(day.partyPeopleMax) }}
         />
       </Part>
     </DayCopy>
