@@ -1,15 +1,19 @@
 import 'server-only';
 import { cookies } from 'next/headers';
 import { redirect } from 'next/navigation';
+import type { Ctx } from '@/lib/infra/context';
 import { CODE_MINUTES } from '@/lib/people/commands/sign-in';
+import { findAccountActor } from '@/lib/people/queries';
+import { homePathOf } from '@/lib/people/rules/home-path';
 import type { Id } from '@/lib/core/ids';
 import { env } from '@/lib/infra/env';
 import { endSession, startSession } from '@/lib/web/auth';
 
-/** Gives the browser its session, then leads to the account's own pages. */
-export async function startSessionThen(signInId: Id<'signIn'>): Promise<void> {
+/** Gives the browser its session, then leads to the account's own pages, in one step. */
+export async function startSessionThen(signInId: Id<'signIn'>, { db }: Pick<Ctx, 'db'>): Promise<void> {
   await startSession(signInId);
-  redirect('/account/home');
+  const account = await findAccountActor(db, signInId);
+  redirect(account === null ? '/sign-in' : homePathOf(account));
 }
 
 /** Takes the session from the browser and leads home. */
