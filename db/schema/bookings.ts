@@ -1,5 +1,5 @@
 import { sql } from 'drizzle-orm';
-import { boolean, check, index, integer, pgTable, smallint, text, uniqueIndex } from 'drizzle-orm/pg-core';
+import { boolean, check, foreignKey, index, integer, pgTable, smallint, text, unique, uniqueIndex } from 'drizzle-orm/pg-core';
 import { bytes, idOf, instant, ownId } from './columns';
 import { entryTimes, openDays } from './opendays';
 import { accounts, households } from './people';
@@ -24,6 +24,7 @@ export const bookings = pgTable('bookings', {
   wantsInvitations: boolean().notNull().default(true),
   ticketNumber: integer().generatedAlwaysAsIdentity(), // the printed number on the pasteboard
 }, (t) => [
+  unique('bookings_id_with_day').on(t.id, t.openDayId),
   uniqueIndex('bookings_one_hold_a_browser').on(t.holderHash, t.openDayId).where(sql`${t.confirmedAt} is null and ${t.releasedAt} is null`),
   index('bookings_by_day').on(t.openDayId, t.confirmedAt),
   index('bookings_by_household').on(t.householdId),
@@ -47,9 +48,9 @@ export const bookingContacts = pgTable('booking_contacts', {
 /** One party at one entry time. `heads` is what counts against capacity. */
 export const visits = pgTable('visits', {
   id: ownId<'visit'>(),
-  bookingId: idOf<'booking'>().notNull().references(() => bookings.id),
-  openDayId: idOf<'openDay'>().notNull().references(() => openDays.id),
-  entryTimeId: idOf<'entryTime'>().notNull().references(() => entryTimes.id),
+  bookingId: idOf<'booking'>().notNull(),
+  openDayId: idOf<'openDay'>().notNull(),
+  entryTimeId: idOf<'entryTime'>().notNull(),
   adults: smallint().notNull(),
   children: smallint().notNull(),
   babes: smallint().notNull().default(0),
@@ -61,6 +62,9 @@ export const visits = pgTable('visits', {
   movedAt: instant(),
   givenBackAt: instant(),
 }, (t) => [
+  // With its day in the key, a visit cannot be on another day than its booking and its entry time.
+  foreignKey({ name: 'visits_on_bookings_day', columns: [t.bookingId, t.openDayId], foreignColumns: [bookings.id, bookings.openDayId] }),
+  foreignKey({ name: 'visits_on_times_day', columns: [t.entryTimeId, t.openDayId], foreignColumns: [entryTimes.id, entryTimes.openDayId] }),
   index('visits_by_booking').on(t.bookingId),
   index('visits_by_entry_time').on(t.entryTimeId).where(sql`${t.givenBackAt} is null`),
   index('visits_by_day').on(t.openDayId),

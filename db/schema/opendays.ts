@@ -1,5 +1,5 @@
 import { sql } from 'drizzle-orm';
-import { check, date, index, integer, pgTable, primaryKey, smallint, text, unique, uniqueIndex } from 'drizzle-orm/pg-core';
+import { check, date, foreignKey, index, integer, pgTable, primaryKey, smallint, text, unique, uniqueIndex } from 'drizzle-orm/pg-core';
 import { PERSON_KINDS } from '../../lib/core/words'; // relative: the migration tool knows no aliases
 import { idOf, instant, ownId } from './columns';
 import { gardens } from './gardens';
@@ -36,6 +36,7 @@ export const stops = pgTable('stops', {
   headsLimit: integer().notNull(),
   closedAt: instant(),
 }, (t) => [
+  unique('stops_id_with_day').on(t.id, t.openDayId),
   uniqueIndex('stops_one_number').on(t.openDayId, t.number),
   uniqueIndex('stops_one_garden').on(t.openDayId, t.gardenId),
   index('stops_by_garden').on(t.gardenId),
@@ -47,8 +48,8 @@ export const stops = pgTable('stops', {
 /** A timed slot at a stop, half-open: people come in in [opens_at, grace_until). `taken` is moved only by the statement that decides. */
 export const entryTimes = pgTable('entry_times', {
   id: ownId<'entryTime'>(),
-  stopId: idOf<'stop'>().notNull().references(() => stops.id),
-  openDayId: idOf<'openDay'>().notNull().references(() => openDays.id),
+  stopId: idOf<'stop'>().notNull(),
+  openDayId: idOf<'openDay'>().notNull(),
   opensAt: instant().notNull(),
   graceUntil: instant().notNull(),
   capacity: integer().notNull(),
@@ -56,6 +57,8 @@ export const entryTimes = pgTable('entry_times', {
   taken: integer().notNull().default(0),
   closedAt: instant(),
 }, (t) => [
+  unique('entry_times_id_with_day').on(t.id, t.openDayId),
+  foreignKey({ name: 'entry_times_on_stops_day', columns: [t.stopId, t.openDayId], foreignColumns: [stops.id, stops.openDayId] }),
   uniqueIndex('entry_times_one_start').on(t.stopId, t.opensAt),
   index('entry_times_by_day').on(t.openDayId),
   check('entry_times_never_oversold', sql`0 <= ${t.taken} and ${t.taken} <= ${t.capacity}`),

@@ -18,12 +18,18 @@ import { currentSignIn } from './auth';
 import { ensureHolder, readBookingLink, readHolder } from './cookies';
 import type { ActorFor, Requires } from './requires';
 
-const base = cache(async () => {
+/** What every request has before the club is asked for. */
+const ground = cache(async () => {
   const db = getDb();
   const incoming = await headers();
   const address = await clientAddress();
   const client = address === null ? null : hashSecret(address).slice(0, 22);
-  return { db, club: await getClub(db), now: readClock(), requestId: incoming.get('x-request-id') ?? randomUUID(), client };
+  return { db, now: readClock(), requestId: incoming.get('x-request-id') ?? randomUUID(), client };
+});
+
+const base = cache(async () => {
+  const here = await ground();
+  return { ...here, club: await getClub(here.db) };
 });
 
 const account = cache(async () => {
@@ -68,7 +74,7 @@ async function holder(mayMakeCookie: boolean): Promise<HolderActor> {
 async function booking(code: string): Promise<BookingActor> {
   if (!isSpokenCode(code)) throw new Refusal('not_found'); // it names a cookie and a row
   const hash = await readBookingLink(code);
-  const { db, now } = await base();
+  const { db, now } = await ground();
   const byLink = hash === null ? null : await findBookingByLink(db, code, hash, now);
   if (byLink) return byLink;
   const actor = await account();
@@ -87,6 +93,12 @@ async function officer(capability: Capability): Promise<Actor> {
 export async function requestContext<R extends Requires>(requires: R, options: { code?: string } = {}): Promise<Ctx<ActorFor<R>>> {
   const actor = await actorFor(requires, { ...options, mayMakeCookie: true });
   return { ...(await base()), actor: actor as ActorFor<R> }; // actorFor answers with the actor that R asks for
+}
+
+/** As `requestContext`, for a handler whose command reads the club's settings together with its own facts. */
+export async function groundContext<R extends Requires>(requires: R): Promise<Omit<Ctx<ActorFor<R>>, 'club'>> {
+  const actor = await actorFor(requires, { mayMakeCookie: true });
+  return { ...(await ground()), actor: actor as ActorFor<R> }; // actorFor answers with the actor that R asks for
 }
 
 /** The context of a page. A stranger is sent to sign in; whoever may not see it is told it is not there. */

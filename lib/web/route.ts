@@ -10,7 +10,7 @@ import { env } from '@/lib/infra/env';
 import { log } from '@/lib/infra/log';
 import { findGateActor } from '@/lib/gate/access';
 import { hashSecret } from '@/lib/infra/secrets';
-import { requestContext, systemContext } from './context';
+import { groundContext, requestContext, systemContext } from './context';
 import { fieldErrorsOf, statusOf } from './problems';
 import type { ActorFor, Requires } from './requires';
 
@@ -18,24 +18,29 @@ import type { ActorFor, Requires } from './requires';
 export type RouteRequires = Requires | 'gate' | 'machine';
 type RouteActor<R extends RouteRequires> = R extends 'gate' ? GateActor : R extends 'machine' ? SystemActor : R extends Requires ? ActorFor<R> : never;
 
-type Asked<R extends RouteRequires, S> = { ctx: Ctx<RouteActor<R>>; input: S; params: Record<string, string>; request: NextRequest; body: string };
+/** What a handler is given to begin with: all of it, or the `ground` without the club's settings, which its command reads itself. */
+type Given = 'club' | 'ground';
+type GivenCtx<R extends RouteRequires, G extends Given> = G extends 'ground' ? Omit<Ctx<RouteActor<R>>, 'club'> : Ctx<RouteActor<R>>;
+
+type Asked<R extends RouteRequires, S, G extends Given> = { ctx: GivenCtx<R, G>; input: S; params: Record<string, string>; request: NextRequest; body: string };
 
 /** What a route is made of. `name` is its pattern, for the log; `input` parses the JSON body, or the query of a GET. */
-export type RouteParts<R extends RouteRequires, S extends z.ZodType> = {
+export type RouteParts<R extends RouteRequires, S extends z.ZodType, G extends Given = 'club'> = {
   name: string;
   requires: R;
   input?: S;
   maxBytes?: number;
   raw?: boolean; // the body is handed over as text, for signatures
   keepMs?: number; // a GET without input that says the same to everyone: one answer a process and address for so long
-  run: (asked: Asked<R, z.output<S>>) => Promise<Response | object>;
+  given?: G;
+  run: (asked: Asked<R, z.output<S>, G>) => Promise<Response | object>;
 };
 
 const privately = { 'Cache-Control': 'private, no-store' };
 const say = (status: number, body: object) => NextResponse.json(body, { status, headers: privately });
 
 /** Builds a route handler, the one way there is: origin, size, actor, schema, command, status. */
-export function route<R extends RouteRequires, S extends z.ZodType = z.ZodType<undefined>>(parts: RouteParts<R, S>) {
+export function route<R extends RouteRequires, S extends z.ZodType = z.ZodType<undefined>, G extends Given = 'club'>(parts: RouteParts<R, S, G>) {
   const kept = parts.keepMs === undefined ? null : keepingAnswers(parts.keepMs);
   return async function handle(request: NextRequest, segment: { params: Promise<Record<string, string> | undefined> }): Promise<Response> {
     if (kept === null) return answer(request, segment);
@@ -81,13 +86,13 @@ function keepingAnswers(ms: number) {
   };
 }
 
-async function readRequest<R extends RouteRequires, S extends z.ZodType>(parts: RouteParts<R, S>, request: NextRequest, params: Record<string, string>) {
+async function readRequest<R extends RouteRequires, S extends z.ZodType, G extends Given>(parts: RouteParts<R, S, G>, request: NextRequest, params: Record<string, string>) {
   const writes = request.method !== 'GET' && request.method !== 'HEAD';
   if (writes && parts.requires !== 'machine' && parts.requires !== 'gate' && !isSameOrigin(request)) throw new Refusal('wrong_origin');
   if (!isReadableAddress(request.nextUrl)) return say(400, { message: 'That is not an address of ours.' });
   const body = writes ? await readBody(request, parts.maxBytes ?? 64 * 1024) : '';
   if (body === null) return say(413, { message: 'That is more than this address takes.' });
-  const ctx = (await contextFor(parts.requires, request, params)) as Ctx<RouteActor<R>>; // contextFor answers with the actor that R asks for
+  const ctx = (await contextFor(parts, request, params)) as GivenCtx<R, G>; // contextFor answers with what R and G ask for
   if (!parts.input) return { ctx, input: undefined as z.output<S>, params, request, body }; // no schema: nothing is read
   const plain = writes && parts.raw !== true ? parseJson(body) : Object.fromEntries(request.nextUrl.searchParams);
   if (plain === BROKEN) return say(400, { message: 'That is not JSON.' });
@@ -98,7 +103,8 @@ async function readRequest<R extends RouteRequires, S extends z.ZodType>(parts: 
 
 /** The body as text, or null as soon as it is longer than `limit` bytes: what says nothing of its length is not kept either. */
 async function readBody(request: NextRequest, limit: number): Promise<string | null> {
-  if (Number(request.headers.get('content-length') ?? 0) > limit) return null;
+  const length = request.headers.get('content-length');
+  if (length !== null) return Number(length) > limit ? null : request.text(); // the server takes no more than was announced
   const pieces: Uint8Array[] = [];
   let bytes = 0;
   for await (const piece of request.body ?? []) {
@@ -118,8 +124,9 @@ function parseJson(body: string): unknown {
   }
 }
 
-async function contextFor(requires: RouteRequires, request: NextRequest, params: Record<string, string>): Promise<Ctx> {
+async function contextFor({ requires, given }: { requires: RouteRequires; given?: Given }, request: NextRequest, params: Record<string, string>): Promise<Omit<Ctx, 'club'>> {
   if (requires === 'machine') return systemContext('handler');
+  if (requires !== 'gate' && given === 'ground') return groundContext(requires);
   if (requires !== 'gate') return requestContext(requires, params['code'] === undefined ? {} : { code: params['code'] });
   const system = await systemContext('gate');
   const key = /^Bearer (.{40,100})$/.exec(request.headers.get('authorization') ?? '')?.[1];

@@ -8,6 +8,7 @@ export const POST = route({
   requires: 'browser',
   input: holdInput,
   maxBytes: 16 * 1024,
+  given: 'ground', // holds come in a rush: the club's settings travel with the hold's own facts
   run: async ({ ctx, input }) => {
     await holdPlaces(ctx, input);
     return { next: '/hold' };

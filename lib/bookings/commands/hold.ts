@@ -18,13 +18,14 @@ const HOLDS_FROM_ONE_PLACE = { tries: 60, minutes: 10 };
 /**
  * Keeps all the wanted places for this browser, or none; returns the booking's id. Its earlier hold of the same open day
  * is given back in the same transaction. Two round trips: the limiter with the facts, and one statement that locks
- * the entry times in id order and decides.
+ * the entry times in id order and decides. The club's settings come with the facts, so a context without them will do.
  */
-export async function holdPlaces(ctx: Ctx<HolderActor>, input: HoldInput): Promise<Id<'booking'>> {
-  const { db, club, now, actor } = ctx;
+export async function holdPlaces(ctx: Omit<Ctx<HolderActor>, 'club'>, input: HoldInput): Promise<Id<'booking'>> {
+  const { db, now, actor } = ctx;
   const tried = { key: `hold:${ctx.client ?? actor.holderHash}`, limit: HOLDS_FROM_ONE_PLACE, now };
   const facts = await countTryAndFindFacts(db, tried, input.openDayId, input.wanted.map((wish) => wish.entryTimeId));
   if (!facts) throw new Refusal('not_found');
+  const { club } = facts;
   refuseIf(holdRefusal(facts.day, facts.entries, input.wanted, club, now));
   const clash = input.insists ? null : clashSentence(facts.entries, facts.minutes, club);
   if (clash !== null) throw new Refusal('clash', { sentence: clash });
@@ -44,7 +45,10 @@ const REFUSED_BY_DATABASE = new Map([['LH001', 'places_gone'], ['LH002', 'hold_p
 const TRIED_AGAIN = new Set(['40P01', '40001', '55P03']);
 const DRAWN_AGAIN = new Set(['bookings_code_unique', 'bookings_one_hold_a_browser']); // the code is taken; another tab of this browser was first
 
-/** Runs the deciding statement, up to four times when it lost a race that a second try wins, and reads its refusals. */
+/** Of the tabs of one browser that press at once, one gets through in each round. */
+const TABS_MOST = 12;
+
+/** Runs the deciding statement again when it lost a race that another try wins, and reads its refusals. */
 async function decide(db: Queryable, statement: () => ReturnType<typeof sql>): Promise<Id<'booking'>> {
   for (let tries = 1; ; tries += 1) {
     try {
@@ -53,9 +57,9 @@ async function decide(db: Queryable, statement: () => ReturnType<typeof sql>): P
       const state = sqlStateOf(error) ?? '';
       const refused = [...REFUSED_BY_DATABASE].find(([code]) => code === state);
       if (refused) throw new Refusal(refused[1]);
-      const isWorthAnother = TRIED_AGAIN.has(state) || DRAWN_AGAIN.has(constraintOf(error) ?? '');
-      if (!isWorthAnother) throw error;
-      if (tries === 4) throw new Refusal('busy');
+      const isDrawnAgain = DRAWN_AGAIN.has(constraintOf(error) ?? '');
+      if (!isDrawnAgain && !TRIED_AGAIN.has(state)) throw error;
+      if (tries >= (isDrawnAgain ? TABS_MOST : 4)) throw new Refusal('busy');
     }
   }
 }

@@ -2,15 +2,18 @@ import 'server-only';
 import { sql } from 'drizzle-orm';
 import type { Queryable } from '@/db/client';
 import type { Id } from '@/lib/core/ids';
+import type { ClubSettings } from '@/lib/infra/context';
 import { refuseTries, tryCounted, type Limit } from '@/lib/infra/rate-limit';
 import type { MinutesFact } from '@/lib/opendays/rules/reach';
 import type { DayFacts, EntryFacts } from '@/lib/bookings/rules/hold';
 
-export type WishFacts = { day: DayFacts; entries: EntryFacts[]; minutes: MinutesFact[] };
+/** The club's settings that a hold goes by, read with its facts: a hold asks for nothing else. */
+export type HoldClub = Pick<ClubSettings, 'timeZone' | 'locale' | 'hourCycle' | 'currency' | 'holdMinutes' | 'partyPeopleMax' | 'partyVisitsMax' | 'babesTakePlace'>;
+export type WishFacts = { club: HoldClub; day: DayFacts; entries: EntryFacts[]; minutes: MinutesFact[] };
 
 /** The same as JSON tells it: instants are text. */
 type AsText<T> = { [K in keyof T]: T[K] extends Date ? string : T[K] extends Date | null ? string | null : T[K] };
-type TextFacts = { day: AsText<DayFacts>; entries: AsText<EntryFacts>[]; minutes: MinutesFact[] };
+type TextFacts = { club: HoldClub; day: AsText<DayFacts>; entries: AsText<EntryFacts>[]; minutes: MinutesFact[] };
 
 const instant = (text: string | null) => (text === null ? null : new Date(text));
 
@@ -35,8 +38,9 @@ export async function countTryAndFindFacts(db: Queryable, tried: { key: string; 
 
 function toFacts(facts: TextFacts | null): WishFacts | null {
   if (!facts) return null;
-  const { day, entries, minutes } = facts;
+  const { club, day, entries, minutes } = facts;
   return {
+    club,
     day: { ...day, publishedAt: instant(day.publishedAt), calledOffAt: instant(day.calledOffAt) },
     entries: entries.map((entry) => ({
       ...entry, opensAt: new Date(entry.opensAt), graceUntil: new Date(entry.graceUntil), closedAt: instant(entry.closedAt), stopClosedAt: instant(entry.stopClosedAt),
