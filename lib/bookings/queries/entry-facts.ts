@@ -4,7 +4,9 @@ import type { Queryable } from '@/db/client';
 import type { Id } from '@/lib/core/ids';
 import type { ClubSettings } from '@/lib/infra/context';
 import { refuseTries, tryCounted, type Limit } from '@/lib/infra/rate-limit';
+import type { PersonPrices } from '@/lib/opendays/rules/prices';
 import type { MinutesFact } from '@/lib/opendays/rules/reach';
+import { pricesOf, type PriceFacts } from '@/lib/opendays/views';
 import type { DayFacts, EntryFacts } from '@/lib/bookings/rules/hold';
 
 /** The club's settings that a hold goes by, read with its facts: a hold asks for nothing else. */
@@ -13,7 +15,7 @@ export type WishFacts = { club: HoldClub; day: DayFacts; entries: EntryFacts[]; 
 
 /** The same as JSON tells it: instants are text. */
 type AsText<T> = { [K in keyof T]: T[K] extends Date ? string : T[K] extends Date | null ? string | null : T[K] };
-type TextFacts = { club: HoldClub; day: AsText<DayFacts>; entries: AsText<EntryFacts>[]; minutes: MinutesFact[] };
+type TextFacts = { club: HoldClub; day: AsText<DayFacts>; entries: (AsText<Omit<EntryFacts, keyof PersonPrices>> & { stopId: Id<'stop'> })[]; prices: PriceFacts[]; minutes: MinutesFact[] };
 
 const instant = (text: string | null) => (text === null ? null : new Date(text));
 
@@ -38,12 +40,12 @@ export async function countTryAndFindFacts(db: Queryable, tried: { key: string; 
 
 function toFacts(facts: TextFacts | null): WishFacts | null {
   if (!facts) return null;
-  const { club, day, entries, minutes } = facts;
+  const { club, day, entries, prices, minutes } = facts;
   return {
     club,
     day: { ...day, publishedAt: instant(day.publishedAt), calledOffAt: instant(day.calledOffAt) },
-    entries: entries.map((entry) => ({
-      ...entry, opensAt: new Date(entry.opensAt), graceUntil: new Date(entry.graceUntil), closedAt: instant(entry.closedAt), stopClosedAt: instant(entry.stopClosedAt),
+    entries: entries.map(({ stopId, ...entry }) => ({
+      ...entry, ...pricesOf(prices, stopId), opensAt: new Date(entry.opensAt), graceUntil: new Date(entry.graceUntil), closedAt: instant(entry.closedAt), stopClosedAt: instant(entry.stopClosedAt),
     })),
     minutes,
   };
