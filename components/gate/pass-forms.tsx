@@ -55,7 +55,7 @@ function NewPass({ card }: { card: PassCard }) {
 /** Takes a pass back; its phones are refused at once. */
 export function RevokeGatePassForm({ action, gatePassId, helper }: { action: FormAction; gatePassId: string; helper: string }) {
   return (
-    <ActionForm action={action} submit={`Take back ${helper}’s`} tone="bare">
+    <ActionForm action={action} submit={`Take back the pass of ${helper}`} tone="bare">
       <input type="hidden" name="gatePassId" value={gatePassId} />
     </ActionForm>
   );
