@@ -70,7 +70,7 @@ async function change(tx: Tx, ctx: AccountCtx, input: z.output<typeof entryTimeC
     after: { start: formatTime(opensAt, ctx.club), grace: input.graceMinutes, capacity: input.capacity },
   });
   if (opensAt.getTime() === before.opensAt.getTime()) return 0;
-  await pencil(tx, ctx, { openDayId: before.openDayId, stopId: before.stopId, note: `${before.garden}: ${formatTime(before.opensAt, ctx.club)} is now ${formatTime(opensAt, ctx.club)}. ${counted(affected.length, 'party', 'parties')} written to.` });
+  await pencil(tx, ctx, { openDayId: before.openDayId, stopId: before.stopId, note: `${before.garden}: ${formatTime(before.opensAt, ctx.club)} is now ${formatTime(opensAt, ctx.club)}. ${affected.length === 0 ? 'No party to write to' : `${counted(affected.length, 'party', 'parties')} written to`}.` });
   const was = `${before.garden} at ${formatTime(before.opensAt, ctx.club)}`;
   for (const visit of affected) await tellMoved(tx, ctx, visit, { was, reason: input.reason });
   return affected.length;

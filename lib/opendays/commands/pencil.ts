@@ -11,4 +11,4 @@ export async function pencil(tx: Tx, { actor, now }: AccountCtx, { openDayId, st
   await tx.insert(planChanges).values({ openDayId, stopId, at: now, accountId: actor.accountId, initials: initialsOf(actor.name), note });
 }
 
-const initialsOf = (name: string): string => name.split(/\s+/).slice(0, 4).map((part) => `${Array.from(part)[0] ?? ''}.`).join('');
+const initialsOf = (name: string): string => name.split(/\s+/).slice(0, 4).map((part) => `${Array.from(part)[0] ?? ''}.`).join(' ');

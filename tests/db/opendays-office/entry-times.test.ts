@@ -97,7 +97,7 @@ describe('changing an entry time', () => {
 
     await changeEntryTime(ctx, { entryTimeId: time.id, ...later });
 
-    expect(await planNotes(ctx, day.id)).toMatchObject([{ initials: 'C.H.', stopNumber: 1, note: expect.stringContaining('10:00 is now 10:30') }]);
+    expect(await planNotes(ctx, day.id)).toMatchObject([{ initials: 'C. H.', stopNumber: 1, note: expect.stringContaining('10:00 is now 10:30') }]);
   });
 
   it('sends no invitation to a party that wants none, and nothing to one that is still deciding', async () => {

@@ -130,7 +130,7 @@ describe('a pencil note', () => {
 
     await addPlanNote({ ...ctx, now: addMinutes(NOON, 5) }, { openDayId: day.id, note: 'All rung.' });
 
-    expect((await planNotes(ctx, day.id)).map(({ initials, note }) => `${note} ${initials}`)).toEqual(['All rung. C.H.', 'Ring the hosts. C.H.']);
+    expect((await planNotes(ctx, day.id)).map(({ initials, note }) => `${note} ${initials}`)).toEqual(['All rung. C. H.', 'Ring the hosts. C. H.']);
   });
 
   it('is refused for an open day that is not there', async () => {
