@@ -18,7 +18,7 @@ export function ToSettle({ items }: { items: readonly Unsettled[] }) {
   return (
     <section aria-labelledby="to-settle" className="mb-8">
       <h2 id="to-settle">To settle</h2>
-      {items.length === 0 ? <p className="mt-2 text-ink-soft">Nothing waits. The day looks after itself for now.</p> : null}
+      {items.length === 0 ? <p className="mt-2 text-ink-soft">Nothing waits here for now.</p> : null}
       <ol className="mt-2">
         {items.map((item, index) => (
           <li key={item.id} className={`settle-row border-b ${item.weight === 'now' ? 'border-ink' : 'border-rule'}`}>

@@ -21,7 +21,7 @@ export function InviteOfficerForm({ action }: { action: FormAction }) {
 /** Takes one role from one account. */
 export function TakeRoleForm({ action, accountId, role, name }: { action: FormAction; accountId: string; role: Role; name: string }) {
   return (
-    <ActionForm action={action} submit={`Take it from ${name}`} tone="bare">
+    <ActionForm action={action} submit={`Take the role from ${name}`} tone="bare">
       <input type="hidden" name="accountId" value={accountId} />
       <input type="hidden" name="role" value={role} />
     </ActionForm>

@@ -26,7 +26,7 @@ export default async function OfficeBookingsPage({ searchParams }: { searchParam
     <OfficePage
       ctx={ctx}
       here={PATH}
-      bill={<Bill name="Bookings" line={shown === undefined ? 'Every party of every open day' : `${shown.title}, every party`} sums={`${counted(total, 'booking', 'bookings')}${asked.find === '' ? '' : ` for “${asked.find}”`}.`} {...(total === 0 && asked.find === '' ? { rail: <RailRule state="empty" /> } : {})} />}
+      bill={<Bill name="Bookings" line={shown === undefined ? 'Every party of every open day' : `${shown.title}, every party`} sums={`${total === 0 ? 'No bookings' : counted(total, 'booking', 'bookings')}${asked.find === '' ? '' : ` for “${asked.find}”`}.`} {...(total === 0 && asked.find === '' ? { rail: <RailRule state="empty" /> } : {})} />}
     >
       <h2>Parties</h2>
       <DayFilter days={days.map(({ slug, title, heldOn }) => ({ slug, title, year: heldOn.slice(0, 4) }))} shown={asked.day} path={PATH} />
