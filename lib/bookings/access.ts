@@ -6,6 +6,8 @@ import { bearerLinks } from '@/db/schema/people';
 import type { Id } from '@/lib/core/ids';
 import { firstOrNull } from '@/lib/core/only';
 import type { BookingActor } from '@/lib/infra/context';
+import type { Ctx } from '@/lib/infra/context';
+import { countTry } from '@/lib/infra/rate-limit';
 import { sameHash } from '@/lib/infra/secrets';
 
 /** Whoever a private link's hash lets in under this code: from a letter it also proves the mailbox, from the paying browser it does not. */
@@ -36,4 +38,12 @@ export async function findOwnBooking(db: Queryable, code: string, householdId: I
   const rows = await db.select({ id: bookings.id }).from(bookings)
     .where(and(eq(bookings.code, code), eq(bookings.householdId, householdId), isNotNull(bookings.confirmedAt))).limit(1);
   return firstOrNull(rows)?.id ?? null;
+}
+
+/** A link has 256 random bits, so nobody finds one by trying; this keeps whoever tries from costing much. */
+const LOOK_UPS = { tries: 120, minutes: 10 };
+
+/** Counts one look-up of a private link, by client; refuses past the limit. */
+export async function countLookUp({ db, client, now }: Pick<Ctx, 'db' | 'client' | 'now'>): Promise<void> {
+  if (client !== null) await countTry(db, `look-up:${client}`, LOOK_UPS, now);
 }

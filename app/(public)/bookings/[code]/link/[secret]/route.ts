@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { findBookingByLink } from '@/lib/bookings/access';
+import { countLookUp, findBookingByLink } from '@/lib/bookings/access';
 import { isSpokenCode } from '@/lib/bookings/rules/spoken-code';
 import { hashSecret } from '@/lib/infra/secrets';
 import { keepBookingLink, setLargePrint } from '@/lib/web/cookies';
@@ -15,6 +15,7 @@ export const GET = route({
   input: z.object({ print: z.literal('large').optional() }),
   run: async ({ ctx, params, input }) => {
     const { code = '', secret = '' } = params;
+    await countLookUp(ctx);
     const isCode = isSpokenCode(code);
     if (isCode && (await findBookingByLink(ctx.db, code, hashSecret(secret), ctx.now)) !== null) await keepBookingLink(code, secret);
     if (input.print === 'large') await setLargePrint();
