@@ -5,8 +5,7 @@ import { bookings } from '@/db/schema/bookings';
 import { bearerLinks } from '@/db/schema/people';
 import type { Id } from '@/lib/core/ids';
 import { firstOrNull } from '@/lib/core/only';
-import type { BookingActor } from '@/lib/infra/context';
-import type { Ctx } from '@/lib/infra/context';
+import type { BookingActor, Ctx } from '@/lib/infra/context';
 import { countTry } from '@/lib/infra/rate-limit';
 import { sameHash } from '@/lib/infra/secrets';
 
