@@ -23,11 +23,13 @@ export function BookingList({ bookings, club, link }: BookingListProps) {
 
 function VisitLine({ visit, club }: { visit: Visit; club: ClubTime }) {
   return (
-    <li className="flex flex-wrap items-baseline gap-x-5 overflow-x-clip border-b border-rule py-2">
-      <strong className="w-20 font-mono"><When at={visit.opensAt} show="time" club={club} /></strong>
-      <NipCard stopNumber={visit.number} width={38} />
-      <span className={visit.givenBackAt === null ? 'font-semibold' : ''}>{visit.number} {visit.garden}</span>
-      <span className="ml-auto text-ink-soft">
+    <li className="grid grid-cols-[5em_minmax(0,1fr)] items-baseline gap-x-4 border-b border-rule py-2 sm:grid-cols-[5em_minmax(0,1fr)_auto]">
+      <strong className="font-mono"><When at={visit.opensAt} show="time" club={club} /></strong>
+      <span className="flex min-w-0 items-baseline gap-x-3">
+        <span className="shrink-0"><NipCard stopNumber={visit.number} width={38} /></span>
+        <span className={visit.givenBackAt === null ? 'font-semibold' : ''}>{visit.number} {visit.garden}</span>
+      </span>
+      <span className="col-start-2 text-ink-soft sm:col-start-3">
         {visit.givenBackAt === null ? `${visit.people} ${visit.people === 1 ? 'person' : 'people'}` : <>given back on <When at={visit.givenBackAt} show="day" style="bare" club={club} /></>}
       </span>
     </li>
