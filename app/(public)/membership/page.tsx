@@ -16,7 +16,7 @@ export default async function MembershipPage() {
   const classes = await membershipOffer(ctx);
   return (
     <PublicSheet club={club} here="/membership" foot={<FootFlowers ctx={ctx} />}>
-      <Bill name="Membership" line="For people with a railway in the garden, a garden with room for one, or neither yet" sums={`Dues run from 1 January to 31 December. Who forgets is kept on for ${club.duesKeptOnDays} days, with a letter.`} />
+      <Bill name="Membership" line="For people with a railway in the garden, a garden with room for one, or neither yet" sums={`Dues run from 1 January to 31 December. Whoever forgets is kept on for ${club.duesKeptOnDays} days, with a letter.`} />
       <Columns split="main-aside">
         <div>
           <Part title="Classes and dues" place="first">

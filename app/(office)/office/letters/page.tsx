@@ -27,7 +27,7 @@ export default async function LettersPage({ searchParams }: { searchParams: Prom
     <OfficePage
       ctx={ctx}
       here={PATH}
-      bill={<Bill name="Letters" line="What the club sent and what could not be delivered; codes, links and addresses are blanked" sums={`${counted(total, 'letter', 'letters')}${asked.state === 'all' && asked.find === '' ? '' : ' of this kind'}.`} {...(total === 0 && asked.state === 'all' && asked.find === '' ? { rail: <RailRule state="empty" /> } : {})} />}
+      bill={<Bill name="Letters" line="What the club sent and what could not be delivered; codes, links and garden addresses are blanked" sums={`${counted(total, 'letter', 'letters')}${asked.state === 'all' && asked.find === '' ? '' : ' of this kind'}.`} {...(total === 0 && asked.state === 'all' && asked.find === '' ? { rail: <RailRule state="empty" /> } : {})} />}
     >
       <h2>Letters</h2>
       <LetterFilter shown={asked.state} path={PATH} find={asked.find} />
