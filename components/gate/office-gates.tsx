@@ -12,11 +12,12 @@ export function OfficeGateList({ view, makePass, revokePass }: OfficeGateListPro
     <>
       <Table
         caption="Heads at each gate"
+        room="figures"
         rows={view.gates}
         rowKey={(gate) => gate.stopId}
         empty="No garden takes part in this open day yet. Add a stop first."
         columns={[
-          { key: 'gate', head: 'Gate', names: 'row', cell: (gate) => <span className="flex items-center gap-2 whitespace-nowrap"><NipCard stopNumber={gate.number} width={38} />{gate.number} {gate.garden}</span> },
+          { key: 'gate', head: 'Gate', names: 'row', cell: (gate) => <span className="flex items-baseline gap-2 whitespace-nowrap"><NipCard stopNumber={gate.number} width={38} />{gate.number} {gate.garden}</span> },
           { key: 'expected', head: 'Expected', set: 'figures', cell: (gate) => gate.expected },
           { key: 'in', head: 'Let in', set: 'figures', cell: (gate) => gate.cameIn },
           { key: 'now', head: 'In now', set: 'figures', cell: (gate) => gate.now },

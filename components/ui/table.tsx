@@ -27,14 +27,16 @@ type TableProps<Row> = {
   opened?: (row: Row) => ReactNode;
   /** What stands there when there are no rows: a sentence and what to do first. */
   empty: ReactNode;
+  /** `figures`: most columns are short numbers, so that more of them fit on a phone. */
+  room?: keyof typeof ROOM_REM;
 };
 
 /** A staff table: hairlines, figures in columns, heads that sort by link. Scrolls in its own frame on a phone. */
-export function Table<Row>({ caption, captionShown = 'spoken', columns, rows, rowKey, rowId, opened, empty }: TableProps<Row>) {
+export function Table<Row>({ caption, captionShown = 'spoken', columns, rows, rowKey, rowId, opened, empty, room = 'words' }: TableProps<Row>) {
   if (rows.length === 0) return <div className="py-3">{empty}</div>;
   return (
     <div className="scroll-frame" role="region" aria-label={typeof caption === 'string' ? caption : 'Table'} tabIndex={0}>
-      <table className="w-full border-collapse" style={{ minWidth: `${columns.length * ROOM_REM}rem` }}>
+      <table className="w-full border-collapse" style={{ minWidth: `${columns.length * ROOM_REM[room]}rem` }}>
         <caption className={captionShown === 'spoken' ? 'sr-only' : 'note pb-2 text-lg'}>{caption}</caption>
         <thead>
           <tr>
@@ -61,7 +63,7 @@ export function Table<Row>({ caption, captionShown = 'spoken', columns, rows, ro
 }
 
 /* Room for each column on a phone, where the frame scrolls rather than break words. */
-const ROOM_REM = 6.5;
+const ROOM_REM = { words: 6.5, figures: 4.5 };
 
 const setting = (set: 'text' | 'figures' = 'text') => (set === 'figures' ? 'text-right whitespace-nowrap pl-2' : 'text-left pl-4 pr-2 last:pr-0');
 
