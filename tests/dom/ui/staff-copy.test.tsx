@@ -32,7 +32,7 @@ describe('the staff copy', () => {
   });
 
   it('says so when nothing waits', () => {
-    expect(copy([]).textContent).toContain('Nothing waits.');
+    expect(copy([]).textContent).toContain('Nothing waits here for now.');
   });
 
   it('marks the page that is open in its contents', () => {
