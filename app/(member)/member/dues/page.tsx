@@ -30,7 +30,7 @@ export default async function DuesPage({ searchParams }: { searchParams: Promise
     <MemberPage ctx={ctx} here="/member/dues">
       <Bill name="My dues" line={<StandingLine standing={standing} club={club} />} {...(paid === undefined ? {} : { sums: <Back isSettled={owing.length === 0} /> })} />
       <Part title="To pay" place="first">
-        {owing.length === 0 ? <p>Nothing is owed.</p> : owing.map((charge) => <Owing key={charge.id} charge={charge} club={club} />)}
+        {owing.length === 0 ? <p>Nothing is owed.</p> : owing.map((charge) => <Owing key={charge.id} charge={charge} club={club} isBack={paid !== undefined} />)}
       </Part>
       <Part title="My line">
         <HouseholdLine stations={stations} club={club} />
@@ -58,7 +58,10 @@ function Back({ isSettled }: { isSettled: boolean }) {
     : <>The card service has not told us yet. This page will say so when it has; <Link className="link" href="/member/dues?paid=look">look again</Link> in a moment.</>;
 }
 
-function Owing({ charge, club }: { charge: ChargeView; club: { currency: string; locale: string; timeZone: string; hourCycle: 'h12' | 'h23' } }) {
+type OwingProps = { charge: ChargeView; club: { currency: string; locale: string; timeZone: string; hourCycle: 'h12' | 'h23' }; isBack: boolean };
+
+/** What is owed and its button; whoever is just back from paying it is not asked to pay it again. */
+function Owing({ charge, club, isBack }: OwingProps) {
   const amount = formatMoney({ amountMinor: charge.amountMinor - charge.paidMinor, currency: club.currency }, club.locale);
   return (
     <div className="flex flex-wrap items-center justify-between gap-4 border-t border-rule py-3">
@@ -66,7 +69,7 @@ function Owing({ charge, club }: { charge: ChargeView; club: { currency: string;
         {charge.className}, <When on={charge.termFrom} club={club} style="short" /> to <When on={charge.termTo} club={club} style="short" />: <strong className="figures">{amount}</strong>
         {charge.isPaying ? ', a card payment is open' : ''}
       </p>
-      <PayDuesForm action={payDuesAction} chargeId={charge.id} submit={`Pay ${amount} by card`} />
+      {isBack && charge.isPaying ? null : <PayDuesForm action={payDuesAction} chargeId={charge.id} submit={`Pay ${amount} by card`} />}
     </div>
   );
 }
