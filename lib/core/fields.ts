@@ -51,6 +51,7 @@ export function isEmail(text: string): boolean {
 
 /** An e-mail address, trimmed, its domain in lower case. */
 export const emailField = z.string({ error: 'Type an e-mail address.' }).transform((text) => text.trim())
+  .refine((text) => text !== '', { error: 'Type an e-mail address.', abort: true })
   .refine(isEmail, { error: 'That is not an e-mail address we can write to. It looks like name@place.example.' })
   .transform((text) => text.slice(0, text.lastIndexOf('@')) + text.slice(text.lastIndexOf('@')).toLowerCase());
 

@@ -20,6 +20,11 @@ describe('what people type', () => {
     expect(isEmail(typed)).toBe(expected);
   });
 
+  it('asks for an address where none was typed, and says what is wrong with one that was', () => {
+    expect(sentence(emailField.safeParse('  '))).toBe('Type an e-mail address.');
+    expect(sentence(emailField.safeParse('ada at home'))).toContain('looks like name@place.example');
+  });
+
   it('keeps a local part as typed and writes the domain small', () => {
     expect(emailField.parse('  Ada.F@Place.EXAMPLE ')).toBe('Ada.F@place.example');
   });
