@@ -13,7 +13,7 @@ type ImprintProps = { clubName: string; here: string | undefined; account: NavLi
 /** The sheet's first line: the club's name and where else to go. On a phone, a menu that needs no JavaScript. */
 export function Imprint({ clubName, here, account }: ImprintProps) {
   return (
-    <header className="relative flex flex-wrap items-baseline gap-x-7 print:block">
+    <header className="relative z-10 flex flex-wrap items-baseline gap-x-7 print:block">
       <Link href="/" className="mr-auto py-1 pr-20 font-heading text-[1.3333rem] leading-tight font-bold tracking-[-0.004em] text-ink md:pr-0">
         {clubName}
       </Link>

@@ -12,8 +12,9 @@ type MemberSheetProps = Omit<ComponentProps<typeof Sheet>, 'ownLine' | 'here'> &
 
 /** A member's page: the public sheet, with the member's own line of links under the club's. */
 export function MemberSheet({ lines, here, signOut, ...sheet }: MemberSheetProps) {
+  // Above the bill: the letters of a large name reach further up than they look, and would take the clicks.
   const ownLine = (
-    <nav aria-label="Your own pages" className="mt-2 flex flex-wrap items-center gap-x-7 border-y border-rule print:hidden">
+    <nav aria-label="Your own pages" className="relative z-10 mt-2 flex flex-wrap items-center gap-x-7 border-y border-rule print:hidden">
       {lines.map((line) => (
         <NavLink key={line.href} line={line} here={here} />
       ))}
