@@ -94,11 +94,13 @@ describe('races about money', () => {
 
   it('opens one payment when Pay is pressed in two tabs at once', async () => {
     const { day, time } = await aDayAhead();
-    const eve = await eveHolds(day.id, [time.id], NOON);
+    const parties = await Promise.all(Array.from({ length: 5 }, () => eveHolds(day.id, [time.id], NOON)));
 
-    const ends = await Promise.all([evePays(eve, NOON), evePays(eve, NOON), evePays(eve, NOON)]);
+    for (const eve of parties) {
+      const ends = await Promise.all(Array.from({ length: 8 }, () => evePays(eve, NOON)));
 
-    expect(new Set(ends.map((end) => end.url)).size).toBe(1);
+      expect(new Set(ends.map((end) => end.url)).size).toBe(1);
+    }
   });
 
   it('numbers the receipts of a year without a gap when twenty payments arrive at once', async () => {
