@@ -6,17 +6,22 @@ import { Refusal } from '@/lib/core/refusal';
 /** How often something may be tried in a window. */
 export type Limit = { tries: number; minutes: number };
 
-/** The statement that counts one try under `key` and returns `tries`, for a command that asks more in the same round trip. */
-export function tryCounted(key: string, limit: Limit, now: Date): SQL {
-  const windowStart = new Date(now.getTime() - limit.minutes * 60_000).toISOString();
-  const at = now.toISOString();
-  return sql`
-    insert into rate_limits as r (key, window_started_at, tries) values (${key}, ${at}::timestamptz, 1)
-    on conflict (key) do update set
-      tries = case when r.window_started_at <= ${windowStart}::timestamptz then 1 else r.tries + 1 end,
-      window_started_at = case when r.window_started_at <= ${windowStart}::timestamptz then ${at}::timestamptz else r.window_started_at end
-    returning tries`;
-}
+/**
+ * Counts one try and returns `tries`: $1 the key, $2 the moment, $3 when a window that still counts began. As text, so
+ * that a command in a rush can ask more in the same round trip.
+ */
+export const TRY_COUNTED = `
+  insert into rate_limits as r (key, window_started_at, tries) values ($1::text, $2::timestamptz, 1)
+  on conflict (key) do update set
+    tries = case when r.window_started_at <= $3::timestamptz then 1 else r.tries + 1 end,
+    window_started_at = case when r.window_started_at <= $3::timestamptz then $2::timestamptz else r.window_started_at end
+  returning tries`;
+
+/** When a window that still counts began at the earliest. */
+export const windowStart = ({ limit, now }: { limit: Limit; now: Date }): Date => new Date(now.getTime() - limit.minutes * 60_000);
+
+const withValues = (text: string, values: readonly string[]): SQL =>
+  sql.join(text.split(/(\$\d)/).map((part) => (part.startsWith('$') ? sql`${values[Number(part.slice(1)) - 1]}` : sql.raw(part))));
 
 /** Throws `too_many_tries` past the limit. */
 export function refuseTries(tries: number, limit: Limit): void {
@@ -28,6 +33,6 @@ export function refuseTries(tries: number, limit: Limit): void {
  * servers share one count. Keys are short words and hashes, never addresses.
  */
 export async function countTry(db: Queryable, key: string, limit: Limit, now: Date): Promise<void> {
-  const { rows } = await db.execute<{ tries: number }>(tryCounted(key, limit, now));
+  const { rows } = await db.execute<{ tries: number }>(withValues(TRY_COUNTED, [key, now.toISOString(), windowStart({ limit, now }).toISOString()]));
   refuseTries(rows[0]?.tries ?? 0, limit);
 }

@@ -1,11 +1,11 @@
 import 'server-only';
 import { randomBytes } from 'node:crypto';
-import { sql } from 'drizzle-orm';
 import type { Queryable } from '@/db/client';
 import { only } from '@/lib/core/only';
 import { Refusal, refuseIf } from '@/lib/core/refusal';
 import { asId, type Id } from '@/lib/core/ids';
 import type { Ctx, HolderActor } from '@/lib/infra/context';
+import { runNamed } from '@/lib/infra/named-query';
 import { constraintOf, sqlStateOf } from '@/lib/infra/sql-state';
 import { clashSentence, holdRefusal, keptUntil, priced, type PricedVisit } from '../rules/hold';
 import { drawSpokenCode } from '../rules/spoken-code';
@@ -30,10 +30,12 @@ export async function holdPlaces(ctx: Omit<Ctx<HolderActor>, 'club'>, input: Hol
   const clash = input.insists ? null : clashSentence(facts.entries, facts.minutes, club);
   if (clash !== null) throw new Refusal('clash', { sentence: clash });
   const { visits, totalMinor } = priced(input.wanted, facts.entries, club.babesTakePlace);
-  return decide(db, () => sql`select hold_places(${input.openDayId}::uuid, ${actor.holderHash}, ${actor.householdId}::uuid, ${drawSpokenCode(randomBytes)},
-    ${now.toISOString()}::timestamptz, ${keptUntil(now, club.holdMinutes).toISOString()}::timestamptz, ${input.insists}, ${totalMinor}::integer, ${club.currency},
-    ${wantedJson(visits)}::jsonb) as id`);
+  const wanted = wantedJson(visits);
+  const until = keptUntil(now, club.holdMinutes).toISOString();
+  return decide(db, () => [input.openDayId, actor.holderHash, actor.householdId, drawSpokenCode(randomBytes), now.toISOString(), until, input.insists, totalMinor, club.currency, wanted]);
 }
+
+const HOLD = 'select hold_places($1::uuid, $2::text, $3::uuid, $4::text, $5::timestamptz, $6::timestamptz, $7::boolean, $8::integer, $9::text, $10::jsonb) as id';
 
 const wantedJson = (visits: readonly PricedVisit[]) => JSON.stringify(visits.map((visit) => ({
   id: visit.entryTimeId, adults: visit.adults, children: visit.children, babes: visit.babes, heads: visit.heads,
@@ -49,10 +51,10 @@ const DRAWN_AGAIN = new Set(['bookings_code_unique', 'bookings_one_hold_a_browse
 const TABS_MOST = 12;
 
 /** Runs the deciding statement again when it lost a race that another try wins, and reads its refusals. */
-async function decide(db: Queryable, statement: () => ReturnType<typeof sql>): Promise<Id<'booking'>> {
+async function decide(db: Queryable, valuesNow: () => unknown[]): Promise<Id<'booking'>> {
   for (let tries = 1; ; tries += 1) {
     try {
-      return asId<'booking'>(only((await db.execute<{ id: string }>(statement())).rows).id);
+      return asId<'booking'>(only(await runNamed<{ id: string }>(db, 'hold places', HOLD, valuesNow())).id);
     } catch (error) {
       const state = sqlStateOf(error) ?? '';
       const refused = [...REFUSED_BY_DATABASE].find(([code]) => code === state);

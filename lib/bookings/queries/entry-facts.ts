@@ -3,7 +3,8 @@ import { sql } from 'drizzle-orm';
 import type { Queryable } from '@/db/client';
 import type { Id } from '@/lib/core/ids';
 import type { ClubSettings } from '@/lib/infra/context';
-import { refuseTries, tryCounted, type Limit } from '@/lib/infra/rate-limit';
+import { runNamed } from '@/lib/infra/named-query';
+import { refuseTries, TRY_COUNTED, windowStart, type Limit } from '@/lib/infra/rate-limit';
 import type { PersonPrices } from '@/lib/opendays/rules/prices';
 import type { MinutesFact } from '@/lib/opendays/rules/reach';
 import { pricesOf, type PriceFacts } from '@/lib/opendays/views';
@@ -30,10 +31,12 @@ export async function findWishFacts(db: Queryable, openDayId: Id<'openDay'>, ids
   return toFacts(rows[0]?.facts ?? null);
 }
 
+const COUNT_AND_FIND = `with tried as (${TRY_COUNTED}) select tried.tries, wish_facts($4::uuid, $5::uuid[]) as facts from tried`;
+
 /** The same after the limiter has counted this try under `key`, in one round trip; refuses past the limit. */
 export async function countTryAndFindFacts(db: Queryable, tried: { key: string; limit: Limit; now: Date }, openDayId: Id<'openDay'>, ids: readonly Id<'entryTime'>[]): Promise<WishFacts | null> {
-  const { rows } = await db.execute<{ tries: number; facts: TextFacts | null }>(
-    sql`with tried as (${tryCounted(tried.key, tried.limit, tried.now)}) select tried.tries, ${factsOf(openDayId, ids)} as facts from tried`);
+  const rows = await runNamed<{ tries: number; facts: TextFacts | null }>(db, 'count try and find facts', COUNT_AND_FIND,
+    [tried.key, tried.now.toISOString(), windowStart(tried).toISOString(), openDayId, ids]);
   refuseTries(rows[0]?.tries ?? 0, tried.limit);
   return toFacts(rows[0]?.facts ?? null);
 }
